@@ -1,0 +1,127 @@
+/** Every failure a person can act on has one entry here: what happened, and what to do next. */
+export const explanations = {
+	'not-signed-in': {
+		status: 401,
+		message: 'You are not signed in.',
+		help: 'Sign in and try again. What you typed is kept in this browser.'
+	},
+	'sign-in-failed': {
+		status: 400,
+		message: 'That e-mail and passphrase don’t go together.',
+		help: 'Check both, or ask for a sign-in link instead.'
+	},
+	'sign-in-slowed': {
+		status: 429,
+		message: 'Too many tries in a short time.',
+		help: 'Wait a quarter of an hour, or ask for a sign-in link instead.'
+	},
+	'link-spent': {
+		status: 400,
+		message: 'This sign-in link has been used, or is older than ten minutes.',
+		help: 'Ask for a new one, and open it in the same browser.'
+	},
+	'confirm-needed': {
+		status: 403,
+		message: 'A signature needs your passphrase, given within the last quarter of an hour.',
+		help: 'Give it once more. What you were about to do is kept.'
+	},
+	'not-permitted': {
+		status: 403,
+		message: 'Your role doesn’t allow this.',
+		help: 'Ask a colleague whose role does.'
+	},
+	'same-person-twice': {
+		status: 403,
+		message: 'Writer, checker and editor of one proof are three people.',
+		help: 'Someone who hasn’t written or checked this proof must do this.'
+	},
+	'not-found': {
+		status: 404,
+		message: 'There is nothing at this address.',
+		help: 'Look for it from the desk.'
+	},
+	'version-conflict': {
+		status: 409,
+		message: 'Someone else saved this piece while you were writing.',
+		help: 'Load their version, or keep yours as the newest. Both are kept.'
+	},
+	'document-broken': {
+		status: 422,
+		message: 'This document doesn’t hang together.',
+		help: 'The draft before this change is kept. Undo the last step.'
+	},
+	'slug-taken': {
+		status: 409,
+		message: 'Another piece has this slug.',
+		help: 'Choose another short name.'
+	},
+	'proof-not-ready': {
+		status: 409,
+		message: 'A proof can’t be pulled yet.',
+		help: 'See to what is listed, then pull it again.'
+	},
+	'proof-superseded': {
+		status: 409,
+		message: 'A newer proof has been pulled since.',
+		help: 'Reload to see the newest proof.'
+	},
+	'claim-tips': {
+		status: 409,
+		message: 'This claim tips: the words don’t fit the reading.',
+		help: 'Query it, so that the writer can change the words or the reading.'
+	},
+	'claim-unweighed': {
+		status: 409,
+		message: 'This claim hangs on no reading, so there is nothing to sign.',
+		help: 'Query it, so that the writer ties it to a reading.'
+	},
+	'query-open': {
+		status: 409,
+		message: 'This claim has an open query.',
+		help: 'Settle the query first.'
+	},
+	'query-closed': {
+		status: 409,
+		message: 'This query is closed.',
+		help: 'Raise a new one if something is still unclear.'
+	},
+	'conditions-open': {
+		status: 409,
+		message: 'The proof can’t be passed yet.',
+		help: 'Each open condition says how to clear it.'
+	},
+	'already-released': {
+		status: 409,
+		message: 'This proof is already released.',
+		help: 'Pull a new proof to release a new version.'
+	},
+	'store-away': {
+		status: 503,
+		message: 'The store for published pieces doesn’t answer.',
+		help: 'Nothing was published. Try again in a minute.'
+	},
+	'input-broken': {
+		status: 422,
+		message: 'Some of what was sent can’t be read.',
+		help: 'Each problem is named beside its field.'
+	},
+	'too-large': {
+		status: 413,
+		message: 'This is larger than the house takes.',
+		help: 'Send less than 512 kilobytes at once.'
+	}
+} satisfies Record<string, { status: number; message: string; help: string }>;
+
+export type ErrorCode = keyof typeof explanations;
+
+/** Thrown by services; routes turn it into an answer. Anything else thrown is a bug. */
+export class SteelyardError extends Error {
+	constructor(
+		readonly code: ErrorCode,
+		/** What the sentence alone can't say: field issues, current versions, open conditions. */
+		readonly details: Record<string, unknown> = {}
+	) {
+		super(explanations[code].message);
+		this.name = 'SteelyardError';
+	}
+}

@@ -1,0 +1,63 @@
+import { describe, expect, test } from 'vitest';
+import { catalogue } from '../physics/calculators/index.ts';
+import { firstLight } from '../server/demo/first-light.ts';
+import { sameDrop } from '../server/demo/same-drop.ts';
+import type { WidgetDocument } from './document.ts';
+import { findings } from './findings.ts';
+import { parseDocument } from './parse.ts';
+
+/** The messages for a change to a sound document. */
+function issuesOf(change: (document: WidgetDocument) => unknown): string[] {
+	const parsed = parseDocument(change(structuredClone(firstLight)), catalogue);
+	return parsed.ok ? [] : parsed.issues.map(({ message }) => message);
+}
+
+test.each([firstLight, sameDrop])('$title hangs together and lacks nothing', (document) => {
+	expect(parseDocument(document, catalogue)).toEqual({ ok: true, document });
+	expect(findings(document, catalogue)).toEqual([]);
+});
+
+describe('what is broken is named', () => {
+	test('a ring on the bench', () => {
+		const [message] = issuesOf((document) => {
+			document.steps[0]!.settings.value = { from: 'reading', step: 'line', output: 'observedFrequency' };
+			return document;
+		}).slice(-1);
+		expect(message).toMatch(/feed each other in a ring: .+ → .+ → /);
+	});
+
+	test('a step that isn’t there', () => {
+		const messages = issuesOf((document) => {
+			document.steps[1]!.settings.z = { from: 'reading', step: 'gone', output: 'z' };
+			return document;
+		});
+		expect(messages.join(' ')).toContain('“gone”');
+	});
+
+	test('a length tied to an age', () => {
+		const messages = issuesOf((document) => {
+			document.controls[0]!.unit = 'm';
+			return document;
+		});
+		expect(messages.join(' ')).toMatch(/can’t take a value in m/);
+	});
+
+	test.each<[string, (document: WidgetDocument) => unknown, RegExp]>([
+		['an unknown unit', (d) => ({ ...d, controls: [{ ...d.controls[0], unit: 'furlong-ish' }] }), /no unit of the house/],
+		['an unknown calculator', (d) => ({ ...d, steps: [{ ...d.steps[0], calculator: 'no.such' }, d.steps[1]] }), /no calculator “no.such”/],
+		['a claim entry without words', (d) => ({ ...d, claims: [...d.claims, { id: 'loose', form: 'exempt', reason: 'x' }] }), /“loose” stands nowhere/],
+		['a first setting out of range', (d) => ({ ...d, controls: [{ ...d.controls[0], initial: 900 }] }), /between the lowest and the highest/],
+		['NaN', (d) => ({ ...d, controls: [{ ...d.controls[0], step: Number.NaN }] }), /./],
+		['a newer version', (d) => ({ ...d, version: 99 }), /version 99/],
+		['an unknown key', (d) => ({ ...d, colour: 'red' }), /colour/],
+		['no document', () => 'words', /JSON object/]
+	])('%s', (_, change, expected) => {
+		expect(issuesOf(change).join(' ')).toMatch(expected);
+	});
+});
+
+test('an empty sheet parses, and says what it lacks', () => {
+	const sheet = { ...firstLight, title: '', point: '', steps: [], controls: [], blocks: [], claims: [] };
+	expect(parseDocument(sheet, catalogue).ok).toBe(true);
+	expect(findings(sheet, catalogue).map(({ code }) => code)).toEqual(['no-title', 'no-point', 'no-copy']);
+});
