@@ -1,0 +1,113 @@
+/**
+ * One calculation as JSON: what `npm run calc` reads and writes a line at a time, and what
+ * POST /api/v1/calculators/{id} answers. Anything a person can send wrong comes back as `refused`.
+ */
+import {
+	type Calculator,
+	type CalculatorDefinition,
+	type InputSpec,
+	type Refusal,
+	type Result,
+	type Validity,
+	type Warning
+} from '../physics/calculator.ts';
+import { COSMOLOGY_PARAMETERS } from '../physics/calculators/cosmology/parameters.ts';
+import { catalogue } from '../physics/calculators/index.ts';
+import { nearestOf } from '../physics/calculators/nearest.ts';
+import { runCalculator } from '../physics/calculators/run.ts';
+import { constants } from '../physics/constants/index.ts';
+
+export interface CalculationRequest {
+	calculator: string;
+	inputs: Record<string, unknown>;
+}
+
+export type CalculationAnswer =
+	| {
+			outputs: Record<string, { value: number | string; unit: string }>;
+			warnings: Warning[];
+			validity: Validity;
+			/** Present only when a declared output has no value for these inputs. */
+			withheld?: Record<string, { code: string; message: string }>;
+	  }
+	| { refused: { code: string; message: string } };
+
+/** Runs one request of any shape. Never throws on what was sent. */
+export function calculate(request: unknown): CalculationAnswer {
+	if (!isRecord(request)) {
+		return refused('request-broken', 'A calculation is an object with “calculator” and “inputs”.');
+	}
+	const stray = Object.keys(request).find((key) => key !== 'calculator' && key !== 'inputs');
+	if (stray !== undefined) {
+		return refused(
+			'request-broken',
+			`“${stray.slice(0, 40)}” isn't known here. Send “calculator” and “inputs” alone.`
+		);
+	}
+	const { calculator: id, inputs } = request;
+	if (typeof id !== 'string') {
+		return refused(
+			'request-broken',
+			'“calculator” is missing. Give the id of one, such as “cosmo.at_z”.'
+		);
+	}
+	const calculator = catalogue.get(id);
+	if (!calculator) {
+		const near = nearestOf(id, [...catalogue.keys()]);
+		const hint = near
+			? `Did you mean “${near}”?`
+			: `There are ${[...catalogue.keys()].join(', ')}.`;
+		return refused('unknown-calculator', `There is no calculator “${id.slice(0, 60)}”. ${hint}`);
+	}
+	if (!isRecord(inputs)) {
+		return refused('inputs-broken', '“inputs” must be an object with one entry for each input.');
+	}
+	return answerOf(runCalculator(calculator, inputs));
+}
+
+/** A result as the public sees it: values and units, without the bench's bookkeeping. */
+export function answerOf(result: Result): CalculationAnswer {
+	if (!result.ok) return refused(result.refusal.code, result.refusal.message);
+	const outputs = Object.fromEntries(
+		Object.entries(result.outputs).map(([key, { value, unit }]) => [key, { value, unit }])
+	);
+	const answer = { outputs, warnings: result.warnings, validity: result.validity };
+	if (!result.withheld) return answer;
+	const withheld = Object.entries(result.withheld).map(
+		([key, { code, message }]: [string, Refusal]) => [key, { code, message }]
+	);
+	return { ...answer, withheld: Object.fromEntries(withheld) };
+}
+
+export type InputDescription = InputSpec & { sets?: object; parameters?: object };
+
+export type CalculatorDescription = Omit<CalculatorDefinition, 'compute' | 'inputs'> & {
+	inputs: Record<string, InputDescription>;
+};
+
+/** Every calculator as plain JSON: ids, inputs, outputs, units, ranges, equations, sources and checks. */
+export function describeCalculators(): CalculatorDescription[] {
+	return [...catalogue.values()].map(describeCalculator);
+}
+
+export function describeCalculator({
+	compute: _compute,
+	inputs,
+	...rest
+}: Calculator): CalculatorDescription {
+	const described = Object.entries(inputs).map(([key, spec]): [string, InputDescription] => [
+		key,
+		spec.kind === 'cosmology'
+			? { ...spec, sets: constants.cosmologies, parameters: COSMOLOGY_PARAMETERS }
+			: spec
+	]);
+	return { ...rest, inputs: Object.fromEntries(described) };
+}
+
+function refused(code: string, message: string): CalculationAnswer {
+	return { refused: { code, message } };
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+	return typeof value === 'object' && value !== null && !Array.isArray(value);
+}

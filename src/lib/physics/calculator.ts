@@ -1,0 +1,228 @@
+/**
+ * What a calculator is: everything it declares is data, so that a card, a slider, the fact-check and the API
+ * read the same limits. `runCalculator` is the one way to get a reading; it never throws on bad input.
+ */
+import { unitOf } from './units/units.ts';
+import type { QuantityKind } from './units/quantities.ts';
+
+/** A published work. `fromMemory` marks one that was recalled and not read again. */
+export interface Source {
+	title: string;
+	locator?: string;
+	doi?: string;
+	url?: string;
+	fromMemory?: boolean;
+}
+
+/** A refusal is an answer: it says what is wrong and how to mend it, in a reader's words. */
+export interface Refusal {
+	code: string;
+	message: string;
+	/** The input that caused it, where one did. */
+	input?: string;
+}
+
+export interface Warning {
+	code: string;
+	message: string;
+}
+
+/** `ok` inside the good zone, `approximate` with a warning, `outside` past the zone where the model was checked. */
+export type Validity = 'ok' | 'approximate' | 'outside';
+
+/** Standard uncertainty in the reading's own unit, or a statement why there is no number. */
+export type Uncertainty = number | 'exact' | 'not-available';
+
+/** One output of a calculator. Text outputs (a band's name) have a string value and no unit. */
+export interface Reading {
+	value: number | string;
+	unit: string;
+	quantity: QuantityKind;
+	uncertainty: Uncertainty;
+}
+
+export type Result =
+	| {
+			ok: true;
+			outputs: Record<string, Reading>;
+			warnings: Warning[];
+			validity: Validity;
+			/** Declared outputs that have no value for these inputs (a distance modulus at no distance), and why. */
+			withheld?: Record<string, Refusal>;
+	  }
+	| { ok: false; refusal: Refusal };
+
+/** A unit that another input decides: `{ by: 'kind', units: { z_from_age: 'Gyr', … } }`. */
+export type UnitSpec = string | { by: string; units: Record<string, string> };
+
+export interface NumberInput {
+	kind: 'number';
+	label: string;
+	symbol?: string;
+	quantity: QuantityKind;
+	/** Where another input decides what this one is. */
+	quantityBy?: { by: string; kinds: Record<string, QuantityKind> };
+	unit: UnitSpec;
+	/** Hard limits: outside them the calculator refuses. Exclusive where said. */
+	min: number;
+	max: number;
+	minExclusive?: boolean;
+	maxExclusive?: boolean;
+	/** The zone where the model is good; past it the declared warning of this code is given. */
+	good?: { min: number; max: number; warning: string };
+	/** The value a fresh try-out starts from; used by `runCalculator` only when `optional`. */
+	initial: number;
+	optional?: boolean;
+	/** Draw and step the input on a logarithmic scale. */
+	log?: boolean;
+}
+
+export interface ChoiceInput {
+	kind: 'choice';
+	label: string;
+	options: { value: string; label: string }[];
+	initial: string;
+	optional?: boolean;
+}
+
+/** The parameter set of an expanding universe: `{ set: 'Planck18' }`, or its parameters one by one. */
+export interface CosmologyInput {
+	kind: 'cosmology';
+	label: string;
+	initial: { set: string };
+	optional?: boolean;
+}
+
+export type InputSpec = NumberInput | ChoiceInput | CosmologyInput;
+
+export interface OutputSpec {
+	label: string;
+	symbol?: string;
+	quantity: QuantityKind;
+	/** '' for a pure number; `text` outputs carry words. */
+	unit: UnitSpec;
+	text?: boolean;
+}
+
+/** A warning as data: its condition is told in words beside the sentence a reader gets. */
+export interface WarningSpec {
+	code: string;
+	message: string;
+	when: string;
+	/** What the warning does to the reading's validity; `ok` for advice that leaves the number as good as it was. */
+	validity: Validity;
+}
+
+/** A published value that the calculator must reproduce, with where it was printed. */
+export interface CheckValue {
+	id: string;
+	statement: string;
+	inputs: RawInputs;
+	output: string;
+	/** Multiply the output by this to get the published unit. */
+	outputScale: number;
+	published: number;
+	tolerance: number;
+	unit: string;
+	source: string;
+	verification: string;
+}
+
+export type RawInputs = Record<string, unknown>;
+
+/** Inputs after checking: numbers in the declared unit, choices among the options, cosmologies as full parameters. */
+// eslint-disable-next-line @typescript-eslint/no-explicit-any
+export type CheckedInputs = Record<string, any>;
+
+export type Computed =
+	| {
+			ok: true;
+			values: Record<string, number | string>;
+			/** Given the inputs as exact. An output that isn't named here has no known uncertainty. */
+			uncertainties?: Record<string, Uncertainty>;
+			/** Codes of declared warnings that apply. */
+			warnings?: string[];
+			withheld?: Record<string, Refusal>;
+	  }
+	| { ok: false; refusal: Refusal };
+
+export interface CalculatorDefinition {
+	id: string;
+	/** Major: the same inputs may give another result. Minor: a new output. Patch: words only. */
+	revision: string;
+	title: string;
+	/** The question it answers, in one line. */
+	purpose: string;
+	/** Other words a writer may ask with. */
+	asks: string[];
+	notFor: string[];
+	inputs: Record<string, InputSpec>;
+	/** Groups of inputs of which exactly one is given. */
+	oneOf?: string[][];
+	outputs: Record<string, OutputSpec>;
+	equations: { tex: string; says: string }[];
+	assumptions: string[];
+	warnings: WarningSpec[];
+	/** Shown wherever the calculator's work could hurt someone in the real world. */
+	caution?: string;
+	sources: Source[];
+	checks: CheckValue[];
+	history: { revision: string; date: string; change: string }[];
+	compute(inputs: CheckedInputs): Computed;
+}
+
+export type Calculator = Readonly<CalculatorDefinition>;
+
+/** Calculators by id: all of them on the server, just those of one widget in a reader's frame. */
+export type CalculatorSet = ReadonlyMap<string, Calculator>;
+
+/** Checks once, at load, what the compiler cannot: units exist, and warnings and groups name what is declared. */
+export function defineCalculator(definition: CalculatorDefinition): Calculator {
+	for (const [key, spec] of [
+		...Object.entries(definition.inputs).filter(([, input]) => input.kind === 'number'),
+		...Object.entries(definition.outputs)
+	] as [string, NumberInput | OutputSpec][]) {
+		const units = typeof spec.unit === 'string' ? [spec.unit] : Object.values(spec.unit.units);
+		for (const unit of units) {
+			if (!unitOf(unit)) throw new Error(`${definition.id}: ${key} has the unknown unit “${unit}”`);
+		}
+	}
+	const codes = new Set(definition.warnings.map((warning) => warning.code));
+	for (const [key, input] of Object.entries(definition.inputs)) {
+		if (input.kind === 'number' && input.good && !codes.has(input.good.warning)) {
+			throw new Error(
+				`${definition.id}: ${key} names the undeclared warning “${input.good.warning}”`
+			);
+		}
+	}
+	for (const key of (definition.oneOf ?? []).flat()) {
+		if (!Object.hasOwn(definition.inputs, key))
+			throw new Error(`${definition.id}: no input “${key}”`);
+	}
+	return Object.freeze(definition);
+}
+
+export function refuse(
+	code: string,
+	message: string,
+	input?: string
+): { ok: false; refusal: Refusal } {
+	return { ok: false, refusal: input ? { code, message, input } : { code, message } };
+}
+
+/** The unit an input or output has, given the other inputs. */
+export function resolveUnit(spec: UnitSpec, inputs: RawInputs): string {
+	if (typeof spec === 'string') return spec;
+	const chosen = String(inputs[spec.by]);
+	return (Object.hasOwn(spec.units, chosen) ? spec.units[chosen] : undefined) ?? '';
+}
+
+/** What a number input is a measure of, given the other inputs. */
+export function resolveQuantity(spec: NumberInput, inputs: RawInputs): QuantityKind {
+	const { quantityBy, quantity } = spec;
+	if (!quantityBy) return quantity;
+	const chosen = String(inputs[quantityBy.by]);
+	return (
+		(Object.hasOwn(quantityBy.kinds, chosen) ? quantityBy.kinds[chosen] : undefined) ?? quantity
+	);
+}

@@ -1,0 +1,237 @@
+/**
+ * Published values that the calculators must reproduce, each with where it was printed and how far that was verified.
+ * A calculator shows its own on its page; the tests weigh them all.
+ */
+import type { CheckValue } from '../calculator.ts';
+
+const PUBLISHED: Record<string, CheckValue[]> = {
+	'cosmo.at_z': [
+		{
+			id: 'chk-01',
+			statement: 'Age of the Universe, Planck 2018',
+			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.787,
+			tolerance: 0.02,
+			unit: 'Gyr',
+			source: 'Planck Collaboration 2018 VI, A&A 641 A6, Table 2 last column',
+			verification: 'verified: astropy 5.2.1 Planck18.meta t0'
+		},
+		{
+			id: 'chk-02',
+			statement: 'Age of the Universe, Planck 2015',
+			inputs: { cosmology: { set: 'Planck15' }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.799,
+			tolerance: 0.021,
+			unit: 'Gyr',
+			source: 'Planck Collaboration 2015 XIII, A&A 594 A13, Table 4',
+			verification: 'verified: astropy Planck15.meta t0 (uncertainty from memory)'
+		},
+		{
+			id: 'chk-03',
+			statement: 'Age of the Universe, Planck 2013',
+			inputs: { cosmology: { set: 'Planck13' }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.7965,
+			tolerance: 0.037,
+			unit: 'Gyr',
+			source: 'Planck Collaboration 2013 XVI, A&A 571 A16, Table 5',
+			verification: 'verified: astropy Planck13.meta t0 (uncertainty from memory)'
+		},
+		{
+			id: 'chk-04',
+			statement: 'Age of the Universe, WMAP 9-year',
+			inputs: { cosmology: { set: 'WMAP9' }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.772,
+			tolerance: 0.059,
+			unit: 'Gyr',
+			source: 'Hinshaw et al. 2013, ApJS 208 19, Table 4',
+			verification: 'verified: astropy WMAP9.meta t0 (uncertainty from memory)'
+		},
+		{
+			id: 'chk-05',
+			statement: 'Age now in the worked example H0=71, Om=0.27, flat',
+			inputs: { cosmology: { H0: 71, Om0: 0.27, Tcmb0: 2.72528, Neff: 3.04, m_nu: [0] }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.666,
+			tolerance: 0.005,
+			unit: 'Gyr',
+			source: 'Wright 2006, PASP 118 1711',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-06',
+			statement: 'Einstein-de Sitter age = 2/(3 H0), H0=50',
+			inputs: { cosmology: { H0: 50, Om0: 1 }, z: 0 },
+			output: 'age',
+			outputScale: 1,
+			published: 13.037,
+			tolerance: 0.001,
+			unit: 'Gyr',
+			source: 'closed form, Hogg 1999 astro-ph/9905116',
+			verification: 'verified: closed form'
+		},
+		{
+			id: 'chk-07',
+			statement: 'Comoving distance to last scattering z=1089.8',
+			inputs: { cosmology: { set: 'Planck18' }, z: 1089.8 },
+			output: 'comoving_distance',
+			outputScale: 0.001,
+			published: 13.87,
+			tolerance: 0.03,
+			unit: 'Gpc',
+			source: 'Planck 2018 VI Table 2: r*=144.57 Mpc, 100theta*=1.04119 give 13.885 Gpc',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-08',
+			statement: 'Age at last scattering',
+			inputs: { cosmology: { set: 'Planck18' }, z: 1089.8 },
+			output: 'age',
+			outputScale: 1000,
+			published: 0.38,
+			tolerance: 0.01,
+			unit: 'Myr',
+			source: '“about 380,000 years”, e.g. Planck 2013 I',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-09',
+			statement: 'Age at Planck 2018 reionisation redshift z=7.82',
+			inputs: { cosmology: { set: 'Planck18' }, z: 7.82 },
+			output: 'age',
+			outputScale: 1,
+			published: 0.66,
+			tolerance: 0.1,
+			unit: 'Gyr',
+			source: 'Planck 2018 VI Table 2, z_re=7.82+-0.71',
+			verification: 'verified: astropy meta z_reion (age computed)'
+		},
+		{
+			id: 'chk-10',
+			statement: 'Age at redshift 14.32, one of the highest measured for a galaxy',
+			inputs: { cosmology: { set: 'Planck18' }, z: 14.32 },
+			output: 'age',
+			outputScale: 1,
+			published: 0.29,
+			tolerance: 0.01,
+			unit: 'Gyr',
+			source: 'Carniani et al. 2024, Nature 633 318',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-11',
+			statement: 'Present particle horizon (comoving radius of observable Universe)',
+			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
+			output: 'particle_horizon',
+			outputScale: 0.003261563777,
+			published: 46.3,
+			tolerance: 0.4,
+			unit: 'Gly',
+			source: 'Davis & Lineweaver 2004, PASA 21 97 (46 Gly); Gott et al. 2005',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-12',
+			statement: 'Present event horizon',
+			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
+			output: 'event_horizon',
+			outputScale: 0.003261563777,
+			published: 16.7,
+			tolerance: 0.6,
+			unit: 'Gly',
+			source: 'Davis & Lineweaver 2004 (about 16 Gly)',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-13',
+			statement: 'Hubble time for H0=67.66',
+			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
+			output: 'hubble_time',
+			outputScale: 1,
+			published: 14.45,
+			tolerance: 0.01,
+			unit: 'Gyr',
+			source: '1/H0',
+			verification: 'verified: closed form'
+		},
+		{
+			id: 'chk-14',
+			statement: 'Critical density today, h=0.6766',
+			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
+			output: 'critical_density',
+			outputScale: 1,
+			published: 8.6e-27,
+			tolerance: 1e-29,
+			unit: 'kg/m3',
+			source: '3H0^2/8piG (PDG: 1.878e-26 h^2)',
+			verification: 'from memory (PDG prefactor)'
+		}
+	],
+	'g21.frequency_from_z': [
+		{
+			id: 'chk-21',
+			statement: '21 cm line wavelength',
+			inputs: { z: 0 },
+			output: 'wavelength',
+			outputScale: 100,
+			published: 21.106114,
+			tolerance: 1e-6,
+			unit: 'cm',
+			source: 'Hellwig et al. 1970; c/nu',
+			verification: 'from memory'
+		}
+	],
+	'g21.z_from_frequency': [
+		{
+			id: 'chk-22',
+			statement: '78 MHz corresponds to z = 17.2',
+			inputs: { frequency_MHz: 78 },
+			output: 'z',
+			outputScale: 1,
+			published: 17.2,
+			tolerance: 0.05,
+			unit: '',
+			source: 'Hills et al. 2018, Nature 564 E32',
+			verification: 'from memory'
+		}
+	],
+	'energy.convert': [
+		{
+			id: 'chk-29',
+			statement: '1 t TNT',
+			inputs: { value: 1, from: 'tTNT', to: 'J' },
+			output: 'value',
+			outputScale: 1,
+			published: 4184000000,
+			tolerance: 0,
+			unit: 'J',
+			source: 'NIST SP 811 Appendix B.8',
+			verification: 'verified by definition'
+		},
+		{
+			id: 'chk-30',
+			statement: '1 kg rest energy in Mt TNT',
+			inputs: { value: 1, from: 'kgmc2', to: 'MtTNT' },
+			output: 'value',
+			outputScale: 1,
+			published: 21.48,
+			tolerance: 0.01,
+			unit: 'Mt',
+			source: 'E=mc^2; textbook',
+			verification: 'verified: closed form'
+		}
+	]
+};
+
+/** The published values a calculator is checked against; none for an id without any. */
+export function checksOf(calculatorId: string): CheckValue[] {
+	return PUBLISHED[calculatorId] ?? [];
+}
