@@ -71,12 +71,16 @@ export function stateReading(value: number, unit: string, format: LiveFormat): S
 
 /** “about 68 megahertz”: numeral and unit keep together, the minus is a real one, long numerals are grouped. */
 export function printStated(stated: Stated): string {
-	const unitWords = stated.unitWord ?? unitWord(stated.unit, stated.numeral);
-	const tail = [scaleWord(stated.scale), unitWords].filter(Boolean).join(' ');
-	const joint = CLOSED_UP.test(tail) ? '' : NO_BREAK;
-	return [stated.hedgeWord, [printNumeral(stated.numeral), tail].filter(Boolean).join(joint)]
+	return [stated.hedgeWord, printNumeral(stated.numeral) + printAfterNumeral(stated)]
 		.filter(Boolean)
 		.join(' ');
+}
+
+/** Scale word and unit with the space before them: what follows the numeral. '' for a plain number. */
+export function printAfterNumeral({ numeral, scale, unit, unitWord: written }: Stated): string {
+	const words = written ?? unitWord(unit, numeral);
+	const tail = [scaleWord(scale), words].filter(Boolean).join(' ');
+	return tail && (CLOSED_UP.test(tail) ? tail : NO_BREAK + tail);
 }
 
 /** English closes up the per cent sign and the signs of angle, and no other unit. */
@@ -117,7 +121,7 @@ const SCALE_WORDS: Record<number, string> = {
 /** Decimal digits of a finite double without exponent: “0.00012”, “1420405751.768”. */
 export function plainDecimal(value: number): string {
 	const text = String(value);
-	const [, sign, whole, fraction = '', exponent] =
+	const [, sign = '', whole = '', fraction = '', exponent] =
 		/^(-?)(\d+)(?:\.(\d+))?(?:e([+-]\d+))?$/.exec(text) ?? [];
 	if (exponent === undefined) return text;
 	const digits = whole + fraction;
@@ -131,7 +135,7 @@ export function plainDecimal(value: number): string {
 export function roundToFigures(value: number, figures: number): string {
 	if (value === 0) return '0';
 	const decimal = plainDecimal(Math.abs(value));
-	const [whole, fraction = ''] = decimal.split('.');
+	const [whole = '', fraction = ''] = decimal.split('.');
 	const digits = (whole + fraction).replace(/^0+/, '');
 	const magnitude = whole === '0' ? -(fraction.match(/^0*/)?.[0].length ?? 0) : whole.length;
 	return (value < 0 ? '-' : '') + roundDigits(digits, magnitude, figures);

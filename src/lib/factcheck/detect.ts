@@ -1,0 +1,345 @@
+/**
+ * Finds the quantities in prose as it is typed: number, scale, unit and hedge, as one stretch of text. Dates, years,
+ * ordinals and names with digits are left alone. Time grows with the length of the text and no faster.
+ */
+import type { HedgeFamily, Stated } from '../widget/stated.ts';
+import { unitOf } from '../physics/units/units.ts';
+import { lexiconOf, plainPhrase, type Language } from './hedges.ts';
+import { isName, isYear, skippedSpans } from './not-quantities.ts';
+import { readAt, readNumber, type NumberRead } from './numbers.ts';
+import { compile, type Patterns } from './patterns.ts';
+
+export type QuantityForm =
+	| 'number'
+	| 'fraction'
+	| 'multiple'
+	| 'range'
+	| 'percent'
+	| 'power'
+	| 'uncertainty'
+	| 'order-word'
+	| 'small-word';
+
+export interface DetectedQuantity {
+	/** UTF-16 offsets of `surface`, from the hedge to the unit. */
+	start: number;
+	end: number;
+	surface: string;
+	kind: QuantityForm;
+	/** In `unit`; null where the words name no one number. */
+	value: number | null;
+	/** Both ends of a range, in `unit`. */
+	ends?: readonly [low: number, high: number];
+	/** A symbol of the unit table; '' for a plain number. */
+	unit: string;
+	/** The hedge as written; '' when bare. */
+	hedge: string;
+	/** Two hedges on one number, “about up to 15”. */
+	doubleHedge: boolean;
+	/** What is weighed; null for kinds that no rule in the house weighs yet. */
+	stated: Stated | null;
+}
+
+const compiled = new Map<Language, Patterns>();
+
+function patternsOf(language: Language): Patterns {
+	const known = compiled.get(language);
+	if (known) return known;
+	const patterns = compile(lexiconOf(language));
+	compiled.set(language, patterns);
+	return patterns;
+}
+
+/** Every quantity of a text, in reading order. */
+export function detectQuantities(text: string, language: Language): DetectedQuantity[] {
+	const patterns = patternsOf(language);
+	const skips = skippedSpans(patterns, text);
+	const found: DetectedQuantity[] = [];
+	let at = 0;
+	for (;;) {
+		const place = nextTrigger(patterns, text, at);
+		if (place === null) return found;
+		const skip = skips.find(place);
+		if (skip !== null) {
+			at = skip;
+			continue;
+		}
+		const { quantity, resume } = readQuantity(patterns, text, place, found.at(-1)?.end ?? 0);
+		if (quantity) found.push(quantity);
+		at = Math.max(resume, place + 1);
+	}
+}
+
+function nextTrigger({ trigger }: Patterns, text: string, from: number): number | null {
+	trigger.lastIndex = from;
+	return trigger.exec(text)?.index ?? null;
+}
+
+interface Part {
+	number: NumberRead;
+	negative: boolean;
+	unit: string;
+	unitWord: string;
+	start: number;
+	end: number;
+}
+
+interface Attempt {
+	quantity: DetectedQuantity | null;
+	/** Where to go on. */
+	resume: number;
+}
+
+function readQuantity(patterns: Patterns, text: string, at: number, floor: number): Attempt {
+	const number = readNumber(patterns, text, at);
+	if (!number) return { quantity: null, resume: at + 1 };
+	const first = withUnit(patterns, text, number, floor);
+	const nothing: Attempt = { quantity: null, resume: afterToken(text, number) };
+	if (!stands(patterns, text, first)) return nothing;
+
+	const range = readRange(patterns, text, first, floor);
+	if (range) return range.quantity || number.form !== 'article' ? range : nothing;
+
+	const hedge = readHedge(patterns, text, first.start, floor);
+	if (!isQuantity(patterns, text, first, hedge)) return nothing;
+	return { quantity: quantityOf(patterns, text, first, hedge), resume: first.end };
+}
+
+/** After a number that isn't read: past its digits or its word, so that “W4” doesn't stop at every sign. */
+function afterToken(text: string, number: NumberRead): number {
+	return number.form === 'numeral'
+		? number.end
+		: Math.min(number.end, number.start + wordLength(text, number.start));
+}
+
+function wordLength(text: string, at: number): number {
+	return /^[\p{L}\p{N}]+/u.exec(text.slice(at, at + 40))?.[0].length ?? 1;
+}
+
+function withUnit(patterns: Patterns, text: string, number: NumberRead, floor: number): Part {
+	const of = number.form === 'order-word' ? readAt(patterns.of, text, number.end) : null;
+	const unit = readUnit(patterns, text, number.end + (of?.[0].length ?? 0));
+	const before = text.slice(Math.max(floor, number.start - 12), number.start);
+	const minus = patterns.minusBefore.exec(before);
+	const sign = minus ? minus[0].replace(/^[\s(~≈<>≥≤“"–](?=[-−])/u, '') : '';
+	return {
+		number,
+		negative: Boolean(minus),
+		unit: unit?.symbol ?? '',
+		unitWord: unit?.word ?? '',
+		start: number.start - sign.length,
+		end: unit?.end ?? number.end
+	};
+}
+
+/** A unit right after the number, by name or by symbol, whichever is longer. */
+function readUnit(patterns: Patterns, text: string, at: number) {
+	const named = readAt(patterns.unitName, text, at);
+	const name = named?.groups?.name;
+	const byName =
+		named && name
+			? { symbol: patterns.unitByName.get(plainPhrase(name)), length: named[0].length, word: name }
+			: null;
+	const bySymbol = readSymbol(patterns, text, at);
+	const best = (byName?.length ?? 0) >= (bySymbol?.length ?? 0) ? byName : bySymbol;
+	return best?.symbol === undefined
+		? null
+		: { symbol: best.symbol, word: best.word, end: at + best.length };
+}
+
+function readSymbol(patterns: Patterns, text: string, at: number) {
+	const match = readAt(patterns.unitSymbol, text, at);
+	const { gap = '', symbol = '' } = match?.groups ?? {};
+	if (!match) return null;
+	const isWordLike = /\p{L}$/u.test(symbol);
+	if (isWordLike && /^[\p{L}\p{N}]/u.test(text.slice(at + match[0].length))) return null;
+	// “5K” and “1990s” are more often a name than a quantity; “5km” is a slip for “5 km”.
+	if (gap === '' && /^\p{L}$/u.test(symbol)) return null;
+	return { symbol: unitOf(symbol)?.symbol, length: match[0].length, word: symbol };
+}
+
+/** The number stands by itself: not inside a name, an ordinal or a longer token. */
+function stands(patterns: Patterns, text: string, part: Part): boolean {
+	const { start } = part.number;
+	const isDigits = /\d/.test(text[start] ?? '');
+	const before = text.slice(Math.max(0, start - 2), start);
+	if (isDigits && /[\p{L}\p{N}_]$|[\p{L}\p{N}][-–/_.]$|\d,$/u.test(before)) return false;
+	return endsCleanly(patterns, text, part);
+}
+
+function endsCleanly(patterns: Patterns, text: string, { number, end }: Part): boolean {
+	if (end !== number.end) return true;
+	if (readAt(patterns.ordinalEnding, text, end)) return false;
+	return !/^(?:[\p{L}_]|[-/]\p{L})/u.test(text.slice(end, end + 3));
+}
+
+interface Hedge {
+	family: HedgeFamily;
+	word: string;
+	start: number;
+	double: boolean;
+}
+
+/** Longer than any hedge with an aside. */
+const LOOK_BACK = 48;
+
+function readHedge(patterns: Patterns, text: string, start: number, floor: number): Hedge {
+	const near = hedgeEndingAt(patterns, text, start, floor);
+	if (!near) return { family: 'bare', word: '', start, double: false };
+	const far = hedgeEndingAt(patterns, text, near.start, floor);
+	if (!far) return { ...near, double: false };
+	return { ...near, word: `${far.word} ${near.word}`, start: far.start, double: true };
+}
+
+function hedgeEndingAt(patterns: Patterns, text: string, start: number, floor: number) {
+	const from = Math.max(floor, start - LOOK_BACK);
+	const match = patterns.hedgeBefore.exec(text.slice(from, start));
+	const word = match?.groups?.word ?? match?.groups?.sign;
+	const family = word && patterns.hedgeFamilies.get(plainPhrase(word));
+	return match && word && family ? { family, word, start: from + match.index } : null;
+}
+
+/** Words that are a quantity only in company: “one metre”, not “one”; “about a metre”, not “a metre”. */
+function isQuantity(patterns: Patterns, text: string, part: Part, hedge: Hedge): boolean {
+	const { number, unit } = part;
+	const alone = unit === '' && number.scale === 1;
+	switch (number.form) {
+		case 'article':
+			return unit !== '' && hedge.family !== 'bare';
+		case 'word':
+			if (alone && Number(number.numeral) < 2) return false;
+			return !(alone && isName(patterns, text, number));
+		case 'fraction':
+			return !patterns.halfNounBefore.test(
+				text.slice(Math.max(0, number.start - 24), number.start)
+			);
+		case 'numeral':
+			if (!alone) return true;
+			if (isYear(patterns, text, number, hedge.family, hedge.start)) return false;
+			return !isName(patterns, text, number);
+		default:
+			return true;
+	}
+}
+
+function quantityOf(patterns: Patterns, text: string, part: Part, hedge: Hedge): DetectedQuantity {
+	const { number, unit } = part;
+	const kind = kindOf(patterns, part);
+	const numeral = (part.negative ? '-' : '') + number.numeral;
+	const weighed = kind !== 'order-word' && kind !== 'small-word' && kind !== 'uncertainty';
+	const quantity = quantityWord(patterns, text, part.end);
+	const stated: Stated | null = weighed
+		? {
+				hedge: hedge.family,
+				hedgeWord: hedge.word,
+				numeral,
+				scale: number.scale,
+				unit,
+				...unitWord(part),
+				...(number.fraction ? { fraction: number.fraction } : {}),
+				...(quantity ? { quantity } : {})
+			}
+		: null;
+	return {
+		start: hedge.start,
+		end: part.end,
+		surface: text.slice(hedge.start, part.end),
+		kind,
+		value: valueOf(part),
+		unit,
+		hedge: hedge.word,
+		doubleHedge: hedge.double,
+		stated
+	};
+}
+
+function unitWord({ unit, unitWord: word }: Part): Pick<Stated, 'unitWord'> {
+	const words = unitOf(unit)?.words;
+	return !word || word === words?.one || word === words?.many ? {} : { unitWord: word };
+}
+
+function quantityWord(patterns: Patterns, text: string, at: number): string | undefined {
+	const word = readAt(patterns.quantityWord, text, at)?.groups?.word;
+	return word && patterns.lexicon.quantities[plainPhrase(word)];
+}
+
+function kindOf({ lexicon }: Patterns, { number, unit }: Part): QuantityForm {
+	switch (number.form) {
+		case 'numeral':
+		case 'word':
+		case 'article':
+			return unit === '%' ? 'percent' : unit === lexicon.times ? 'multiple' : 'number';
+		default:
+			return number.form;
+	}
+}
+
+function valueOf({ number, negative }: Part): number | null {
+	if (number.numeral === '') return number.form === 'order-word' ? number.scale : null;
+	const [over, under] = number.fraction ?? [Number(number.numeral), 1];
+	return Number((((negative ? -1 : 1) * over * number.scale) / under).toPrecision(15));
+}
+
+/** “2–3 km”, “between 2 and 3 km”, “from 2 to 3 km”: unit and scale once, at the end, stand for both. */
+function readRange(patterns: Patterns, text: string, first: Part, floor: number): Attempt | null {
+	const ahead = text.slice(Math.max(floor, first.start - 16), first.start);
+	const lead = patterns.betweenBefore.exec(ahead) ?? patterns.fromBefore.exec(ahead);
+	const isBetween = lead !== null && patterns.betweenBefore.test(ahead);
+	const joint =
+		(first.number.form === 'numeral' && readAt(patterns.rangeDash, text, first.end)) ||
+		(isBetween && readAt(patterns.rangeAnd, text, first.end)) ||
+		readAt(patterns.rangeTo, text, first.end);
+	if (!joint || !isCount(first)) return null;
+	const second = readSecond(patterns, text, first.end + joint[0].length);
+	if (!second || !isCount(second)) return null;
+	const isWords = first.number.form === 'word' || second.number.form === 'word';
+	const hasUnit = first.unit !== '' || second.unit !== '';
+	if (isWords && !lead && !hasUnit) return null;
+	const areYears =
+		!hasUnit &&
+		[first, second].every(({ number }) => number.bareDigits && /^[12]\d{3}$/.test(number.numeral));
+	if (areYears) return { quantity: null, resume: second.end };
+
+	const unit = second.unit || first.unit;
+	const scaled =
+		first.number.scale === 1 && first.unit === ''
+			? { ...first.number, scale: second.number.scale }
+			: first.number;
+	const low = valueOf({ ...first, number: scaled });
+	const high = valueOf(second);
+	const hedge = aroundOnly(readHedge(patterns, text, first.start, floor), first.start);
+	const start = lead ? first.start - lead[0].length : hedge.start;
+	const quantity: DetectedQuantity = {
+		start,
+		end: second.end,
+		surface: text.slice(start, second.end),
+		kind: 'range',
+		value: null,
+		...(low === null || high === null ? {} : { ends: [low, high] as const }),
+		unit,
+		hedge: lead ? '' : hedge.word,
+		doubleHedge: false,
+		stated: null
+	};
+	return { quantity, resume: second.end };
+}
+
+/** “About 2–3 km” hedges a range; “over 2–3 km” only says where. */
+function aroundOnly(hedge: Hedge, start: number): Hedge {
+	return hedge.family === 'around' ? hedge : { family: 'bare', word: '', start, double: false };
+}
+
+function isCount({ number }: Part): boolean {
+	return number.form === 'numeral' || number.form === 'word' || number.form === 'power';
+}
+
+/** The far end of a range, with its own sign. */
+function readSecond(patterns: Patterns, text: string, at: number): Part | null {
+	const sign = readAt(patterns.sign, text, at)?.[0] ?? '';
+	const number = readNumber(patterns, text, at + sign.length);
+	if (!number || number.form === 'article') return null;
+	const part = withUnit(patterns, text, number, at + sign.length);
+	return endsCleanly(patterns, text, part)
+		? { ...part, negative: sign !== '' && sign !== '+' }
+		: null;
+}

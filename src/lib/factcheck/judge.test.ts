@@ -1,0 +1,226 @@
+import { describe, expect, test } from 'vitest';
+import {
+	defineCalculator,
+	refuse,
+	type Calculator,
+	type CalculatorSet
+} from '../physics/calculator.ts';
+import type { Claim, Control, Inline, WidgetDocument } from '../widget/document.ts';
+import { judgeClaims, settingsOf, undeclared } from './judge.ts';
+
+/** Twice what it is given, so that the expected readings can be seen. Refuses past 90. */
+const doubler: Calculator = defineCalculator({
+	id: 'test.doubler',
+	revision: '1.0.0',
+	title: 'Doubler',
+	purpose: 'Doubles a length.',
+	asks: [],
+	notFor: [],
+	inputs: {
+		length_m: {
+			kind: 'number',
+			label: 'Length',
+			quantity: 'length',
+			unit: 'm',
+			min: -1e6,
+			max: 1e6,
+			initial: 7
+		}
+	},
+	outputs: {
+		length: { label: 'Twice the length', quantity: 'length', unit: 'm' },
+		name: { label: 'Its name', quantity: 'text', unit: '', text: true }
+	},
+	equations: [],
+	assumptions: [],
+	warnings: [],
+	sources: [],
+	checks: [],
+	history: [],
+	compute: ({ length_m: length }) =>
+		length > 90
+			? refuse('too-long', 'Nothing is doubled past 90 metres.')
+			: {
+					ok: true,
+					values: { length: 2 * length, name: 'twin' },
+					uncertainties: { length: 'exact' }
+				}
+});
+const calculators: CalculatorSet = new Map([[doubler.id, doubler]]);
+
+const slider: Control = {
+	id: 'length',
+	kind: 'slider',
+	label: 'Length',
+	unit: 'm',
+	min: 5,
+	max: 15,
+	step: 0.1,
+	initial: 7
+};
+const output = { step: 'twice', output: 'length' };
+
+function documentOf(content: Inline[], claims: Claim[], control = slider): WidgetDocument {
+	return {
+		version: 1,
+		language: 'en',
+		constants: '2026.1',
+		title: 'Twice as long',
+		point: 'A length and its double.',
+		steps: [
+			{
+				id: 'twice',
+				calculator: 'test.doubler',
+				revision: '1.0.0',
+				settings: { length_m: { from: 'control', control: 'length' } }
+			}
+		],
+		controls: [control],
+		blocks: [{ id: 'text', kind: 'paragraph', content }],
+		claims
+	};
+}
+
+function judgeWords(
+	words: string,
+	reading: Extract<Claim, { form: 'stated' }>['reading'] = output
+) {
+	const document = documentOf(
+		[{ kind: 'claim', claim: 'it', text: words }],
+		[{ id: 'it', form: 'stated', reading }]
+	);
+	return judgeClaims(document, calculators).get('it');
+}
+
+function judgeLive(figures: number, hedge: 'none' | 'about', control = slider, unit = 'm') {
+	const document = documentOf(
+		[{ kind: 'live', claim: 'it' }],
+		[{ id: 'it', form: 'live', reading: output, unit, figures, hedge }],
+		control
+	);
+	return judgeClaims(document, calculators).get('it');
+}
+
+describe('stated claims', () => {
+	test('are weighed by their words, at the first settings', () => {
+		expect(judgeWords('about 14 metres')).toMatchObject({
+			verdict: 'level',
+			rule: 'N3',
+			departurePercent: 0
+		});
+		expect(judgeWords('more than 15 metres')).toMatchObject({ verdict: 'tips', rule: 'N7' });
+		expect(judgeWords('exactly 14 metres')).toMatchObject({ verdict: 'level', rule: 'N2' });
+		expect(judgeWords('0.014 kilometres')).toMatchObject({ verdict: 'level' });
+	});
+	test('a control and a setting read as exact', () => {
+		expect(judgeWords('exactly 7 metres', { control: 'length' })?.verdict).toBe('level');
+		expect(judgeWords('exactly 7 metres', { step: 'twice', setting: 'length_m' })?.verdict).toBe(
+			'level'
+		);
+	});
+	test('the number of the reading’s dimension is the one weighed', () => {
+		expect(judgeWords('in 3 seconds about 14 metres')?.verdict).toBe('level');
+		expect(judgeWords('about 14 seconds')?.verdict).toBe('tips');
+	});
+	test('what can’t be weighed says why', () => {
+		expect(judgeWords('a fair distance')).toMatchObject({
+			verdict: 'unweighed',
+			reason: 'No number in these words.'
+		});
+		expect(judgeWords('2–3 metres')?.reason).toMatch(/^A range isn’t weighed yet/);
+		expect(judgeWords('a few metres')?.verdict).toBe('unweighed');
+		expect(judgeWords('14', { step: 'twice', output: 'name' })?.reason).toBe(
+			'The reading is words, “twin”, and no number.'
+		);
+		expect(judgeWords('14 metres', { step: 'gone', output: 'length' })?.reason).toMatch(
+			/^No reading: /
+		);
+	});
+	test('two hedges are a block', () => {
+		expect(judgeWords('about up to 14 metres')).toMatchObject({
+			severity: 'block',
+			reason: 'Two hedges on one number: keep one.'
+		});
+	});
+	test('an exempt number is no claim', () => {
+		const document = documentOf(
+			[{ kind: 'claim', claim: 'it', text: '14 metres' }],
+			[{ id: 'it', form: 'exempt', reason: 'A turn of phrase' }]
+		);
+		expect(judgeClaims(document, calculators).get('it')).toMatchObject({
+			verdict: 'unweighed',
+			reason: 'Not a claim: A turn of phrase.'
+		});
+	});
+	test('a claim whose words are gone is told', () => {
+		const document = documentOf([], [{ id: 'it', form: 'stated', reading: output }]);
+		expect(judgeClaims(document, calculators).get('it')?.reason).toBe(
+			'Its words are no longer in the copy.'
+		);
+	});
+});
+
+describe('live claims', () => {
+	test('three figures fit from end to end', () => {
+		expect(judgeLive(3, 'none')).toMatchObject({
+			verdict: 'level',
+			reason:
+				'The number printed fits at all 11 settings tried, from 5\u00a0metres to 15\u00a0metres.'
+		});
+	});
+	test('the worst setting counts, and is named', () => {
+		// One figure of 2 × 13 = 26 prints “30”, 13 per cent off, while 2 × 5 = 10 is printed as it is.
+		const verdict = judgeLive(1, 'none', { ...slider, initial: 5 });
+		expect(verdict?.verdict).toBe('tips');
+		expect(verdict?.reason).toMatch(
+			/^At \d+(\.\d)?\u00a0metres: Right rounding, but more than 10 per cent away/
+		);
+	});
+	test('a setting without a reading is named with the refusal', () => {
+		const verdict = judgeLive(3, 'none', { ...slider, max: 100 });
+		expect(verdict).toMatchObject({ verdict: 'unweighed' });
+		expect(verdict?.reason).toBe(
+			'At 90.5\u00a0metres: No reading: Nothing is doubled past 90 metres.'
+		);
+	});
+	test('a unit the reading can’t have is told', () => {
+		expect(judgeLive(3, 'none', slider, 's')?.reason).toMatch(/choose another unit/);
+	});
+});
+
+describe('settingsOf', () => {
+	test('both ends, the first setting, and at least seven more, on the slider’s own steps', () => {
+		const settings = settingsOf(slider);
+		expect(settings.length).toBeGreaterThanOrEqual(10);
+		expect(settings[0]).toBe(5);
+		expect(settings.at(-1)).toBe(15);
+		expect(settings).toContain(7);
+		for (const value of settings)
+			expect(Math.abs((value - 5) / 0.1 - Math.round((value - 5) / 0.1))).toBeLessThan(1e-6);
+	});
+	test('a slider of few steps is tried at each', () => {
+		expect(settingsOf({ ...slider, min: 1, max: 4, step: 1, initial: 2 })).toEqual([1, 2, 3, 4]);
+	});
+});
+
+describe('undeclared', () => {
+	const content: Inline[] = [
+		{ kind: 'text', text: 'It is 7 metres long; ' },
+		{ kind: 'claim', claim: 'it', text: 'about 14 metres' },
+		{ kind: 'text', text: ' when doubled, in ' },
+		{ kind: 'setting', control: 'length' },
+		{ kind: 'text', text: ' steps and several ways, a few kilometres off.' }
+	];
+	test('finds what is neither tied nor named, where it stands', () => {
+		const found = undeclared(documentOf(content, [{ id: 'it', form: 'stated', reading: output }]));
+		expect(found.map(({ surface }) => surface)).toEqual(['Twice', '7 metres', 'a few kilometres']);
+		const text =
+			'It is 7 metres long; about 14 metres when doubled, in \ufffc steps and several ways, a few kilometres off.';
+		for (const { blockId, start, end, surface } of found.filter(
+			({ blockId }) => blockId === 'text'
+		)) {
+			expect(text.slice(start, end), blockId).toBe(surface);
+		}
+		expect(found[0]).toMatchObject({ blockId: 'title', start: 0 });
+	});
+});
