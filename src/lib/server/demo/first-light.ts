@@ -1,4 +1,4 @@
-import type { WidgetDocument } from '$lib/widget/document.ts';
+import type { WidgetDocument } from '../../widget/document.ts';
 
 /** One note, lowered by the growth of space. Age → redshift → where hydrogen's 21 cm line arrives. */
 export const firstLight: WidgetDocument = {

@@ -1,4 +1,4 @@
-import type { WidgetDocument } from '$lib/widget/document.ts';
+import type { WidgetDocument } from '../../widget/document.ts';
 
 /** The falling weight fixes how fast the stone arrives; the path it takes doesn't. */
 export const sameDrop: WidgetDocument = {

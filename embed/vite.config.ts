@@ -1,0 +1,57 @@
+/** Builds what a reader's frame loads, into build/press: one script, one chunk a calculator, one style, the fonts. */
+import { svelte } from '@sveltejs/vite-plugin-svelte';
+import { readdirSync } from 'node:fs';
+import { basename, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { defineConfig } from 'vite';
+import { compilerOptions, dynamicCompileOptions } from '../svelte.config.js';
+import { definesCalculator, pressManifest } from './press-manifest.ts';
+import { leaveOut } from './leave-out.ts';
+import { signs } from './signs.ts';
+
+const ROOT = fileURLToPath(new URL('..', import.meta.url));
+const FRAME = join(ROOT, 'embed/frame.ts');
+const CALCULATORS = join(ROOT, 'src/lib/physics/calculators');
+
+const calculators = readdirSync(CALCULATORS, { recursive: true, encoding: 'utf8' })
+	.filter((file) => file.endsWith('.ts') && !file.endsWith('.test.ts'))
+	.map((file) => join(CALCULATORS, file))
+	.filter(definesCalculator);
+
+export default defineConfig({
+	root: ROOT,
+	base: '/press/',
+	publicDir: false,
+	plugins: [
+		signs(),
+		leaveOut(),
+		svelte({ configFile: false, compilerOptions, dynamicCompileOptions }),
+		pressManifest(FRAME)
+	],
+	build: {
+		outDir: join(ROOT, 'build/press'),
+		emptyOutDir: true,
+		assetsDir: '',
+		assetsInlineLimit: 0,
+		cssCodeSplit: false,
+		// The document lists what to load ahead; the script needs no list of its own.
+		modulePreload: false,
+		reportCompressedSize: false,
+		rolldownOptions: {
+			input: Object.fromEntries([
+				['frame', FRAME],
+				...calculators.map((file) => [basename(file, '.ts'), file])
+			]),
+			preserveEntrySignatures: 'strict',
+			treeshake: {
+				// The pure folders do nothing when they are loaded, so a schema nobody asks for stays out of the frame.
+				moduleSideEffects: [{ test: /src\/lib\/(physics|widget)\//, sideEffects: false }]
+			},
+			output: {
+				entryFileNames: '[name]-[hash].js',
+				chunkFileNames: '[name]-[hash].js',
+				assetFileNames: '[name]-[hash][extname]'
+			}
+		}
+	}
+});

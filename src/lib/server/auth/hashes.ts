@@ -1,0 +1,11 @@
+import { createHash, createHmac } from 'node:crypto';
+
+/** In hex; text is hashed as UTF-8. */
+export function sha256(content: string | Uint8Array): string {
+	return createHash('sha256').update(content).digest('hex');
+}
+
+/** A secret that can be worked out again from its row's id and the house's secret, so it is never stored. */
+export function derivedToken(secret: string, purpose: string, id: string): string {
+	return createHmac('sha256', secret).update(`${purpose}:${id}`).digest('base64url');
+}

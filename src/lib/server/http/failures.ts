@@ -1,0 +1,41 @@
+/** From a SteelyardError to an answer. Anything else is a bug and goes on to `handleError`. */
+import { error, fail, type ActionFailure } from '@sveltejs/kit';
+import { explanations, SteelyardError } from '../../errors.ts';
+import type { ErrorCode } from '../../errors.ts';
+
+export interface Failure {
+	code: ErrorCode;
+	message: string;
+	help: string;
+	details: Record<string, unknown>;
+}
+
+export function failureOf({ code, details }: SteelyardError): Failure {
+	const { message, help } = explanations[code];
+	return { code, message, help, details };
+}
+
+/** For loads: `await getPiece(…).catch(pageFailure)`. */
+export function pageFailure(thrown: unknown): never {
+	if (!(thrown instanceof SteelyardError)) throw thrown;
+	const { status, message, help } = explanations[thrown.code];
+	error(status, { message, help, code: thrown.code });
+}
+
+/** For form actions: keeps what was typed in `form`, with the sentence and its mend beside it. */
+export function formFailure<Form extends Record<string, unknown>>(
+	form: Form,
+	thrown: unknown
+): ActionFailure<{ form: Form; failure: Failure }> {
+	if (!(thrown instanceof SteelyardError)) throw thrown;
+	return fail(explanations[thrown.code].status, { form, failure: failureOf(thrown) });
+}
+
+/** For JSON endpoints. */
+export function apiFailure(thrown: unknown): Response {
+	if (!(thrown instanceof SteelyardError)) throw thrown;
+	const headers = new Headers();
+	const { retryAfterSeconds } = thrown.details;
+	if (typeof retryAfterSeconds === 'number') headers.set('Retry-After', String(retryAfterSeconds));
+	return Response.json({ error: failureOf(thrown) }, { status: explanations[thrown.code].status, headers });
+}

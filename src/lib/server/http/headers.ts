@@ -1,0 +1,74 @@
+/**
+ * Security headers of everything SvelteKit answers. Pages get their policy, with its nonce, from svelte.config.js; what
+ * is not a page may load nothing at all. Frames for partner pages never come through here: embed/serve.ts.
+ */
+const NOT_A_PAGE = "default-src 'none'; frame-ancestors 'none'; base-uri 'none'; form-action 'none'";
+
+const OFF = [
+	'accelerometer',
+	'attribution-reporting',
+	'bluetooth',
+	'browsing-topics',
+	'camera',
+	'display-capture',
+	'geolocation',
+	'gyroscope',
+	'hid',
+	'idle-detection',
+	'magnetometer',
+	'microphone',
+	'midi',
+	'payment',
+	'screen-wake-lock',
+	'serial',
+	'usb'
+];
+const PERMISSIONS_POLICY = [...OFF.map((feature) => `${feature}=()`), 'fullscreen=(self)'].join(', ');
+
+export interface Answer {
+	secure: boolean;
+	/** The answer depends on who asked. */
+	personal: boolean;
+	requestId: string;
+}
+
+/** The response with all headers in place; copies it when its headers can't be changed, as with redirects. */
+export function withSecurityHeaders(response: Response, answer: Answer): Response {
+	const type = response.headers.get('content-type') ?? '';
+	const page = type.startsWith('text/html');
+	const set: [string, string][] = [
+		['X-Content-Type-Options', 'nosniff'],
+		['X-Frame-Options', 'DENY'],
+		['Permissions-Policy', PERMISSIONS_POLICY],
+		['Cross-Origin-Resource-Policy', 'same-origin'],
+		['X-Request-Id', answer.requestId]
+	];
+	if (!response.headers.has('referrer-policy')) {
+		set.push(['Referrer-Policy', page ? 'strict-origin-when-cross-origin' : 'no-referrer']);
+	}
+	if (page) set.push(['Cross-Origin-Opener-Policy', 'same-origin']);
+	if (!response.headers.has('content-security-policy')) set.push(['Content-Security-Policy', NOT_A_PAGE]);
+	if (answer.secure) set.push(['Strict-Transport-Security', 'max-age=63072000; includeSubDomains']);
+	if (answer.personal) set.push(['Cache-Control', 'no-store']);
+	if (/^(text\/|application\/json)/.test(type) && !/charset=/i.test(type)) {
+		set.push(['Content-Type', `${type}; charset=utf-8`]);
+	}
+
+	const writable = isWritable(response) ? response : new Response(response.body, response);
+	for (const [name, value] of set) {
+		// The public API opens itself to other origins; everything else stays closed.
+		if (name === 'Cross-Origin-Resource-Policy' && writable.headers.has('access-control-allow-origin')) continue;
+		writable.headers.set(name, value);
+	}
+	return writable;
+}
+
+function isWritable(response: Response): boolean {
+	try {
+		response.headers.delete('x-steelyard-probe');
+		return true;
+	} catch (error) {
+		if (error instanceof TypeError) return false;
+		throw error;
+	}
+}

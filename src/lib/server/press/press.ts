@@ -1,0 +1,135 @@
+/** Prints a release: the frame drawn with the reader's own components, and every file it will ever ask for. */
+import { createHash } from 'node:crypto';
+import { readFile } from 'node:fs/promises';
+import { join } from 'node:path';
+import { render } from 'svelte/server';
+import type { Calculator } from '../../physics/calculator.ts';
+import { catalogue } from '../../physics/calculators/index.ts';
+import type { ClaimRecords } from '../../renderer/records.ts';
+import Frame from '../../renderer/Frame.svelte';
+import type { FrameRelease } from '../../renderer/release.ts';
+import { canonicalJson, type Frozen } from '../../widget/freeze.ts';
+import type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
+import { readManifest, type PressManifest } from './manifest.ts';
+import { framePage } from './page.ts';
+
+export type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
+
+/** People by name, as the public page shows them. */
+export interface Makers {
+	writers: string[];
+	checkers: string[];
+	editor: string;
+}
+
+export interface BundleInput {
+	frozen: Frozen;
+	slug: string;
+	releaseNumber: number;
+	releasedAt: Date;
+	/** The house's name. */
+	house: string;
+	makers: Makers;
+	records: ClaimRecords;
+	/** Where the piece's public page is, when it isn't the frame's own host. */
+	origin?: string;
+	/** The folder of the frame's build; `build/press` in a checkout. */
+	pressFolder: string;
+}
+
+/**
+ * Throws when the frame hasn't been built, or when a calculator of the piece isn't in that build. The same input and
+ * build give the same bytes.
+ */
+export async function makeBundle(input: BundleInput): Promise<Bundle> {
+	const { frozen, slug, pressFolder } = input;
+	const press = await readManifest(pressFolder);
+	const used = frozen.calculators.map(({ id }) => calculatorOf(id));
+	const scripts = used.map((calculator) => scriptOf(press, calculator));
+	const css = await readFile(join(pressFolder, press.style), 'utf8');
+
+	const release: FrameRelease = {
+		slug,
+		number: input.releaseNumber,
+		releasedAt: input.releasedAt.toISOString(),
+		house: input.house,
+		origin: input.origin ?? '',
+		document: frozen.document,
+		digest: frozen.digest,
+		records: input.records
+	};
+	const calculators = new Map(used.map((calculator) => [calculator.id, calculator]));
+	const address = (name: string) => `/press/${name}`;
+	const html = framePage({
+		release,
+		body: render(Frame, { props: { release, calculators } }).body,
+		css,
+		script: address(press.frame.file),
+		ahead: namesOf([{ file: '', imports: press.frame.imports }, ...scripts]).map(address),
+		copyFace: address(press.copyFace),
+		calculators: Object.fromEntries(used.map(({ id }, index) => [id, address(scripts[index]?.file ?? '')]))
+	});
+
+	const page = contentFile('frames', 'html', 'text/html; charset=utf-8', html);
+	const record = contentFile(
+		'releases',
+		'json',
+		'application/json; charset=utf-8',
+		canonicalJson({ version: 1, release, frozen, makers: input.makers })
+	);
+	const assets = namesOf([press.frame, ...scripts, { file: '', imports: [...press.later, ...press.fonts] }]);
+	const files = [page, record, ...(await Promise.all(assets.map((name) => pressFile(pressFolder, name))))];
+	return { digest: page.sha256, files, manifest: manifestOf(release, page, css, files) };
+}
+
+function manifestOf(release: FrameRelease, page: BundleFile, css: string, files: BundleFile[]): BundleManifest {
+	return {
+		version: 1,
+		slug: release.slug,
+		release: release.number,
+		releasedAt: release.releasedAt,
+		digest: page.sha256,
+		page: page.key,
+		styles: [`sha256-${createHash('sha256').update(css).digest('base64')}`],
+		files: files.map(({ key, contentType, sha256 }) => ({ key, contentType, sha256 }))
+	};
+}
+
+function calculatorOf(id: string): Calculator {
+	const calculator = catalogue.get(id);
+	if (!calculator) throw new Error(`The catalogue has no calculator ${id}.`);
+	return calculator;
+}
+
+function scriptOf(press: PressManifest, { id }: Calculator): PressManifest['frame'] {
+	const script = press.calculators[id];
+	if (!script) throw new Error(`The frame’s build has no calculator ${id}. Build again: npm run build`);
+	return script;
+}
+
+/** File names, each once, in order of first mention. */
+function namesOf(scripts: PressManifest['frame'][]): string[] {
+	return [...new Set(scripts.flatMap(({ file, imports }) => [file, ...imports]))].filter(Boolean);
+}
+
+const TYPES: Record<string, string> = {
+	js: 'text/javascript; charset=utf-8',
+	woff2: 'font/woff2'
+};
+
+async function pressFile(pressFolder: string, name: string): Promise<BundleFile> {
+	const contentType = TYPES[name.split('.').at(-1) ?? ''];
+	if (!contentType) throw new Error(`The frame’s build has a file of an unknown kind: ${name}`);
+	const bytes = await readFile(join(pressFolder, name));
+	return { key: `press/${name}`, contentType, bytes, sha256: sha256Hex(bytes) };
+}
+
+function contentFile(folder: string, ending: string, contentType: string, text: string): BundleFile {
+	const bytes = Buffer.from(text, 'utf8');
+	const sha256 = sha256Hex(bytes);
+	return { key: `${folder}/${sha256}.${ending}`, contentType, bytes, sha256 };
+}
+
+function sha256Hex(bytes: Uint8Array): string {
+	return createHash('sha256').update(bytes).digest('hex');
+}

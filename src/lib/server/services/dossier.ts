@@ -1,0 +1,96 @@
+/** All rows about a piece, read together; the views are worked out from them. */
+import { desc, eq, inArray } from 'drizzle-orm';
+import type { Db } from '../db/client.ts';
+import { pieces, pieceWriters, proofs, queries, releases, signatures } from '../db/schema/index.ts';
+
+export type PieceRow = typeof pieces.$inferSelect;
+export type ProofRow = typeof proofs.$inferSelect;
+export type SignatureRow = typeof signatures.$inferSelect & { proofNumber: number };
+export type QueryRow = typeof queries.$inferSelect & { proofNumber: number };
+export type ReleaseRow = Omit<typeof releases.$inferSelect, 'document' | 'manifest'> & { proofNumber: number };
+
+export interface Dossier {
+	piece: PieceRow;
+	/** Ids of everyone who changed the draft since the last release. */
+	writers: string[];
+	/** The newest. */
+	proof: ProofRow | null;
+	signatures: SignatureRow[];
+	queries: QueryRow[];
+	/** Newest first. */
+	releases: ReleaseRow[];
+}
+
+/** The dossier of one piece, null when there is none; reads by `slug` or by a row already locked. */
+export async function readDossier(db: Db, which: { slug: string } | { piece: PieceRow }): Promise<Dossier | null> {
+	const rows =
+		'piece' in which ? [which.piece] : await db.select().from(pieces).where(eq(pieces.slug, which.slug));
+	return (await gather(db, rows))[0] ?? null;
+}
+
+/** Every piece, the one saved last first. */
+export async function readDossiers(db: Db): Promise<Dossier[]> {
+	return gather(db, await db.select().from(pieces).orderBy(desc(pieces.savedAt), desc(pieces.id)));
+}
+
+async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
+	if (rows.length === 0) return [];
+	const ids = rows.map(({ id }) => id);
+	const writers = await db.select().from(pieceWriters).where(inArray(pieceWriters.pieceId, ids));
+	const newest = await db
+		.selectDistinctOn([proofs.pieceId])
+		.from(proofs)
+		.where(inArray(proofs.pieceId, ids))
+		.orderBy(proofs.pieceId, desc(proofs.number));
+	const signed = await db
+		.select({ row: signatures, proofNumber: proofs.number })
+		.from(signatures)
+		.innerJoin(proofs, eq(proofs.id, signatures.proofId))
+		.where(inArray(signatures.pieceId, ids))
+		.orderBy(signatures.signedAt, signatures.id);
+	const asked = await db
+		.select({ row: queries, proofNumber: proofs.number })
+		.from(queries)
+		.innerJoin(proofs, eq(proofs.id, queries.proofId))
+		.where(inArray(queries.pieceId, ids))
+		.orderBy(queries.askedAt, queries.id);
+	const released = await db
+		.select({
+			id: releases.id,
+			pieceId: releases.pieceId,
+			number: releases.number,
+			digest: releases.digest,
+			proofId: releases.proofId,
+			releasedBy: releases.releasedBy,
+			releasedAt: releases.releasedAt,
+			proofNumber: proofs.number
+		})
+		.from(releases)
+		.innerJoin(proofs, eq(proofs.id, releases.proofId))
+		.where(inArray(releases.pieceId, ids))
+		.orderBy(desc(releases.number));
+
+	return rows.map((piece) => {
+		const ofPiece = <T extends { pieceId: string }>(all: T[]) => all.filter(({ pieceId }) => pieceId === piece.id);
+		return {
+			piece,
+			writers: ofPiece(writers).map(({ personId }) => personId),
+			proof: ofPiece(newest)[0] ?? null,
+			signatures: ofPiece(signed.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
+			queries: ofPiece(asked.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
+			releases: ofPiece(released)
+		};
+	});
+}
+
+/** Everyone named in the dossiers, for the name book. */
+export function* namedIn(dossiers: readonly Dossier[]): Generator<string | null> {
+	for (const { piece, writers, proof, signatures, queries, releases } of dossiers) {
+		yield piece.savedBy;
+		yield* writers;
+		if (proof) yield* [proof.pulledBy, proof.passedBy, ...proof.writers];
+		for (const { personId } of signatures) yield personId;
+		for (const { askedBy, answeredBy } of queries) yield* [askedBy, answeredBy];
+		for (const { releasedBy } of releases) yield releasedBy;
+	}
+}

@@ -1,0 +1,118 @@
+/** What must hold before a proof goes to press. Each condition is a row here: a sentence, and the way to clear it. */
+import { routes } from '../../routes.ts';
+import { can, type Actor } from '../../workflow/permissions.ts';
+import type { Condition, PersonName } from '../../workflow/piece.ts';
+import type { Dossier, ProofRow } from './dossier.ts';
+import { examine } from './examination.ts';
+import { isOpen, standingOf, type Standing, type StandingClaim } from './standing.ts';
+
+interface Facts {
+	slug: string;
+	proof: ProofRow;
+	standing: Standing;
+	actor: Actor;
+	names: (personId: string) => PersonName;
+}
+
+type Rule = (facts: Facts) => Condition;
+
+const RULES: Rule[] = [
+	({ standing, slug }) => {
+		const open = standing.claims.filter(({ state }) => state === 'unsigned' || state === 'lapsed');
+		const signed = standing.claims.filter(({ state }) => state === 'signed').length;
+		return {
+			side: 'claims',
+			met: open.length === 0,
+			says: open.length === 0 ? `${claimsAre(signed)} signed.` : `${claimsAre(open.length)} not signed: ${labels(open)}.`,
+			mend: open.length === 0 ? '' : 'A scientist who didn’t write this signs or queries each one.',
+			href: routes.check(slug)
+		};
+	},
+	({ standing, slug }) => {
+		const tipping = standing.claims.filter(
+			({ examined: { claim, verdict } }) => claim.form !== 'exempt' && verdict.severity === 'block'
+		);
+		return {
+			side: 'claims',
+			met: tipping.length === 0,
+			says: tipping.length === 0 ? 'No claim tips.' : `These tip: ${labels(tipping)}.`,
+			mend: tipping.length === 0 ? '' : 'The writer changes the words or the reading, and pulls a new proof.',
+			href: routes.manuscript(slug)
+		};
+	},
+	({ standing, slug }) => {
+		const queried = standing.claims.filter(({ queries }) => queries.some(isOpen));
+		return {
+			side: 'claims',
+			met: queried.length === 0,
+			says: queried.length === 0 ? 'No query is open.' : `A query is open on ${labels(queried)}.`,
+			mend: queried.length === 0 ? '' : 'The writer answers it; who asked closes it.',
+			href: routes.check(slug)
+		};
+	},
+	({ standing, names }) => {
+		const { writers, checkers } = standing.people;
+		const both = checkers.filter((id) => writers.includes(id));
+		const met = checkers.length > 0 && both.length === 0;
+		const named = (ids: readonly string[]) => ids.map((id) => names(id).name).join(', ');
+		return {
+			side: 'people',
+			met,
+			says: met ? `Written by ${named(writers)}; checked by ${named(checkers)}.` : 'Nobody besides the writers has checked this proof.',
+			mend: met ? '' : 'A scientist who didn’t write this signs the claims.'
+		};
+	},
+	({ standing, actor }) => {
+		const met = can(actor, 'pass-proof', { proof: standing.people });
+		return {
+			side: 'people',
+			met,
+			says: met ? 'You have neither written nor checked it.' : passer(actor),
+			mend: met ? '' : 'An editor who has neither written nor checked this proof passes it.'
+		};
+	},
+	({ proof, slug }) => {
+		const { findings } = examine(proof.document);
+		return {
+			side: 'galley',
+			met: findings.length === 0,
+			says: findings.length === 0 ? 'Title, point, copy, sliders and charts are complete.' : findings.map(({ says }) => says).join(' '),
+			mend: findings.length === 0 ? '' : 'The writer sees to it and pulls a new proof.',
+			href: routes.manuscript(slug)
+		};
+	},
+	() => ({ side: 'time', met: true, says: 'Nothing holds it back: it can go out at once.', mend: '' })
+];
+
+/** A piece without a proof has one condition: that there be one. */
+export function conditionsOf(dossier: Dossier, actor: Actor, names: Facts['names']): Condition[] {
+	const { proof } = dossier;
+	const { slug } = dossier.piece;
+	if (!proof) {
+		return [
+			{
+				side: 'galley',
+				met: false,
+				says: 'No proof has been pulled yet.',
+				mend: 'The writer pulls one from the manuscript.',
+				href: routes.manuscript(slug)
+			}
+		];
+	}
+	const facts: Facts = { slug, proof, standing: standingOf(dossier, proof), actor, names };
+	return RULES.map((rule) => rule(facts));
+}
+
+function passer(actor: Actor): string {
+	return actor.roles.includes('editor')
+		? 'You have written or checked this proof yourself.'
+		: 'An editor passes it; that isn’t your role.';
+}
+
+function claimsAre(number: number): string {
+	return number === 1 ? '1 claim is' : `${number} claims are`;
+}
+
+function labels(claims: readonly StandingClaim[]): string {
+	return claims.map(({ examined }) => examined.label).join(', ');
+}

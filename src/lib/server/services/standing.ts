@@ -1,0 +1,58 @@
+/** How the claims of the newest proof stand. Derived from signatures and queries each time; nothing stores it. */
+import type { ClaimState } from '../../workflow/piece.ts';
+import type { ProofPeople } from '../../workflow/permissions.ts';
+import type { Dossier, ProofRow, QueryRow, SignatureRow } from './dossier.ts';
+import { examine, type ExaminedClaim } from './examination.ts';
+
+export interface StandingClaim {
+	examined: ExaminedClaim;
+	state: ClaimState;
+	signatures: (SignatureRow & { inForce: boolean })[];
+	queries: QueryRow[];
+}
+
+export interface Standing {
+	claims: StandingClaim[];
+	people: ProofPeople;
+}
+
+/**
+ * A signature is in force while what it covers is, to the last character, what the proof holds; it was not taken back;
+ * and its signer hasn't become one of the proof's writers.
+ */
+export function standingOf(dossier: Dossier, proof: ProofRow): Standing {
+	const claims = examine(proof.document).claims.map((examined) => {
+		const id = examined.claim.id;
+		const signatures = dossier.signatures
+			.filter(({ claim, takenBackAt }) => claim === id && takenBackAt === null)
+			.map((signature) => ({
+				...signature,
+				inForce: signature.coverHash === examined.coverHash && !proof.writers.includes(signature.personId)
+			}));
+		const queries = dossier.queries.filter(({ claim }) => claim === id);
+		return { examined, signatures, queries, state: claimState(examined, signatures, queries) };
+	});
+	const checkers = claims.flatMap(({ signatures }) =>
+		signatures.filter(({ inForce }) => inForce).map(({ personId }) => personId)
+	);
+	return { claims, people: { writers: proof.writers, checkers: [...new Set(checkers)] } };
+}
+
+function claimState(
+	{ claim }: ExaminedClaim,
+	signatures: readonly { inForce: boolean }[],
+	queries: readonly QueryRow[]
+): ClaimState {
+	if (queries.some(isOpen)) return 'queried';
+	if (claim.form === 'exempt') return 'exempt';
+	if (signatures.some(({ inForce }) => inForce)) return 'signed';
+	return signatures.length > 0 ? 'lapsed' : 'unsigned';
+}
+
+export function isOpen(query: Pick<QueryRow, 'closedAt'>): boolean {
+	return query.closedAt === null;
+}
+
+export function isReleased(dossier: Dossier, proof: ProofRow): boolean {
+	return dossier.releases.some(({ proofId }) => proofId === proof.id);
+}

@@ -1,0 +1,124 @@
+/**
+ * The shelf's copy on disk: bytes under their own hash, and one list a release. Every file is written beside its place,
+ * brought to the disk, and renamed into it, so that a crash leaves either the old file, the new one, or none.
+ */
+import { createHash, randomUUID } from 'node:crypto';
+import { mkdir, open, readdir, readFile, rename, rm } from 'node:fs/promises';
+import { dirname, join } from 'node:path';
+import type { BundleManifest } from '../press/bundle.ts';
+import { ENCODINGS, pack, unpacksTo, type Encoding, type Packed } from './encodings.ts';
+
+export interface StoredFile {
+	bytes: Buffer;
+	packed: Packed;
+}
+
+const ENDINGS: Record<Encoding, string> = { br: '.br', gzip: '.gz' };
+
+export class ShelfMirror {
+	constructor(readonly folder: string) {}
+
+	/** Keeps the bytes with their packed forms; a file that is there already is left as it is. */
+	async keepFile(sha256: string, bytes: Uint8Array, contentType: string): Promise<StoredFile> {
+		const kept = await this.readFile(sha256, contentType);
+		if (kept) return kept;
+		const packed = await pack(bytes, contentType);
+		await Promise.all(
+			ENCODINGS.map(async (encoding) => {
+				const form = packed[encoding];
+				if (form) await write(this.#file(sha256) + ENDINGS[encoding], form);
+			})
+		);
+		await write(this.#file(sha256), bytes);
+		return { bytes: Buffer.from(bytes), packed };
+	}
+
+	/** Null when the file isn't there, or isn't what its name says. Packed forms that don't fit are made again. */
+	async readFile(sha256: string, contentType: string): Promise<StoredFile | null> {
+		const bytes = await readIfThere(this.#file(sha256));
+		if (!bytes || createHash('sha256').update(bytes).digest('hex') !== sha256) return null;
+		const [br, gzip] = await Promise.all(
+			ENCODINGS.map(async (encoding) => {
+				const form = await readIfThere(this.#file(sha256) + ENDINGS[encoding]);
+				return form && (await unpacksTo(form, encoding, bytes)) ? form : null;
+			})
+		);
+		if (br && gzip) return { bytes, packed: { br, gzip } };
+		return { bytes, packed: await pack(bytes, contentType) };
+	}
+
+	async keepList(manifest: BundleManifest): Promise<void> {
+		await write(this.#list(manifest.slug, manifest.release), Buffer.from(JSON.stringify(manifest)));
+	}
+
+	/** Every release's list that can be read, and the places of those that can't. */
+	async lists(): Promise<{ manifests: BundleManifest[]; damaged: string[] }> {
+		const manifests: BundleManifest[] = [];
+		const damaged: string[] = [];
+		const folder = join(this.folder, 'lists');
+		for (const name of await namesIn(folder)) {
+			if (!name.endsWith('.json')) continue;
+			try {
+				manifests.push(JSON.parse(await readFile(join(folder, name), 'utf8')));
+			} catch (error) {
+				if (!(error instanceof SyntaxError)) throw error;
+				damaged.push(name.replace(/\.json$/, ''));
+			}
+		}
+		return { manifests, damaged };
+	}
+
+	#file(sha256: string): string {
+		return join(this.folder, 'files', sha256.slice(0, 2), sha256);
+	}
+
+	#list(slug: string, release: number): string {
+		return join(this.folder, 'lists', `${slug}.${release}.json`);
+	}
+}
+
+async function readIfThere(file: string): Promise<Buffer | null> {
+	try {
+		return await readFile(file);
+	} catch (error) {
+		if (isMissing(error)) return null;
+		throw error;
+	}
+}
+
+async function namesIn(folder: string): Promise<string[]> {
+	try {
+		return (await readdir(folder)).sort();
+	} catch (error) {
+		if (isMissing(error)) return [];
+		throw error;
+	}
+}
+
+async function write(file: string, bytes: Uint8Array): Promise<void> {
+	await mkdir(dirname(file), { recursive: true });
+	const draft = `${file}.${randomUUID()}.tmp`;
+	try {
+		const handle = await open(draft, 'wx');
+		try {
+			await handle.writeFile(bytes);
+			await handle.sync();
+		} finally {
+			await handle.close();
+		}
+		await rename(draft, file);
+	} catch (error) {
+		await rm(draft, { force: true });
+		throw error;
+	}
+	const folder = await open(dirname(file), 'r');
+	try {
+		await folder.sync(); // the new name, too
+	} finally {
+		await folder.close();
+	}
+}
+
+function isMissing(error: unknown): boolean {
+	return error instanceof Error && 'code' in error && error.code === 'ENOENT';
+}
