@@ -73,7 +73,8 @@ const guard: Handle = ({ event, resolve }) => {
 		case 'page': {
 			const signIn = `${routes.signIn()}?next=${encodeURIComponent(event.url.pathname + event.url.search)}`;
 			// The client router has its own form of redirect, which SvelteKit makes from a thrown one.
-			if (event.isDataRequest || event.request.headers.has('x-sveltekit-action')) redirect(303, signIn);
+			if (event.isDataRequest || event.request.headers.has('x-sveltekit-action'))
+				redirect(303, signIn);
 			return new Response(null, { status: 303, headers: { location: signIn } });
 		}
 		case 'open':

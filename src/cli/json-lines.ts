@@ -11,11 +11,17 @@ export function lineError(code: string, message: string): LineError {
 	return { error: { code, message } };
 }
 
+/** How a command words what is wrong with a line. */
+type Trouble = (code: string, message: string) => object;
+
 /**
  * Answers standard input line by line until it ends; empty lines are passed over. A fault of ours is told on standard
- * error and by the exit code, and the line is answered with an error.
+ * error and by the exit code, and the line is answered with the trouble.
  */
-export async function answerLines(answerTo: (line: string) => object): Promise<void> {
+export async function answerLines(
+	answerTo: (line: string) => object,
+	trouble: Trouble = lineError
+): Promise<void> {
 	process.stdout.on('error', (error: NodeJS.ErrnoException) => {
 		// Whoever read us has read enough.
 		if (error.code === 'EPIPE') process.exit(0);
@@ -24,23 +30,25 @@ export async function answerLines(answerTo: (line: string) => object): Promise<v
 	process.stdin.setEncoding('utf8');
 	for await (const line of linesOf(process.stdin)) {
 		if (line !== null && line.trim() === '') continue;
-		const answer = line === null ? TOO_LONG : guarded(answerTo, line);
+		const answer = line === null ? tooLong(trouble) : guarded(answerTo, line, trouble);
 		if (!process.stdout.write(`${JSON.stringify(answer)}\n`)) await once(process.stdout, 'drain');
 	}
 }
 
-const TOO_LONG = lineError(
-	'line-too-long',
-	'This line is longer than a megabyte. Send each request on a line of its own.'
-);
+function tooLong(trouble: Trouble): object {
+	return trouble(
+		'line-too-long',
+		'This line is longer than a megabyte. Send each request on a line of its own.'
+	);
+}
 
-function guarded(answerTo: (line: string) => object, line: string): object {
+function guarded(answerTo: (line: string) => object, line: string, trouble: Trouble): object {
 	try {
 		return answerTo(line);
 	} catch (fault) {
 		process.exitCode = 1;
 		process.stderr.write(`${fault instanceof Error ? fault.stack : String(fault)}\n`);
-		return lineError(
+		return trouble(
 			'fault',
 			'This line could not be answered. The fault is ours; it is told on standard error.'
 		);

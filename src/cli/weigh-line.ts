@@ -10,7 +10,7 @@ import { lineError, type LineError } from './json-lines.ts';
 
 export type WeighAnswer = Verdict | LineError;
 
-/** JSON has no NaN and no infinities; a line may still name them, as text or bare as some writers of JSON do. */
+/** JSON has no NaN and no infinities; a line may still name them in quotes. */
 const Value = z
 	.union([
 		z.number(),
@@ -77,10 +77,8 @@ export function detectLine(line: string): object {
 type Request = { ok: true; sent: Record<string, unknown> } | { ok: false; answer: LineError };
 
 function parseLine(line: string): Request {
-	let sent: unknown;
-	try {
-		sent = JSON.parse(line.replace(/(:\s*)(NaN|-?Infinity)(?=\s*[,}])/g, '$1null'), finiteOrNull);
-	} catch {
+	const sent = parseJson(line) ?? parseJson(withoutBareNaN(line));
+	if (sent === undefined) {
 		return {
 			ok: false,
 			answer: lineError('not-json', 'This line is not JSON. Send one whole object on each line.')
@@ -96,6 +94,20 @@ function parseLine(line: string): Request {
 		};
 	}
 	return { ok: true, sent: sent as Record<string, unknown> };
+}
+
+/** Undefined for what isn't JSON. */
+function parseJson(line: string): unknown {
+	try {
+		return JSON.parse(line, finiteOrNull) as unknown;
+	} catch {
+		return undefined;
+	}
+}
+
+/** Some writers of JSON put a bare NaN or Infinity, which says that there is no number. */
+function withoutBareNaN(line: string): string {
+	return line.replace(/(:\s*)(?:NaN|-?Infinity)(?=\s*[,}])/g, '$1null');
 }
 
 /** “1e999” is JSON, and no number. */

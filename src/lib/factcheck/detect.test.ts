@@ -257,7 +257,7 @@ describe('any text', () => {
 		);
 	});
 
-	test('takes time that grows with the length and no faster', () => {
+	test('takes time that grows with the length and no faster', { timeout: 60_000 }, () => {
 		const paragraph = CORPUS.replace(/[⟦⟧]/g, '').replace(/\n/g, ' ').slice(0, 1000);
 		const timeOf = (text: string, runs: number) =>
 			Math.min(
@@ -267,7 +267,7 @@ describe('any text', () => {
 					return performance.now() - start;
 				})
 			);
-		// On a quiet machine 0.2 ms and 4 ms; a square would take the long ones past half a minute.
+		// On a quiet machine 0.2 ms, 4 ms and under 0.1 s; time that grows as a square takes seconds.
 		expect(timeOf(paragraph, 20)).toBeLessThan(5);
 		expect(timeOf(paragraph.repeat(20), 5)).toBeLessThan(150);
 		const parts = [
@@ -289,9 +289,8 @@ describe('any text', () => {
 			'1 000 '
 		];
 		for (const part of parts) {
-			const long = part.repeat(Math.ceil(60_000 / part.length));
-			expect(timeOf(long, 1), `“${part}” over and over`).toBeLessThan(5000);
-			expect(timeOf(`1${long}b`, 1), `“${part}” over and over`).toBeLessThan(5000);
+			const long = part.repeat(Math.ceil(30_000 / part.length));
+			expect(timeOf(`1${long}b`, 1), `“${part}” over and over`).toBeLessThan(1500);
 		}
 	});
 });

@@ -2,11 +2,13 @@
  * Finds the quantities in prose as it is typed: number, scale, unit and hedge, as one stretch of text. Dates, years,
  * ordinals and names with digits are left alone. Time grows with the length of the text and no faster.
  */
-import type { HedgeFamily, Stated } from '../widget/stated.ts';
+import type { Stated } from '../widget/stated.ts';
 import { unitOf } from '../physics/units/units.ts';
+import { readHedge, type Hedge } from './hedge-before.ts';
 import { lexiconOf, plainPhrase, type Language } from './hedges.ts';
 import { isName, isYear, skippedSpans } from './not-quantities.ts';
 import { readAt, readNumber, type NumberRead } from './numbers.ts';
+import { endsCleanly, stands, valueOf, withUnit, type Part } from './parts.ts';
 import { compile, type Patterns } from './patterns.ts';
 
 export type QuantityForm =
@@ -75,15 +77,6 @@ function nextTrigger({ trigger }: Patterns, text: string, from: number): number 
 	return trigger.exec(text)?.index ?? null;
 }
 
-interface Part {
-	number: NumberRead;
-	negative: boolean;
-	unit: string;
-	unitWord: string;
-	start: number;
-	end: number;
-}
-
 interface Attempt {
 	quantity: DetectedQuantity | null;
 	/** Where to go on. */
@@ -114,89 +107,6 @@ function afterToken(text: string, number: NumberRead): number {
 
 function wordLength(text: string, at: number): number {
 	return /^[\p{L}\p{N}]+/u.exec(text.slice(at, at + 40))?.[0].length ?? 1;
-}
-
-function withUnit(patterns: Patterns, text: string, number: NumberRead, floor: number): Part {
-	const of = number.form === 'order-word' ? readAt(patterns.of, text, number.end) : null;
-	const unit = readUnit(patterns, text, number.end + (of?.[0].length ?? 0));
-	const before = text.slice(Math.max(floor, number.start - 12), number.start);
-	const minus = patterns.minusBefore.exec(before);
-	const sign = minus ? minus[0].replace(/^[\s(~≈<>≥≤“"–](?=[-−])/u, '') : '';
-	return {
-		number,
-		negative: Boolean(minus),
-		unit: unit?.symbol ?? '',
-		unitWord: unit?.word ?? '',
-		start: number.start - sign.length,
-		end: unit?.end ?? number.end
-	};
-}
-
-/** A unit right after the number, by name or by symbol, whichever is longer. */
-function readUnit(patterns: Patterns, text: string, at: number) {
-	const named = readAt(patterns.unitName, text, at);
-	const name = named?.groups?.name;
-	const byName =
-		named && name
-			? { symbol: patterns.unitByName.get(plainPhrase(name)), length: named[0].length, word: name }
-			: null;
-	const bySymbol = readSymbol(patterns, text, at);
-	const best = (byName?.length ?? 0) >= (bySymbol?.length ?? 0) ? byName : bySymbol;
-	return best?.symbol === undefined
-		? null
-		: { symbol: best.symbol, word: best.word, end: at + best.length };
-}
-
-function readSymbol(patterns: Patterns, text: string, at: number) {
-	const match = readAt(patterns.unitSymbol, text, at);
-	const { gap = '', symbol = '' } = match?.groups ?? {};
-	if (!match) return null;
-	const isWordLike = /\p{L}$/u.test(symbol);
-	if (isWordLike && /^[\p{L}\p{N}]/u.test(text.slice(at + match[0].length))) return null;
-	// “5K” and “1990s” are more often a name than a quantity; “5km” is a slip for “5 km”.
-	if (gap === '' && /^\p{L}$/u.test(symbol)) return null;
-	return { symbol: unitOf(symbol)?.symbol, length: match[0].length, word: symbol };
-}
-
-/** The number stands by itself: not inside a name, an ordinal or a longer token. */
-function stands(patterns: Patterns, text: string, part: Part): boolean {
-	const { start } = part.number;
-	const isDigits = /\d/.test(text[start] ?? '');
-	const before = text.slice(Math.max(0, start - 2), start);
-	if (isDigits && /[\p{L}\p{N}_]$|[\p{L}\p{N}][-–/_.]$|\d,$/u.test(before)) return false;
-	return endsCleanly(patterns, text, part);
-}
-
-function endsCleanly(patterns: Patterns, text: string, { number, end }: Part): boolean {
-	if (end !== number.end) return true;
-	if (readAt(patterns.ordinalEnding, text, end)) return false;
-	return !/^(?:[\p{L}_]|[-/]\p{L})/u.test(text.slice(end, end + 3));
-}
-
-interface Hedge {
-	family: HedgeFamily;
-	word: string;
-	start: number;
-	double: boolean;
-}
-
-/** Longer than any hedge with an aside. */
-const LOOK_BACK = 48;
-
-function readHedge(patterns: Patterns, text: string, start: number, floor: number): Hedge {
-	const near = hedgeEndingAt(patterns, text, start, floor);
-	if (!near) return { family: 'bare', word: '', start, double: false };
-	const far = hedgeEndingAt(patterns, text, near.start, floor);
-	if (!far) return { ...near, double: false };
-	return { ...near, word: `${far.word} ${near.word}`, start: far.start, double: true };
-}
-
-function hedgeEndingAt(patterns: Patterns, text: string, start: number, floor: number) {
-	const from = Math.max(floor, start - LOOK_BACK);
-	const match = patterns.hedgeBefore.exec(text.slice(from, start));
-	const word = match?.groups?.word ?? match?.groups?.sign;
-	const family = word && patterns.hedgeFamilies.get(plainPhrase(word));
-	return match && word && family ? { family, word, start: from + match.index } : null;
 }
 
 /** Words that are a quantity only in company: “one metre”, not “one”; “about a metre”, not “a metre”. */
@@ -272,12 +182,6 @@ function kindOf({ lexicon }: Patterns, { number, unit }: Part): QuantityForm {
 		default:
 			return number.form;
 	}
-}
-
-function valueOf({ number, negative }: Part): number | null {
-	if (number.numeral === '') return number.form === 'order-word' ? number.scale : null;
-	const [over, under] = number.fraction ?? [Number(number.numeral), 1];
-	return Number((((negative ? -1 : 1) * over * number.scale) / under).toPrecision(15));
 }
 
 /** “2–3 km”, “between 2 and 3 km”, “from 2 to 3 km”: unit and scale once, at the end, stand for both. */

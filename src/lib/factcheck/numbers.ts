@@ -147,9 +147,7 @@ function foldOr(patterns: Patterns, text: string, read: NumberRead): NumberRead 
 
 /** “two thousand five hundred” is one number. */
 function addRemainder(patterns: Patterns, text: string, thousands: NumberRead): NumberRead {
-	const gap = /^(?:[\s\u00a0]+and)?[\s\u00a0]+/iu.exec(
-		text.slice(thousands.end, thousands.end + 12)
-	);
+	const gap = readAt(patterns.remainder, text, thousands.end);
 	const rest = gap && readBelowThousand(patterns, text, thousands.end + gap[0].length);
 	if (!rest) return thousands;
 	const sum = Number(thousands.numeral) * 1000 + Number(rest.numeral);
@@ -201,8 +199,8 @@ function readFraction(patterns: Patterns, text: string, at: number): NumberRead 
 	const read = fractionRead(at, at + match[0].length, parts);
 	const whole = readWhole(patterns, text, read, Boolean(half));
 	if (whole) return whole;
-	const isPlural = /s$/i.test(under ?? '') || Boolean(half);
-	return isPlural || readAt(patterns.afterFraction, text, read.end) ? read : null;
+	const standsAlone = parts[0] > 1 || Boolean(half);
+	return standsAlone || readAt(patterns.afterFraction, text, read.end) ? read : null;
 }
 
 function tensOf(patterns: Patterns, word: string): number {
@@ -241,7 +239,7 @@ function fractionRead(start: number, end: number, fraction: readonly [number, nu
 		form: 'fraction',
 		start,
 		end,
-		numeral: decimalText(fraction[0] / fraction[1]),
+		numeral: decimalText(Number((fraction[0] / fraction[1]).toPrecision(3))),
 		scale: 1,
 		fraction
 	};
@@ -283,7 +281,7 @@ function readSmallWord(patterns: Patterns, text: string, at: number): NumberRead
 		numeral: value === null ? '' : String(value),
 		scale: 1
 	};
-	const hundred = /^[\s\u00a0]+hundred(?!\p{L})/iu.exec(text.slice(read.end, read.end + 12));
+	const hundred = readAt(patterns.hundredAfter, text, read.end);
 	if (hundred) return { ...read, scale: 100, end: read.end + hundred[0].length };
 	return withScale(patterns, text, read);
 }

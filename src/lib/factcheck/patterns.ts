@@ -37,6 +37,10 @@ export interface Patterns {
 	/** A number word below a thousand, with its parts named. */
 	numberWord: RegExp;
 	andAHalf: RegExp;
+	/** Between the thousands and the rest: “two thousand and five”. */
+	remainder: RegExp;
+	/** “hundred” after a small word: “several hundred”. */
+	hundredAfter: RegExp;
 	scale: RegExp;
 	article: RegExp;
 	/** “half”, “a third”, “two-thirds”, “a four-hundredth”. */
@@ -142,6 +146,8 @@ export function compile(lexicon: Lexicon): Patterns {
 				`(?:${GAP}(?:${and})${GAP}(?<rest>${belowHundred})${WORD_END})?|(?<below>${belowHundred})(?:${WORD_END}|(?=${lexicon.fold}${WORD_END})))`
 		),
 		andAHalf: sticky(`${GAP}(?:${and})${GAP}(?:${article})${GAP}${lexicon.half}${WORD_END}`),
+		remainder: sticky(`(?:${GAP}(?:${and}))?${GAP}`),
+		hundredAfter: sticky(`${GAP}(?:${hundred})${WORD_END}`),
 		scale: sticky(`(?:${GAP}|-)?(?<scale>${scales})${WORD_END}`),
 		article: sticky(`(?:${article})${WORD_END}`),
 		fraction: sticky(

@@ -22,9 +22,19 @@ test('good settings are read, the origin without a path, the rest with defaults'
 });
 
 test('every problem is told at once, each by its name and with what to set', () => {
-	const attempt = () => readEnv({ PORT: 'x', SMTP_URL: 'http://wrong', STEELYARD_SEED: 'all', AUTH_SECRET: 'short' });
+	const attempt = () =>
+		readEnv({ PORT: 'x', SMTP_URL: 'http://wrong', STEELYARD_SEED: 'all', AUTH_SECRET: 'short' });
 	expect(attempt).toThrow(SettingsError);
-	for (const name of ['ORIGIN', 'PORT', 'AUTH_SECRET', 'STORE_ENDPOINT', 'STORE_ACCESS_KEY', 'SMTP_URL', 'MAIL_FROM', 'STEELYARD_SEED']) {
+	for (const name of [
+		'ORIGIN',
+		'PORT',
+		'AUTH_SECRET',
+		'STORE_ENDPOINT',
+		'STORE_ACCESS_KEY',
+		'SMTP_URL',
+		'MAIL_FROM',
+		'STEELYARD_SEED'
+	]) {
 		expect(attempt).toThrow(new RegExp(`· .*${name}`));
 	}
 	expect(attempt).toThrow('smtp://127.0.0.1:4625');
@@ -38,4 +48,10 @@ test('no secret is repeated in the message', () => {
 	expect(() => readEnv({ ...GOOD, AUTH_SECRET: 'hunter2', PORT: '0' })).toThrow(
 		expect.objectContaining({ message: expect.not.stringContaining('hunter2') })
 	);
+});
+
+test('people with a known passphrase are put only into a house on this computer', () => {
+	expect(readEnv({ ...GOOD, STEELYARD_SEED: 'demo' }).STEELYARD_SEED).toBe('demo');
+	const open = { ...GOOD, ORIGIN: 'https://desk.varrowmere.example', STEELYARD_SEED: 'people' };
+	expect(() => readEnv(open)).toThrow('known passphrase');
 });

@@ -1,5 +1,5 @@
 /** The running house: opened once at start, kept for the life of the process, closed in order. */
-import { hashPassphrase } from './auth/passphrase.ts';
+import { passphraseFits } from './auth/passphrase.ts';
 import type { Fixtures } from './context.ts';
 import { openDatabase } from './db/client.ts';
 import { newId } from './db/ids.ts';
@@ -8,7 +8,7 @@ import { readEnv, type Env } from './env.ts';
 import { startSender, type Sender } from './jobs/sender.ts';
 import { logLine } from './log.ts';
 import { openMailTransport } from './mail/transport.ts';
-import { restockShelf } from './services/releases.ts';
+import { restockShelf } from './services/restock-shelf.ts';
 import { shelfOf } from './shelf/shelf.ts';
 import { openObjectStore } from './store/object-store.ts';
 
@@ -21,7 +21,10 @@ export interface House {
 
 /** Locks, opens, migrates, seeds, puts releases before readers, and starts the mail sender. */
 export async function openHouse(env: Env): Promise<House> {
-	const database = await openDatabase({ dataDir: env.STEELYARD_DATA_DIR, migrations: env.STEELYARD_MIGRATIONS });
+	const database = await openDatabase({
+		dataDir: env.STEELYARD_DATA_DIR,
+		migrations: env.STEELYARD_MIGRATIONS
+	});
 	const store = openObjectStore({
 		endpoint: env.STORE_ENDPOINT,
 		bucket: env.STORE_BUCKET,
@@ -63,7 +66,7 @@ export async function openHouse(env: Env): Promise<House> {
 			report: (message) => logLine('warn', 'mail', { message })
 		});
 		// The decoy for unknown accounts is made now, so that the first one doesn't take longer.
-		await hashPassphrase(newId());
+		await passphraseFits(null, newId());
 		return { origin: env.ORIGIN, fixtures, close };
 	} catch (error) {
 		await close();

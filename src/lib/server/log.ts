@@ -1,6 +1,12 @@
 /** One JSON line an event on standard error. No copy, no addresses, no cookies, no tokens. */
-export function logLine(level: 'info' | 'warn' | 'error', event: string, details: Record<string, unknown> = {}): void {
-	process.stderr.write(`${JSON.stringify({ at: new Date().toISOString(), level, event, ...details })}\n`);
+export function logLine(
+	level: 'info' | 'warn' | 'error',
+	event: string,
+	details: Record<string, unknown> = {}
+): void {
+	process.stderr.write(
+		`${JSON.stringify({ at: new Date().toISOString(), level, event, ...details })}\n`
+	);
 }
 
 /** A fault of ours, under the number that the page shows. */

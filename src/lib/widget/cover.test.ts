@@ -35,10 +35,15 @@ function reworded(document: WidgetDocument, from: string, to: string): WidgetDoc
 
 describe('a signature lapses', () => {
 	test('when one character of its sentence changes, and no other does', () => {
-		expect(lapsed(firstLight, reworded(firstLight, 'faint radio', 'faint, radio'))).toEqual(['rest-frequency']);
-		expect(lapsed(firstLight, reworded(firstLight, 'as long as it set out', 'as long as when it set out'))).toEqual([
-			'stretch'
+		expect(lapsed(firstLight, reworded(firstLight, 'faint radio', 'faint, radio'))).toEqual([
+			'rest-frequency'
 		]);
+		expect(
+			lapsed(
+				firstLight,
+				reworded(firstLight, 'as long as it set out', 'as long as when it set out')
+			)
+		).toEqual(['stretch']);
 	});
 
 	test('when its own words change', () => {
@@ -62,19 +67,26 @@ describe('a signature lapses', () => {
 		const revised = new Map(catalogue).set('cosmo.inverse', { ...age, revision: '2.0.0' });
 		const before = claimCovers(firstLight, catalogue);
 		const after = claimCovers(firstLight, revised);
-		const moved = [...before.keys()].filter((id) => coverHash(before.get(id)!) !== coverHash(after.get(id)!));
+		const moved = [...before.keys()].filter(
+			(id) => coverHash(before.get(id)!) !== coverHash(after.get(id)!)
+		);
 		expect(moved).toEqual(['stretch', 'frequency', 'crest']);
 	});
 });
 
 test('nothing outside a claim’s sentence and wiring lapses it', () => {
-	const retitled = { ...reworded(firstLight, 'how bright', 'how very bright'), title: 'Another title' };
+	const retitled = {
+		...reworded(firstLight, 'how bright', 'how very bright'),
+		title: 'Another title'
+	};
 	expect(lapsed(firstLight, retitled)).toEqual([]);
 });
 
 describe('freezing', () => {
 	test('the digest is the same for the same piece, whatever the order of keys', () => {
-		const shuffled = Object.fromEntries(Object.entries(structuredClone(firstLight)).reverse()) as WidgetDocument;
+		const shuffled = Object.fromEntries(
+			Object.entries(structuredClone(firstLight)).reverse()
+		) as WidgetDocument;
 		expect(freeze(shuffled, catalogue).digest).toBe(freeze(firstLight, catalogue).digest);
 	});
 

@@ -57,8 +57,14 @@ export function claimCovers(
 }
 
 /** Steps with the revision that runs beside the one pinned, and the controls that reach them or stand in the sentence. */
-function upstream(document: WidgetDocument, claim: Claim, sentence: string, calculators: CalculatorSet) {
-	const wiring = claim.form === 'exempt' ? { steps: [], controls: [] } : wiringOf(document.steps, claim.reading);
+function upstream(
+	document: WidgetDocument,
+	claim: Claim,
+	sentence: string,
+	calculators: CalculatorSet
+) {
+	const wiring =
+		claim.form === 'exempt' ? { steps: [], controls: [] } : wiringOf(document.steps, claim.reading);
 	const said = document.controls.filter(({ id }) => sentence.includes(`{setting ${id}}`));
 	const reaching = new Set([...wiring.controls, ...said.map(({ id }) => id)]);
 	return {

@@ -9,7 +9,10 @@ export const DOCUMENT_VERSION = 1;
 /** Ids are made by the builder, stay with their thing through every edit, and are never shown to readers. */
 export const Id = z
 	.string()
-	.regex(/^[a-z][a-z0-9-]{0,39}$/, 'An id is small letters, digits and dashes, and starts with a letter.');
+	.regex(
+		/^[a-z][a-z0-9-]{0,39}$/,
+		'An id is small letters, digits and dashes, and starts with a letter.'
+	);
 
 const finite = z.number().refine(Number.isFinite, 'A number must be finite.');
 
@@ -91,7 +94,10 @@ export const Inline = z.discriminatedUnion('kind', [
 	z.strictObject({
 		kind: z.literal('text'),
 		text: z.string().min(1).max(20_000),
-		marks: z.array(z.enum(['em', 'strong'])).max(2).optional()
+		marks: z
+			.array(z.enum(['em', 'strong']))
+			.max(2)
+			.optional()
 	}),
 	z.strictObject({ kind: z.literal('claim'), claim: Id, text: z.string().min(1).max(400) }),
 	z.strictObject({ kind: z.literal('live'), claim: Id }),

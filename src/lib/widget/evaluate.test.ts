@@ -54,7 +54,9 @@ test('a refusal is handed down with its first cause', () => {
 
 test('settings and controls read as exact', () => {
 	const evaluation = evaluate(firstLight, {}, catalogue);
-	expect(readingAt(firstLight, evaluation, { step: 'line', setting: 'restFrequency_Hz' }, catalogue)).toMatchObject({
+	expect(
+		readingAt(firstLight, evaluation, { step: 'line', setting: 'restFrequency_Hz' }, catalogue)
+	).toMatchObject({
 		ok: true,
 		reading: { value: 1420405751.768, unit: 'Hz', uncertainty: 'exact' }
 	});
@@ -70,5 +72,38 @@ test('a chart’s line agrees with the readings at its ends', () => {
 	const line = sampleChart(firstLight, {}, chart, catalogue);
 	expect(line[0]).toEqual({ x: 100, y: frequencyMHz(100) });
 	expect(line.at(-1)).toEqual({ x: 500, y: frequencyMHz(500) });
-	expect(line.every(({ y }, index) => index === 0 || (y ?? 0) > (line[index - 1]?.y ?? 0))).toBe(true);
+	expect(line.every(({ y }, index) => index === 0 || (y ?? 0) > (line[index - 1]?.y ?? 0))).toBe(
+		true
+	);
+});
+
+test('a reading that rests on an uncertain one is not exact', () => {
+	const evaluation = evaluate(firstLight, {}, catalogue);
+	const outcome = readingAt(firstLight, evaluation, frequency, catalogue);
+	expect(outcome.ok && outcome.reading.uncertainty).toBe('not-available');
+});
+
+test('an output with no value for these inputs says why', () => {
+	const here: WidgetDocument = {
+		...firstLight,
+		steps: [
+			{
+				id: 'now',
+				calculator: 'cosmo.at_z',
+				revision: '1.0.0',
+				settings: {
+					cosmology: { from: 'fixed', value: { set: 'Planck18' } },
+					z: { from: 'fixed', value: 0 }
+				}
+			}
+		]
+	};
+	const modulus = readingAt(
+		here,
+		evaluate(here, {}, catalogue),
+		{ step: 'now', output: 'distmod' },
+		catalogue
+	);
+	expect(modulus.ok ? '' : modulus.refusal.code).not.toBe('missing-output');
+	expect(modulus.ok).toBe(false);
 });

@@ -12,7 +12,8 @@ import {
 	type RawInputs,
 	type Reading,
 	type Refusal,
-	type Result
+	type Result,
+	type Uncertainty
 } from '../physics/calculator.ts';
 import { runCalculator } from '../physics/calculators/run.ts';
 import { commensurable, convert } from '../physics/units/units.ts';
@@ -40,7 +41,11 @@ export type ReadingOutcome = { ok: true; reading: Reading } | { ok: false; refus
 type Wired = Pick<WidgetDocument, 'steps' | 'controls'>;
 
 /** Works every step in order. Values outside a control's range are brought to its nearest end. */
-export function evaluate(document: Wired, values: ControlValues, calculators: CalculatorSet): Evaluation {
+export function evaluate(
+	document: Wired,
+	values: ControlValues,
+	calculators: CalculatorSet
+): Evaluation {
 	const settled = settleValues(document.controls, values);
 	const order = orderSteps(document.steps);
 	const results: Record<string, Result> = {};
@@ -72,16 +77,20 @@ function evaluateStep(
 	calculators: CalculatorSet
 ): Result {
 	const calculator = calculators.get(step.calculator);
-	if (!calculator) return refuse('unknown-calculator', `There is no calculator “${step.calculator}”.`);
+	if (!calculator)
+		return refuse('unknown-calculator', `There is no calculator “${step.calculator}”.`);
 
 	const inputs: RawInputs = {};
+	const uncertainties: Record<string, Uncertainty> = {};
 	for (const [key, source] of settingsInOrder(step, calculator.inputs)) {
-		const spec = calculator.inputs[key.split('.')[0] ?? key];
+		const [head = key] = key.split('.');
+		const spec = calculator.inputs[head];
 		const outcome = settingValue(source, spec, inputs, document, values, results);
 		if (!outcome.ok) return outcome;
 		assign(inputs, key, outcome.value);
+		if (outcome.uncertainty !== undefined) uncertainties[head] = outcome.uncertainty;
 	}
-	return runCalculator(calculator, inputs);
+	return runCalculator(calculator, inputs, uncertainties);
 }
 
 /** Choices first: a number's unit may hang on one (`energy.convert`, `cosmo.inverse`). Whole objects before their parts. */
@@ -90,7 +99,9 @@ function settingsInOrder(step: Step, inputs: Record<string, InputSpec>): [string
 	return Object.entries(step.settings).sort(([a], [b]) => rank(a) - rank(b));
 }
 
-type SettingOutcome = { ok: true; value: unknown } | { ok: false; refusal: Refusal };
+/** `uncertainty` is known of what comes from another reading; a setting is exact. */
+type SettingOutcome =
+	{ ok: true; value: unknown; uncertainty?: Uncertainty } | { ok: false; refusal: Refusal };
 
 function settingValue(
 	source: SettingSource,
@@ -106,14 +117,19 @@ function settingValue(
 			return { ok: true, value: source.value };
 		case 'control': {
 			const control = document.controls.find(({ id }) => id === source.control);
-			if (!control) return refuse('missing-control', 'The control of this setting isn’t in the piece.');
+			if (!control)
+				return refuse('missing-control', 'The control of this setting isn’t in the piece.');
 			return toUnit(values[control.id] ?? control.initial, control.unit, unitIn(spec, inputs));
 		}
 		case 'reading': {
 			const outcome = outputOf(results[source.step], source.output);
 			if (!outcome.ok) return outcome;
-			const { value, unit } = outcome.reading;
-			return typeof value === 'number' ? toUnit(value, unit, unitIn(spec, inputs)) : { ok: true, value };
+			const { value, unit, uncertainty } = outcome.reading;
+			if (typeof value !== 'number') return { ok: true, value };
+			const converted = toUnit(value, unit, unitIn(spec, inputs));
+			return converted.ok && uncertainty !== 'exact'
+				? { ...converted, uncertainty: 'not-available' }
+				: converted;
 		}
 	}
 }
@@ -126,7 +142,10 @@ function unitIn(spec: InputSpec | undefined, inputs: RawInputs): string | null {
 function toUnit(value: number, from: string, to: string | null): SettingOutcome {
 	if (to === null || from === to) return { ok: true, value };
 	if (!commensurable(from, to)) {
-		return refuse('unit-mismatch', `This setting is in ${to || 'plain numbers'} and can’t take ${from || 'a plain number'}.`);
+		return refuse(
+			'unit-mismatch',
+			`This setting is in ${to || 'plain numbers'} and can’t take ${from || 'a plain number'}.`
+		);
 	}
 	return { ok: true, value: convert(value, from, to) };
 }
@@ -141,7 +160,11 @@ function outputOf(result: Result | undefined, output: string): ReadingOutcome {
 	if (!result) return refuse('missing-step', 'The calculator of this reading isn’t on the bench.');
 	if (!result.ok) return result;
 	const reading = result.outputs[output];
-	return reading ? { ok: true, reading } : refuse('missing-output', `This calculator gives no “${output}”.`);
+	const withheld = result.withheld?.[output];
+	if (!reading && withheld) return { ok: false, refusal: withheld };
+	return reading
+		? { ok: true, reading }
+		: refuse('missing-output', `This calculator gives no “${output}”.`);
 }
 
 /** The reading a claim, a live number or a chart hangs on. Settings and controls read as exact. */
@@ -153,7 +176,8 @@ export function readingAt(
 ): ReadingOutcome {
 	if ('control' in ref) {
 		const control = document.controls.find(({ id }) => id === ref.control);
-		if (!control) return refuse('missing-control', 'The control of this number isn’t in the piece.');
+		if (!control)
+			return refuse('missing-control', 'The control of this number isn’t in the piece.');
 		return exact(evaluation.values[control.id] ?? control.initial, control.unit);
 	}
 	if ('output' in ref) return outputOf(evaluation.steps[ref.step], ref.output);
@@ -174,7 +198,14 @@ function settingReading(
 	}
 	const choices = fixedSettings(step);
 	const spec = calculator.inputs[ref.setting];
-	const outcome = settingValue(source, spec, choices, document, evaluation.values, evaluation.steps);
+	const outcome = settingValue(
+		source,
+		spec,
+		choices,
+		document,
+		evaluation.values,
+		evaluation.steps
+	);
 	if (!outcome.ok) return outcome;
 	if (typeof outcome.value !== 'number' || spec?.kind !== 'number') {
 		return refuse('not-a-number', 'This setting isn’t a number.');
@@ -213,11 +244,17 @@ export function sampleChart(
 ): ChartPoint[] {
 	const control = document.controls.find(({ id }) => id === chart.x.control);
 	if (!control) return [];
-	const upstream = { controls: document.controls, steps: wiringOf(document.steps, chart.y.reading).steps };
+	const upstream = {
+		controls: document.controls,
+		steps: wiringOf(document.steps, chart.y.reading).steps
+	};
 	return Array.from({ length: points }, (_, index) => {
 		const x = control.min + ((control.max - control.min) * index) / (points - 1);
 		const evaluation = evaluate(upstream, { ...values, [control.id]: x }, calculators);
-		return { x, y: valueIn(readingAt(upstream, evaluation, chart.y.reading, calculators), chart.y.unit) };
+		return {
+			x,
+			y: valueIn(readingAt(upstream, evaluation, chart.y.reading, calculators), chart.y.unit)
+		};
 	});
 }
 

@@ -23,11 +23,18 @@ export function findings(document: WidgetDocument, calculators: CalculatorSet): 
 
 function wordFindings(document: WidgetDocument): Finding[] {
 	const found: Finding[] = [];
-	if (!document.title.trim()) found.push({ code: 'no-title', says: 'Give the piece a title.', at: {} });
+	if (!document.title.trim())
+		found.push({ code: 'no-title', says: 'Give the piece a title.', at: {} });
 	if (!document.point.trim()) {
-		found.push({ code: 'no-point', says: 'Say the one thing a reader takes away, under the title.', at: {} });
+		found.push({
+			code: 'no-point',
+			says: 'Say the one thing a reader takes away, under the title.',
+			at: {}
+		});
 	}
-	const written = document.blocks.some((block) => isTextBlock(block) && blockText(block, tokenWords).trim());
+	const written = document.blocks.some(
+		(block) => isTextBlock(block) && blockText(block, tokenWords).trim()
+	);
 	if (!written) found.push({ code: 'no-copy', says: 'Write at least one paragraph.', at: {} });
 	return found;
 }
@@ -38,21 +45,39 @@ function chartFindings(chart: ChartBlock): Finding[] {
 		[chart.x.label, 'no-x-label', 'Say which quantity the level axis shows.'],
 		[chart.y.label, 'no-y-label', 'Say which quantity the upright axis shows.'],
 		[chart.source, 'no-chart-source', 'Say where the chart’s line comes from.'],
-		[chart.description, 'no-description', 'Describe the chart for those who can’t see it: its ends and its trend.']
+		[
+			chart.description,
+			'no-description',
+			'Describe the chart for those who can’t see it: its ends and its trend.'
+		]
 	];
-	return wanted.flatMap(([text, code, says]) => (text.trim() ? [] : [{ code, says, at: { block: chart.id } }]));
+	return wanted.flatMap(([text, code, says]) =>
+		text.trim() ? [] : [{ code, says, at: { block: chart.id } }]
+	);
 }
 
 /** A control that moves nothing a reader can see, or that has no name, isn't ready. */
 function controlFindings(document: WidgetDocument): Finding[] {
-	const shown = new Set(document.blocks.flatMap((block) => (block.kind === 'control' ? [block.control] : [])));
+	const shown = new Set(
+		document.blocks.flatMap((block) => (block.kind === 'control' ? [block.control] : []))
+	);
 	return document.controls.flatMap(({ id, label }) => {
-		const block = document.blocks.find((candidate) => candidate.kind === 'control' && candidate.control === id);
+		const block = document.blocks.find(
+			(candidate) => candidate.kind === 'control' && candidate.control === id
+		);
 		const at = block ? { block: block.id } : {};
 		if (!shown.has(id)) {
-			return [{ code: 'control-unplaced', says: `Put the slider “${label || id}” into the copy, or remove it.`, at }];
+			return [
+				{
+					code: 'control-unplaced',
+					says: `Put the slider “${label || id}” into the copy, or remove it.`,
+					at
+				}
+			];
 		}
-		return label.trim() ? [] : [{ code: 'no-control-label', says: 'Say what the slider moves, with its unit.', at }];
+		return label.trim()
+			? []
+			: [{ code: 'no-control-label', says: 'Say what the slider moves, with its unit.', at }];
 	});
 }
 
@@ -69,6 +94,8 @@ function readingFindings(document: WidgetDocument, calculators: CalculatorSet): 
 	];
 	return inUse.flatMap(({ ref, at }) => {
 		const outcome = readingAt(document, evaluation, ref, calculators);
-		return outcome.ok ? [] : [{ code: 'no-reading', says: `No reading: ${outcome.refusal.message}`, at }];
+		return outcome.ok
+			? []
+			: [{ code: 'no-reading', says: `No reading: ${outcome.refusal.message}`, at }];
 	});
 }

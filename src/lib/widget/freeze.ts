@@ -41,7 +41,8 @@ export function canonicalJson(value: unknown): string {
 	if (typeof value === 'number' && !Number.isFinite(value)) {
 		throw new TypeError('A number in a frozen document must be finite.');
 	}
-	if (Array.isArray(value)) return `[${value.map((item) => canonicalJson(item ?? null)).join(',')}]`;
+	if (Array.isArray(value))
+		return `[${value.map((item) => canonicalJson(item ?? null)).join(',')}]`;
 	if (typeof value === 'object' && value !== null) {
 		const members = Object.entries(value)
 			.filter(([, member]) => member !== undefined)

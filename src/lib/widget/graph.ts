@@ -16,7 +16,11 @@ export function orderSteps(steps: readonly Step[]): StepOrder {
 	const visit = (step: Step): StepOrder | null => {
 		if (state.get(step.id) === 'done') return null;
 		if (state.get(step.id) === 'open') {
-			return { ok: false, reason: 'cycle', path: [...trail.slice(trail.indexOf(step.id)), step.id] };
+			return {
+				ok: false,
+				reason: 'cycle',
+				path: [...trail.slice(trail.indexOf(step.id)), step.id]
+			};
 		}
 		state.set(step.id, 'open');
 		trail.push(step.id);
@@ -41,7 +45,9 @@ export function orderSteps(steps: readonly Step[]): StepOrder {
 
 /** Ids of the steps whose readings a step takes. */
 function feeds(step: Step): string[] {
-	return Object.values(step.settings).flatMap((source) => (source.from === 'reading' ? [source.step] : []));
+	return Object.values(step.settings).flatMap((source) =>
+		source.from === 'reading' ? [source.step] : []
+	);
 }
 
 export interface Wiring {

@@ -20,7 +20,11 @@ test.each([firstLight, sameDrop])('$title hangs together and lacks nothing', (do
 describe('what is broken is named', () => {
 	test('a ring on the bench', () => {
 		const [message] = issuesOf((document) => {
-			document.steps[0]!.settings.value = { from: 'reading', step: 'line', output: 'observedFrequency' };
+			document.steps[0]!.settings.value = {
+				from: 'reading',
+				step: 'line',
+				output: 'observedFrequency'
+			};
 			return document;
 		}).slice(-1);
 		expect(message).toMatch(/feed each other in a ring: .+ → .+ → /);
@@ -43,10 +47,42 @@ describe('what is broken is named', () => {
 	});
 
 	test.each<[string, (document: WidgetDocument) => unknown, RegExp]>([
-		['an unknown unit', (d) => ({ ...d, controls: [{ ...d.controls[0], unit: 'furlong-ish' }] }), /no unit of the house/],
-		['an unknown calculator', (d) => ({ ...d, steps: [{ ...d.steps[0], calculator: 'no.such' }, d.steps[1]] }), /no calculator “no.such”/],
-		['a claim entry without words', (d) => ({ ...d, claims: [...d.claims, { id: 'loose', form: 'exempt', reason: 'x' }] }), /“loose” stands nowhere/],
-		['a first setting out of range', (d) => ({ ...d, controls: [{ ...d.controls[0], initial: 900 }] }), /between the lowest and the highest/],
+		[
+			'an unknown unit',
+			(d) => ({ ...d, controls: [{ ...d.controls[0], unit: 'furlong-ish' }] }),
+			/no unit of the house/
+		],
+		[
+			'an unknown calculator',
+			(d) => ({ ...d, steps: [{ ...d.steps[0], calculator: 'no.such' }, d.steps[1]] }),
+			/no calculator “no.such”/
+		],
+		[
+			'a claim entry without words',
+			(d) => ({ ...d, claims: [...d.claims, { id: 'loose', form: 'exempt', reason: 'x' }] }),
+			/“loose” stands nowhere/
+		],
+		[
+			'a first setting out of range',
+			(d) => ({ ...d, controls: [{ ...d.controls[0], initial: 900 }] }),
+			/between the lowest and the highest/
+		],
+		[
+			'a live number in a unit of another kind',
+			(d) => ({
+				...d,
+				claims: d.claims.map((c) => (c.form === 'live' ? { ...c, unit: 'kg' } : c))
+			}),
+			/can’t be printed in kg/
+		],
+		[
+			'a chart in a unit of another kind',
+			(d) => ({
+				...d,
+				blocks: d.blocks.map((b) => (b.kind === 'chart' ? { ...b, y: { ...b.y, unit: 'm' } } : b))
+			}),
+			/can’t be printed in m/
+		],
 		['NaN', (d) => ({ ...d, controls: [{ ...d.controls[0], step: Number.NaN }] }), /./],
 		['a newer version', (d) => ({ ...d, version: 99 }), /version 99/],
 		['an unknown key', (d) => ({ ...d, colour: 'red' }), /colour/],
@@ -57,7 +93,19 @@ describe('what is broken is named', () => {
 });
 
 test('an empty sheet parses, and says what it lacks', () => {
-	const sheet = { ...firstLight, title: '', point: '', steps: [], controls: [], blocks: [], claims: [] };
+	const sheet = {
+		...firstLight,
+		title: '',
+		point: '',
+		steps: [],
+		controls: [],
+		blocks: [],
+		claims: []
+	};
 	expect(parseDocument(sheet, catalogue).ok).toBe(true);
-	expect(findings(sheet, catalogue).map(({ code }) => code)).toEqual(['no-title', 'no-point', 'no-copy']);
+	expect(findings(sheet, catalogue).map(({ code }) => code)).toEqual([
+		'no-title',
+		'no-point',
+		'no-copy'
+	]);
 });

@@ -17,7 +17,7 @@ import {
 	type Stored
 } from './document.ts';
 import { orderSteps } from './graph.ts';
-import { fixedSettings } from './tie-units.ts';
+import { fixedSettings, unitOfRef } from './tie-units.ts';
 
 export interface Issue {
 	/** Where in the document: `steps.0.settings.z`. */
@@ -51,7 +51,10 @@ function lift(stored: unknown): Lifted {
 	while (climbing.version !== DOCUMENT_VERSION) {
 		const upgrade = upgrades[Number(climbing.version)];
 		if (!upgrade) {
-			return broken('version', `This document is of version ${String(climbing.version)}; this house reads up to ${DOCUMENT_VERSION}.`);
+			return broken(
+				'version',
+				`This document is of version ${String(climbing.version)}; this house reads up to ${DOCUMENT_VERSION}.`
+			);
 		}
 		climbing = upgrade(climbing);
 	}
@@ -68,7 +71,8 @@ function idIssues(document: WidgetDocument): Issue[] {
 	for (const kind of ['steps', 'controls', 'blocks', 'claims'] as const) {
 		const seen = new Set<string>();
 		document[kind].forEach(({ id }, index) => {
-			if (seen.has(id)) issues.push({ path: `${kind}.${index}.id`, message: `The id “${id}” is used twice.` });
+			if (seen.has(id))
+				issues.push({ path: `${kind}.${index}.id`, message: `The id “${id}” is used twice.` });
 			seen.add(id);
 		});
 	}
@@ -91,7 +95,10 @@ function idIssues(document: WidgetDocument): Issue[] {
 			const claim = claims.get(inline.claim);
 			if (!claim) issues.push({ path: at, message: `There is no claim “${inline.claim}”.` });
 			else if ((claim.form === 'live') !== (inline.kind === 'live')) {
-				issues.push({ path: at, message: `The claim “${claim.id}” is ${claim.form} and stands here as ${inline.kind}.` });
+				issues.push({
+					path: at,
+					message: `The claim “${claim.id}” is ${claim.form} and stands here as ${inline.kind}.`
+				});
 			}
 			if (placed.has(inline.claim)) {
 				issues.push({ path: at, message: `The claim “${inline.claim}” stands in two places.` });
@@ -101,7 +108,10 @@ function idIssues(document: WidgetDocument): Issue[] {
 	});
 	document.claims.forEach((claim, index) => {
 		if (!placed.has(claim.id)) {
-			issues.push({ path: `claims.${index}`, message: `The claim “${claim.id}” stands nowhere in the copy.` });
+			issues.push({
+				path: `claims.${index}`,
+				message: `The claim “${claim.id}” stands nowhere in the copy.`
+			});
 		}
 	});
 	return issues;
@@ -134,11 +144,18 @@ function stepTitle(document: WidgetDocument, id: string, calculators: Calculator
 
 function controlIssues(controls: readonly Control[]): Issue[] {
 	return controls.flatMap(({ unit }, index) =>
-		unitOf(unit) ? [] : [{ path: `controls.${index}.unit`, message: `“${unit}” is no unit of the house’s table.` }]
+		unitOf(unit)
+			? []
+			: [{ path: `controls.${index}.unit`, message: `“${unit}” is no unit of the house’s table.` }]
 	);
 }
 
-function stepIssues(step: Step, index: number, document: WidgetDocument, calculators: CalculatorSet): Issue[] {
+function stepIssues(
+	step: Step,
+	index: number,
+	document: WidgetDocument,
+	calculators: CalculatorSet
+): Issue[] {
 	const path = `steps.${index}`;
 	const calculator = calculators.get(step.calculator);
 	if (!calculator) return [{ path, message: `There is no calculator “${step.calculator}”.` }];
@@ -188,32 +205,64 @@ function sourceUnit(
 	return output.text ? null : { unit: resolveUnit(output.unit, fixedSettings(upstream)) };
 }
 
-/** Claims and charts hang on readings that exist. */
+/** Claims and charts hang on readings that exist, and print them in a unit of the same kind. */
 function refIssues(document: WidgetDocument, calculators: CalculatorSet): Issue[] {
 	const controls = new Set(document.controls.map(({ id }) => id));
-	const refs: { path: string; ref: ReadingRef }[] = [
+	const refs: { path: string; ref: ReadingRef; unit?: string }[] = [
 		...document.claims.flatMap((claim, index) =>
-			claim.form === 'exempt' ? [] : [{ path: `claims.${index}.reading`, ref: claim.reading }]
+			claim.form === 'exempt'
+				? []
+				: [
+						{
+							path: `claims.${index}.reading`,
+							ref: claim.reading,
+							...(claim.form === 'live' ? { unit: claim.unit } : {})
+						}
+					]
 		),
 		...document.blocks.flatMap((block, index) =>
 			block.kind === 'chart'
 				? [
-						{ path: `blocks.${index}.y`, ref: block.y.reading },
+						{ path: `blocks.${index}.y`, ref: block.y.reading, unit: block.y.unit },
 						{ path: `blocks.${index}.x`, ref: { control: block.x.control } }
 					]
 				: []
 		)
 	];
-	return refs.flatMap(({ path, ref }) => {
+	return refs.flatMap(({ path, ref, unit }) => {
+		const printed = unit === undefined ? null : printIssue(document, ref, unit, calculators);
+		if (printed) return [{ path, message: printed }];
 		if ('control' in ref) {
-			return controls.has(ref.control) ? [] : [{ path, message: `There is no control “${ref.control}”.` }];
+			return controls.has(ref.control)
+				? []
+				: [{ path, message: `There is no control “${ref.control}”.` }];
 		}
 		const step = document.steps.find(({ id }) => id === ref.step);
 		const calculator = step && calculators.get(step.calculator);
-		if (!step || !calculator) return [{ path, message: `There is no step “${ref.step}” on the bench.` }];
+		if (!step || !calculator)
+			return [{ path, message: `There is no step “${ref.step}” on the bench.` }];
 		const there = 'output' in ref ? ref.output in calculator.outputs : ref.setting in step.settings;
 		return there
 			? []
-			: [{ path, message: `${calculator.title} has no “${'output' in ref ? ref.output : ref.setting}” here.` }];
+			: [
+					{
+						path,
+						message: `${calculator.title} has no “${'output' in ref ? ref.output : ref.setting}” here.`
+					}
+				];
 	});
+}
+
+/** Why a reading can't be printed in a unit; null when it can, or when the reading itself isn't there. */
+function printIssue(
+	document: WidgetDocument,
+	ref: ReadingRef,
+	unit: string,
+	calculators: CalculatorSet
+): string | null {
+	if (!unitOf(unit)) return `“${unit}” is no unit of the house’s table.`;
+	const own = unitOfRef(document, ref, calculators);
+	return own === null || commensurable(own, unit)
+		? null
+		: `This reading is in ${own || 'plain numbers'} and can’t be printed in ${unit || 'plain numbers'}.`;
 }

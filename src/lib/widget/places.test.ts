@@ -4,13 +4,17 @@ import { firstLight } from '../server/demo/first-light.ts';
 import { evaluate } from './evaluate.ts';
 import { claimPlaces, sentenceSpans, wordsAt } from './places.ts';
 
-const sentences = (text: string) => sentenceSpans(text).map(({ start, end }) => text.slice(start, end).trim());
+const sentences = (text: string) =>
+	sentenceSpans(text).map(({ start, end }) => text.slice(start, end).trim());
 
 test.each([
 	['One. Two.', ['One.', 'Two.']],
 	['It is 4.4 metres long. That is e.g. a bus.', ['It is 4.4 metres long.', 'That is e.g. a bus.']],
 	['“Really?” She left… Then nothing', ['“Really?”', 'She left…', 'Then nothing']],
-	['About 13.8 billion years ago. 21 centimetres.', ['About 13.8 billion years ago.', '21 centimetres.']],
+	[
+		'About 13.8 billion years ago. 21 centimetres.',
+		['About 13.8 billion years ago.', '21 centimetres.']
+	],
 	['', []]
 ])('sentences of %j', (text, expected) => {
 	expect(sentences(text)).toEqual(expected);

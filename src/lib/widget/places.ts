@@ -1,6 +1,12 @@
 /** The copy as text: each block's words, its sentences, and where every claim stands in them. */
 import type { CalculatorSet, Reading } from '../physics/calculator.ts';
-import { isTextBlock, type Claim, type Inline, type TextBlock, type WidgetDocument } from './document.ts';
+import {
+	isTextBlock,
+	type Claim,
+	type Inline,
+	type TextBlock,
+	type WidgetDocument
+} from './document.ts';
 import { readingAt, type Evaluation } from './evaluate.ts';
 import { plainDecimal, printStated, roundToFigures, stateReading, type Stated } from './stated.ts';
 
@@ -27,7 +33,11 @@ export const NO_READING = '…';
 /** Words for each inline; with no evaluation, live numbers and settings keep a placeholder that names them. */
 export type Words = (inline: Inline) => string;
 
-export function wordsAt(document: WidgetDocument, evaluation: Evaluation, calculators: CalculatorSet): Words {
+export function wordsAt(
+	document: WidgetDocument,
+	evaluation: Evaluation,
+	calculators: CalculatorSet
+): Words {
 	return (inline) => {
 		switch (inline.kind) {
 			case 'text':
@@ -72,7 +82,9 @@ export function liveStated(
 }
 
 function stateLive(reading: Reading, claim: Extract<Claim, { form: 'live' }>): Stated | null {
-	return typeof reading.value === 'number' ? stateReading(reading.value, reading.unit, claim) : null;
+	return typeof reading.value === 'number'
+		? stateReading(reading.value, reading.unit, claim)
+		: null;
 }
 
 /** A control's value as printed: all its digits, since a setting is exact. */
@@ -126,7 +138,8 @@ export function claimPlaces(document: WidgetDocument, words: Words): ClaimPlace[
 		let offset = 0;
 		for (const inline of block.content) {
 			const said = words(inline);
-			const claim = inline.kind === 'claim' || inline.kind === 'live' ? claims.get(inline.claim) : undefined;
+			const claim =
+				inline.kind === 'claim' || inline.kind === 'live' ? claims.get(inline.claim) : undefined;
 			if (claim) {
 				const { sentence, before, after, start } = sentenceAt(text, spans, offset);
 				places.push({
@@ -148,11 +161,21 @@ export function claimPlaces(document: WidgetDocument, words: Words): ClaimPlace[
 }
 
 function sentenceAt(text: string, spans: readonly Span[], offset: number) {
-	const index = Math.max(0, spans.findIndex(({ end }) => offset < end));
+	const index = Math.max(
+		0,
+		spans.findIndex(({ end }) => offset < end)
+	);
 	const slice = (span: Span | undefined) => (span ? text.slice(span.start, span.end).trim() : '');
 	const span = spans[index];
-	const start = span ? span.start + (text.slice(span.start, span.end).match(/^\s*/)?.[0].length ?? 0) : 0;
-	return { sentence: slice(span), before: slice(spans[index - 1]), after: slice(spans[index + 1]), start };
+	const start = span
+		? span.start + (text.slice(span.start, span.end).match(/^\s*/)?.[0].length ?? 0)
+		: 0;
+	return {
+		sentence: slice(span),
+		before: slice(spans[index - 1]),
+		after: slice(spans[index + 1]),
+		start
+	};
 }
 
 /** a … z, then aa, ab … */

@@ -23,9 +23,18 @@ describe('printReading', () => {
 
 	test('prints an exact value whole and without idle zeros', () => {
 		expect(readingWords({ value: 1420.405751768, unit: 'MHz', uncertainty: 'exact' })).toBe(
-			`1420.40575177${NB}MHz`
+			`1420.405751768${NB}MHz`
+		);
+		expect(readingWords({ value: 1420.405751768, unit: 'MHz', uncertainty: 'exact' }, 6)).toBe(
+			`1420.41${NB}MHz`
 		);
 		expect(readingWords({ value: 6000, unit: 'kg', uncertainty: 'exact' })).toBe(`6000${NB}kg`);
+	});
+
+	test('prints a setting as it was typed', () => {
+		expect(printReading({ value: 1420405751.768, unit: 'Hz', uncertainty: 'exact' }).value).toBe(
+			'1\u202f420\u202f405\u202f751.768'
+		);
 	});
 
 	test('leaves words as they are', () => {

@@ -50,13 +50,13 @@ test('print', () => {
 	expect(printNumeral('-19')).toBe('−19');
 	expect(printNumeral('17190')).toBe('17\u202f190');
 	expect(printNumeral('1420')).toBe('1420');
-	expect(printStated({ hedge: 'around', hedgeWord: 'about', numeral: '68', scale: 1, unit: 'MHz' })).toBe(
-		'about 68\u00a0megahertz'
-	);
+	expect(
+		printStated({ hedge: 'around', hedgeWord: 'about', numeral: '68', scale: 1, unit: 'MHz' })
+	).toBe('about 68\u00a0megahertz');
 	expect(printStated({ hedge: 'bare', hedgeWord: '', numeral: '180', scale: 1, unit: 'Myr' })).toBe(
 		'180\u00a0million years'
 	);
-	expect(printStated({ hedge: 'below', hedgeWord: 'nearly', numeral: '14', scale: 1e9, unit: 'yr' })).toBe(
-		'nearly 14\u00a0billion years'
-	);
+	expect(
+		printStated({ hedge: 'below', hedgeWord: 'nearly', numeral: '14', scale: 1e9, unit: 'yr' })
+	).toBe('nearly 14\u00a0billion years');
 });

@@ -190,7 +190,7 @@ export const english: Lexicon = {
 	],
 	range: { between: ['between'], and: ['and'], from: ['from'], to: ['to'] },
 	per: ['per', 'a', 'an', 'each', 'every'],
-	notUnits: ['a', 'u', 'd', 'foe', 'us', 'um', 'time', 'fold', 'kilo', 'part per million'],
+	notUnits: ['a', 'u', 'd', 'foe', 'us', 'um', 'same', 'time', 'fold', 'kilo', 'part per million'],
 	times: 'times',
 	months: [
 		'January',

@@ -21,7 +21,11 @@ export interface AuthHouse {
 /** One provider for each way to prove who one is. Both take a check that has been done by a service. */
 const PROVIDERS = { passphrase: 'Passphrase', link: 'Sign-in link' } as const;
 
-function config({ origin, secret }: AuthHouse, prove: () => Promise<SignedIn>, entered: (by: SignedIn) => void) {
+function config(
+	{ origin, secret }: AuthHouse,
+	prove: () => Promise<SignedIn>,
+	entered: (by: SignedIn) => void
+) {
 	const names = cookieNames(origin);
 	return {
 		secret,
@@ -79,11 +83,16 @@ export async function signInThrough(
 		)
 	);
 	try {
-		await auth.signIn({ ...event, request: request(house.origin, provider), cookies: only(event, names.session) });
+		await auth.signIn({
+			...event,
+			request: request(house.origin, provider),
+			cookies: only(event, names.session)
+		});
 	} catch (error) {
 		if (isRedirect(error)) return; // Auth.js is done; where to go is the page's to say
 		if (failure instanceof SteelyardError) throw failure;
-		if (error instanceof AuthError && failure === undefined) throw new SteelyardError('sign-in-failed');
+		if (error instanceof AuthError && failure === undefined)
+			throw new SteelyardError('sign-in-failed');
 		throw failure ?? error;
 	}
 }
@@ -112,7 +121,10 @@ function only({ cookies }: RequestEvent, name: string): RequestEvent['cookies'] 
 }
 
 /** The session id in the request's cookie; null when there is none, or it isn't ours. Says nothing about the row. */
-export async function sessionIdOf(request: Request, { origin, secret }: AuthHouse): Promise<string | null> {
+export async function sessionIdOf(
+	request: Request,
+	{ origin, secret }: AuthHouse
+): Promise<string | null> {
 	const names = cookieNames(origin);
 	// Strangers, who are most, cost nothing here and get no cookie.
 	if (!request.headers.get('cookie')?.includes(names.session)) return null;

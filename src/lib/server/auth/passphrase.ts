@@ -13,7 +13,10 @@ let decoy: Promise<string> | undefined;
  * Whether the passphrase is right. With no hash (no such account, or one without a passphrase) it works just as long
  * on a decoy, so that the time taken tells nobody which addresses are known.
  */
-export async function passphraseFits(passphraseHash: string | null, passphrase: string): Promise<boolean> {
+export async function passphraseFits(
+	passphraseHash: string | null,
+	passphrase: string
+): Promise<boolean> {
 	decoy ??= hashPassphrase('a passphrase that nobody has');
 	const fits = await verify(passphraseHash ?? (await decoy), passphrase);
 	return fits && passphraseHash !== null;

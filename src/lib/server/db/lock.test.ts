@@ -27,9 +27,13 @@ async function holdElsewhere(): Promise<ChildProcess> {
 		process.stdout.write('held');
 		setInterval(() => {}, 1000);
 	`;
-	const child = spawn(process.execPath, ['--import', 'tsx', '--input-type=module', '--eval', script], {
-		stdio: ['ignore', 'pipe', 'inherit']
-	});
+	const child = spawn(
+		process.execPath,
+		['--import', 'tsx', '--input-type=module', '--eval', script],
+		{
+			stdio: ['ignore', 'pipe', 'inherit']
+		}
+	);
 	children.push(child);
 	await once(child.stdout!, 'data');
 	return child;
@@ -43,7 +47,9 @@ test('a second opener is refused with the holder’s process and what to do', as
 	expect((refusal as Error).message).toContain(`kill ${holder.pid}`);
 	expect((refusal as Error).message).toContain('STEELYARD_DATA_DIR');
 	// The holder is unharmed: its file is still there.
-	expect(JSON.parse(await readFile(join(folder, '.in-use'), 'utf8'))).toMatchObject({ pid: holder.pid });
+	expect(JSON.parse(await readFile(join(folder, '.in-use'), 'utf8'))).toMatchObject({
+		pid: holder.pid
+	});
 });
 
 test('a holder that was killed is taken over at once', async () => {
@@ -51,7 +57,9 @@ test('a holder that was killed is taken over at once', async () => {
 	holder.kill('SIGKILL');
 	await once(holder, 'exit');
 	const lock = await lockDataFolder(folder);
-	expect(JSON.parse(await readFile(join(folder, '.in-use'), 'utf8'))).toMatchObject({ pid: process.pid });
+	expect(JSON.parse(await readFile(join(folder, '.in-use'), 'utf8'))).toMatchObject({
+		pid: process.pid
+	});
 	await lock.release();
 });
 
@@ -65,7 +73,9 @@ test('the same process can’t take it twice, and can again after letting go', a
 
 test('two names for one folder are one folder', async () => {
 	const lock = await lockDataFolder(folder);
-	await expect(lockDataFolder(join(folder, '..', folder.split('/').at(-1)!, '.'))).rejects.toThrow(DataFolderInUse);
+	await expect(lockDataFolder(join(folder, '..', folder.split('/').at(-1)!, '.'))).rejects.toThrow(
+		DataFolderInUse
+	);
 	await lock.release();
 });
 
@@ -76,7 +86,10 @@ const leftBehind = async (holder: Record<string, unknown>) => {
 		JSON.stringify({
 			pid: process.pid,
 			startedTicks: '',
-			boot: await readFile('/proc/sys/kernel/random/boot_id', 'utf8').then((id) => id.trim(), () => ''),
+			boot: await readFile('/proc/sys/kernel/random/boot_id', 'utf8').then(
+				(id) => id.trim(),
+				() => ''
+			),
 			host: hostname(),
 			command: 'node build',
 			since: '2026-12-08T09:00:00.000Z',

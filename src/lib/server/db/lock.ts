@@ -149,7 +149,8 @@ async function readHolder(file: string): Promise<Holder | null> {
 		return Holder.parse(JSON.parse(await readFile(file, 'utf8')));
 	} catch (error) {
 		// No file, or one cut short by a crash: nobody to ask.
-		if (isCode(error, 'ENOENT') || error instanceof SyntaxError || error instanceof z.ZodError) return null;
+		if (isCode(error, 'ENOENT') || error instanceof SyntaxError || error instanceof z.ZodError)
+			return null;
 		throw error;
 	}
 }

@@ -30,8 +30,20 @@ interface DemoPiece {
 }
 
 const DEMO_PIECES: DemoPiece[] = [
-	{ slug: 'first-light-on-the-dial', document: firstLight, writer: 'tamsin', scientist: 'ama', editor: 'perpetua' },
-	{ slug: 'same-drop-same-blow', document: sameDrop, writer: 'tamsin', scientist: 'mateus', editor: 'perpetua' }
+	{
+		slug: 'first-light-on-the-dial',
+		document: firstLight,
+		writer: 'tamsin',
+		scientist: 'ama',
+		editor: 'perpetua'
+	},
+	{
+		slug: 'same-drop-same-blow',
+		document: sameDrop,
+		writer: 'tamsin',
+		scientist: 'mateus',
+		editor: 'perpetua'
+	}
 ];
 
 export async function seed(fixtures: Fixtures, what: Seed): Promise<void> {
@@ -44,7 +56,10 @@ export async function seed(fixtures: Fixtures, what: Seed): Promise<void> {
 async function seedPeople(fixtures: Fixtures): Promise<Record<Who, string>> {
 	const ids: [string, string][] = [];
 	for (const [who, person] of Object.entries(DEMO_PEOPLE)) {
-		const [known] = await fixtures.db.select({ id: people.id }).from(people).where(eq(people.email, person.email));
+		const [known] = await fixtures.db
+			.select({ id: people.id })
+			.from(people)
+			.where(eq(people.email, person.email));
 		const id =
 			known?.id ??
 			(await addPerson(unattended(fixtures), {
@@ -56,7 +71,11 @@ async function seedPeople(fixtures: Fixtures): Promise<Record<Who, string>> {
 	return Object.fromEntries(ids) as Record<Who, string>;
 }
 
-async function seedPiece(fixtures: Fixtures, ids: Record<Who, string>, piece: DemoPiece): Promise<void> {
+async function seedPiece(
+	fixtures: Fixtures,
+	ids: Record<Who, string>,
+	piece: DemoPiece
+): Promise<void> {
 	const { slug, document } = piece;
 	const writer = await as(fixtures, ids[piece.writer]);
 	const made = (await listPieces(writer)).some((summary) => summary.slug === slug);
@@ -76,7 +95,13 @@ async function seedPiece(fixtures: Fixtures, ids: Record<Who, string>, piece: De
 }
 
 function unattended(fixtures: Fixtures): Context {
-	return { ...fixtures, actor: null, session: null, client: { address: '', device: null }, now: new Date() };
+	return {
+		...fixtures,
+		actor: null,
+		session: null,
+		client: { address: '', device: null },
+		now: new Date()
+	};
 }
 
 /** As if this person sat at the desk, signed in this minute. */

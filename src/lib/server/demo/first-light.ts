@@ -81,7 +81,8 @@ export const firstLight: WidgetDocument = {
 				label: 'frequency'
 			},
 			bands: [{ from: 87.5, to: 108, label: 'FM radio, 87.5–108' }],
-			source: 'Growth of space from Planck Collaboration 2018 VI; the line from Hellwig and others 1970',
+			source:
+				'Growth of space from Planck Collaboration 2018 VI; the line from Hellwig and others 1970',
 			description:
 				'A line that climbs from the lower left to the upper right: the later a wave left, the higher the frequency at which it arrives. It crosses the FM radio band on its way.'
 		},

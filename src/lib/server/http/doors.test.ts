@@ -7,9 +7,12 @@ import { originRefusal } from './origin-check.ts';
 const OWN = 'http://localhost:4700';
 
 describe('where to go after signing in', () => {
-	test.each(['/desk', '/pieces/first-light/check', '/calculators/cosmo.at_z?x=1&y=%C3%BC'])('%s is ours', (path) => {
-		expect(ownPath(path, OWN, '/desk')).toBe(path);
-	});
+	test.each(['/desk', '/pieces/first-light/check', '/calculators/cosmo.at_z?x=1&y=%C3%BC'])(
+		'%s is ours',
+		(path) => {
+			expect(ownPath(path, OWN, '/desk')).toBe(path);
+		}
+	);
 	test.each([
 		null,
 		'',
@@ -33,10 +36,28 @@ describe('where to go after signing in', () => {
 });
 
 describe('a request that changes something', () => {
-	const types = [null, 'text/plain', 'application/json', 'multipart/form-data', 'application/x-www-form-urlencoded'];
-	const origins = { own: OWN, foreign: 'http://127.0.0.1:4701', null: 'null', 'same host, other port': 'http://localhost:4701' };
+	const types = [
+		null,
+		'text/plain',
+		'application/json',
+		'multipart/form-data',
+		'application/x-www-form-urlencoded'
+	];
+	const origins = {
+		own: OWN,
+		foreign: 'http://127.0.0.1:4701',
+		null: 'null',
+		'same host, other port': 'http://localhost:4701'
+	};
 	const cases = ['POST', 'PUT', 'PATCH', 'DELETE'].flatMap((method) =>
-		types.flatMap((type) => [...Object.entries(origins), ['absent', null] as const].map(([name, origin]) => ({ method, type, name, origin })))
+		types.flatMap((type) =>
+			[...Object.entries(origins), ['absent', null] as const].map(([name, origin]) => ({
+				method,
+				type,
+				name,
+				origin
+			}))
+		)
 	);
 	test.each(cases)('$method of $type from $name origin', ({ method, type, name, origin }) => {
 		const headers = new Headers();
@@ -52,7 +73,8 @@ describe('a request that changes something', () => {
 	});
 
 	test('reading needs no origin', () => {
-		for (const method of ['GET', 'HEAD', 'OPTIONS']) expect(originRefusal(new Request(OWN, { method }), OWN)).toBeNull();
+		for (const method of ['GET', 'HEAD', 'OPTIONS'])
+			expect(originRefusal(new Request(OWN, { method }), OWN)).toBeNull();
 	});
 });
 
@@ -71,7 +93,8 @@ test.each([
 
 describe('headers', () => {
 	const answer = { secure: true, personal: true, requestId: 'r' };
-	const of = (response: Response, over = {}) => withSecurityHeaders(response, { ...answer, ...over }).headers;
+	const of = (response: Response, over = {}) =>
+		withSecurityHeaders(response, { ...answer, ...over }).headers;
 
 	test('are on a redirect whose headers can’t be changed', () => {
 		const headers = of(Response.redirect(`${OWN}/sign-in`, 303));
@@ -82,18 +105,25 @@ describe('headers', () => {
 	});
 
 	test('keep a page’s own policy, and give JSON one that loads nothing', () => {
-		const page = new Response('', { headers: { 'content-type': 'text/html', 'content-security-policy': "script-src 'nonce-x'" } });
+		const page = new Response('', {
+			headers: { 'content-type': 'text/html', 'content-security-policy': "script-src 'nonce-x'" }
+		});
 		expect(of(page).get('content-security-policy')).toBe("script-src 'nonce-x'");
 		expect(of(page).get('content-type')).toBe('text/html; charset=utf-8');
 		expect(of(page).get('cross-origin-opener-policy')).toBe('same-origin');
 		const json = of(Response.json({}));
-		expect(json.get('content-security-policy')).toContain("default-src 'none'; frame-ancestors 'none'");
+		expect(json.get('content-security-policy')).toContain(
+			"default-src 'none'; frame-ancestors 'none'"
+		);
 		expect(json.get('content-type')).toBe('application/json; charset=utf-8');
 		expect(json.get('cache-control')).toBe('no-store');
 	});
 
 	test('leave a stranger’s page to be cached, and plain http without HSTS', () => {
-		const headers = of(new Response('', { headers: { 'content-type': 'text/html' } }), { personal: false, secure: false });
+		const headers = of(new Response('', { headers: { 'content-type': 'text/html' } }), {
+			personal: false,
+			secure: false
+		});
 		expect(headers.get('cache-control')).toBeNull();
 		expect(headers.get('strict-transport-security')).toBeNull();
 	});

@@ -37,5 +37,8 @@ export function apiFailure(thrown: unknown): Response {
 	const headers = new Headers();
 	const { retryAfterSeconds } = thrown.details;
 	if (typeof retryAfterSeconds === 'number') headers.set('Retry-After', String(retryAfterSeconds));
-	return Response.json({ error: failureOf(thrown) }, { status: explanations[thrown.code].status, headers });
+	return Response.json(
+		{ error: failureOf(thrown) },
+		{ status: explanations[thrown.code].status, headers }
+	);
 }

@@ -2,7 +2,8 @@
  * Security headers of everything SvelteKit answers. Pages get their policy, with its nonce, from svelte.config.js; what
  * is not a page may load nothing at all. Frames for partner pages never come through here: embed/serve.ts.
  */
-const NOT_A_PAGE = "default-src 'none'; frame-ancestors 'none'; base-uri 'none'; form-action 'none'";
+const NOT_A_PAGE =
+	"default-src 'none'; frame-ancestors 'none'; base-uri 'none'; form-action 'none'";
 
 const OFF = [
 	'accelerometer',
@@ -23,7 +24,9 @@ const OFF = [
 	'serial',
 	'usb'
 ];
-const PERMISSIONS_POLICY = [...OFF.map((feature) => `${feature}=()`), 'fullscreen=(self)'].join(', ');
+const PERMISSIONS_POLICY = [...OFF.map((feature) => `${feature}=()`), 'fullscreen=(self)'].join(
+	', '
+);
 
 export interface Answer {
 	secure: boolean;
@@ -47,7 +50,8 @@ export function withSecurityHeaders(response: Response, answer: Answer): Respons
 		set.push(['Referrer-Policy', page ? 'strict-origin-when-cross-origin' : 'no-referrer']);
 	}
 	if (page) set.push(['Cross-Origin-Opener-Policy', 'same-origin']);
-	if (!response.headers.has('content-security-policy')) set.push(['Content-Security-Policy', NOT_A_PAGE]);
+	if (!response.headers.has('content-security-policy'))
+		set.push(['Content-Security-Policy', NOT_A_PAGE]);
 	if (answer.secure) set.push(['Strict-Transport-Security', 'max-age=63072000; includeSubDomains']);
 	if (answer.personal) set.push(['Cache-Control', 'no-store']);
 	if (/^(text\/|application\/json)/.test(type) && !/charset=/i.test(type)) {
@@ -57,7 +61,11 @@ export function withSecurityHeaders(response: Response, answer: Answer): Respons
 	const writable = isWritable(response) ? response : new Response(response.body, response);
 	for (const [name, value] of set) {
 		// The public API opens itself to other origins; everything else stays closed.
-		if (name === 'Cross-Origin-Resource-Policy' && writable.headers.has('access-control-allow-origin')) continue;
+		if (
+			name === 'Cross-Origin-Resource-Policy' &&
+			writable.headers.has('access-control-allow-origin')
+		)
+			continue;
 		writable.headers.set(name, value);
 	}
 	return writable;

@@ -12,32 +12,45 @@ const post = (body: BodyInit | null, type: string | null = 'application/json') =
 const refused = (code: string, words: RegExp) =>
 	expect.objectContaining({
 		code,
-		details: expect.objectContaining({ issues: [expect.objectContaining({ message: expect.stringMatching(words) })] })
+		details: expect.objectContaining({
+			issues: [expect.objectContaining({ message: expect.stringMatching(words) })]
+		})
 	});
 
 test('JSON comes through', async () => {
-	expect(await readJson(post('{"a":[1,"ü"]}', 'application/json; charset=utf-8'))).toEqual({ a: [1, 'ü'] });
+	expect(await readJson(post('{"a":[1,"ü"]}', 'application/json; charset=utf-8'))).toEqual({
+		a: [1, 'ü']
+	});
 });
 
 test.each([null, 'text/plain', 'application/x-www-form-urlencoded', 'application/jsonp'])(
 	'the content type %s is refused',
 	async (type) => {
-		await expect(readJson(post('{}', type))).rejects.toEqual(refused('input-broken', /application\/json/));
+		await expect(readJson(post('{}', type))).rejects.toEqual(
+			refused('input-broken', /application\/json/)
+		);
 	}
 );
 
-test.each(['', '{', '{"a":NaN}', '{"a":Infinity}', '{"a":1,}', "{'a':1}", '\u0000'])('%j is no JSON', async (body) => {
-	await expect(readJson(post(body))).rejects.toEqual(refused('input-broken', /JSON/));
-});
+test.each(['', '{', '{"a":NaN}', '{"a":Infinity}', '{"a":1,}', "{'a':1}", '\u0000'])(
+	'%j is no JSON',
+	async (body) => {
+		await expect(readJson(post(body))).rejects.toEqual(refused('input-broken', /JSON/));
+	}
+);
 
 test('bytes that aren’t UTF-8 are refused', async () => {
-	await expect(readJson(post(new Uint8Array([0x22, 0xff, 0x22])))).rejects.toEqual(refused('input-broken', /UTF-8/));
+	await expect(readJson(post(new Uint8Array([0x22, 0xff, 0x22])))).rejects.toEqual(
+		refused('input-broken', /UTF-8/)
+	);
 });
 
 test('a hundred thousand levels are refused quickly, 32 are taken', async () => {
 	const nested = (levels: number) => '['.repeat(levels) + ']'.repeat(levels);
 	const start = performance.now();
-	await expect(readJson(post(nested(100_000)))).rejects.toEqual(refused('input-broken', /32 levels/));
+	await expect(readJson(post(nested(100_000)))).rejects.toEqual(
+		refused('input-broken', /32 levels/)
+	);
 	expect(performance.now() - start).toBeLessThan(500);
 	await expect(readJson(post(nested(33)))).rejects.toEqual(refused('input-broken', /32 levels/));
 	await expect(readJson(post(nested(32)))).resolves.toBeDefined();
@@ -82,7 +95,9 @@ test('a body of another shape names each issue by its path', () => {
 	expect(() => shaped(Shape, { baseVersion: 'x', extra: 1 })).toThrow(
 		expect.objectContaining({
 			code: 'input-broken',
-			details: { issues: expect.arrayContaining([expect.objectContaining({ path: 'baseVersion' })]) }
+			details: {
+				issues: expect.arrayContaining([expect.objectContaining({ path: 'baseVersion' })])
+			}
 		})
 	);
 });

@@ -8,13 +8,16 @@ const DEEPEST = 32;
 /** Throws `input-broken` or `too-large`, never a parser's error. */
 export async function readJson(request: Request): Promise<unknown> {
 	const type = request.headers.get('content-type')?.split(';')[0]?.trim().toLowerCase();
-	if (type !== 'application/json') throw broken('Send JSON, with the content type application/json.');
+	if (type !== 'application/json')
+		throw broken('Send JSON, with the content type application/json.');
 	const text = await readText(request);
 	if (depthOf(text) > DEEPEST) throw broken(`This is nested deeper than ${DEEPEST} levels.`);
 	try {
 		return JSON.parse(text) as unknown;
 	} catch (error) {
-		throw broken(`This isn’t JSON: ${error instanceof Error ? error.message : 'it can’t be read'}.`);
+		throw broken(
+			`This isn’t JSON: ${error instanceof Error ? error.message : 'it can’t be read'}.`
+		);
 	}
 }
 
@@ -24,7 +27,8 @@ function broken(message: string): SteelyardError {
 
 /** The body as text; stops reading at the limit, whatever Content-Length says. */
 async function readText(request: Request): Promise<string> {
-	if (Number(request.headers.get('content-length')) > BODY_LIMIT_BYTES) throw new SteelyardError('too-large');
+	if (Number(request.headers.get('content-length')) > BODY_LIMIT_BYTES)
+		throw new SteelyardError('too-large');
 	const chunks: Uint8Array[] = [];
 	let size = 0;
 	try {
@@ -35,7 +39,8 @@ async function readText(request: Request): Promise<string> {
 		}
 	} catch (error) {
 		// The server has a limit of its own, which ends the stream with a 413.
-		if (error instanceof Error && 'status' in error && error.status === 413) throw new SteelyardError('too-large');
+		if (error instanceof Error && 'status' in error && error.status === 413)
+			throw new SteelyardError('too-large');
 		throw error;
 	}
 	try {

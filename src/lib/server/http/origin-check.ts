@@ -11,5 +11,7 @@ export function originRefusal(request: Request, own: string): string | null {
 		return 'This must be sent from a page of this house.';
 	}
 	const site = request.headers.get('sec-fetch-site');
-	return site === null || site === 'same-origin' ? null : 'This must be sent from a page of this house.';
+	return site === null || site === 'same-origin'
+		? null
+		: 'This must be sent from a page of this house.';
 }

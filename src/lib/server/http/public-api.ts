@@ -3,7 +3,10 @@ import { explanations, SteelyardError } from '../../errors.ts';
 
 const OPEN = { 'access-control-allow-origin': '*' };
 
-export function publicJson(body: unknown, init: { status?: number; headers?: Record<string, string> } = {}): Response {
+export function publicJson(
+	body: unknown,
+	init: { status?: number; headers?: Record<string, string> } = {}
+): Response {
 	return Response.json(body, { status: init.status ?? 200, headers: { ...OPEN, ...init.headers } });
 }
 
@@ -26,5 +29,8 @@ export function publicRefusal(thrown: unknown): Response {
 	const { status, message, help } = explanations[thrown.code];
 	const issues = Array.isArray(thrown.details.issues) ? thrown.details.issues : [];
 	const told = issues.map((issue: { message: string }) => issue.message).join(' ');
-	return publicJson({ refused: { code: thrown.code, message: told || `${message} ${help}` } }, { status });
+	return publicJson(
+		{ refused: { code: thrown.code, message: told || `${message} ${help}` } },
+		{ status }
+	);
 }

@@ -10,11 +10,20 @@ import { queueMail, type Mail } from '../mail/outbox.ts';
 import { openMailTransport, type MailTransport } from '../mail/transport.ts';
 import { drainOutbox, messageId, startSender, type SenderParts } from './sender.ts';
 
-const HOUSE = { name: 'Varrowmere Institute, Public Desk', origin: 'https://desk.varrowmere.example', secret: 's'.repeat(40) };
+const HOUSE = {
+	name: 'Varrowmere Institute, Public Desk',
+	origin: 'https://desk.varrowmere.example',
+	secret: 's'.repeat(40)
+};
 const TAMSIN = { name: 'Tamsin Orrelby', email: 'tamsin@varrowmere.example' };
 const QUERY: Mail = {
 	event: 'query-raised',
-	input: { slug: 'first-light-on-the-dial', title: 'First light on the dial', by: 'Dr Mateus Quevarro', claim: '2b' }
+	input: {
+		slug: 'first-light-on-the-dial',
+		title: 'First light on the dial',
+		by: 'Dr Mateus Quevarro',
+		claim: '2b'
+	}
 };
 
 let database: TestDatabase;
@@ -28,7 +37,11 @@ beforeAll(async () => {
 	database = await openTestDatabase();
 	folder = await mkdtemp(join(tmpdir(), 'steelyard-mail-'));
 	tray = await startMail({ smtpPort: 0, trayPort: 0, folder });
-	transport = openMailTransport({ smtpUrl: tray.smtpUrl, from: 'desk@varrowmere.example', houseName: HOUSE.name });
+	transport = openMailTransport({
+		smtpUrl: tray.smtpUrl,
+		from: 'desk@varrowmere.example',
+		houseName: HOUSE.name
+	});
 });
 afterAll(async () => {
 	transport.close();
@@ -73,7 +86,9 @@ test('a letter goes out once, as text and HTML, to one mailbox, under its row’
 		subject: 'Query on 2b: First light on the dial',
 		messageId: messageId(row!.id, HOUSE.origin)
 	});
-	expect(letter!.text).toContain('https://desk.varrowmere.example/pieces/first-light-on-the-dial/check');
+	expect(letter!.text).toContain(
+		'https://desk.varrowmere.example/pieces/first-light-on-the-dial/check'
+	);
 	expect(letter!.html).toContain('Dr Mateus Quevarro');
 	expect(row!.sentAt).toEqual(now);
 });
@@ -81,7 +96,12 @@ test('a letter goes out once, as text and HTML, to one mailbox, under its row’
 test('nothing from a name or a title becomes markup or a header', async () => {
 	await queue({
 		event: 'query-answered',
-		input: { slug: 'x', title: 'A <b>bold</b>\r\nBcc: spy@elsewhere.example', by: '"><svg onload=x>', claim: '1a' }
+		input: {
+			slug: 'x',
+			title: 'A <b>bold</b>\r\nBcc: spy@elsewhere.example',
+			by: '"><svg onload=x>',
+			claim: '1a'
+		}
 	});
 	await drain();
 	const [letter] = tray.letters();
@@ -91,16 +111,17 @@ test('nothing from a name or a title becomes markup or a header', async () => {
 	expect(letter!.html).toContain('&lt;svg onload=x&gt;');
 });
 
-test.each(['a@varrowmere.example\r\nBcc: x@elsewhere.example', 'a@varrowmere.example, x@elsewhere.example', 'A <x@elsewhere.example>'])(
-	'an address that isn’t one plain mailbox is never sent to: %j',
-	async (email) => {
-		const before = tray.letters().length;
-		await queue(QUERY, { name: 'A', email });
-		await drain();
-		expect(tray.letters()).toHaveLength(before);
-		expect((await rows())[0]!.sentAt).toBeNull();
-	}
-);
+test.each([
+	'a@varrowmere.example\r\nBcc: x@elsewhere.example',
+	'a@varrowmere.example, x@elsewhere.example',
+	'A <x@elsewhere.example>'
+])('an address that isn’t one plain mailbox is never sent to: %j', async (email) => {
+	const before = tray.letters().length;
+	await queue(QUERY, { name: 'A', email });
+	await drain();
+	expect(tray.letters()).toHaveLength(before);
+	expect((await rows())[0]!.sentAt).toBeNull();
+});
 
 test('the link in the mail holds the token, which is nowhere in the row', async () => {
 	await queue({ event: 'sign-in-link', input: { linkId: 'a-link' } });
@@ -114,7 +135,11 @@ describe('when the mail server refuses', () => {
 	test('the row waits, longer each time, and goes out when the server is back', async () => {
 		await queue();
 		await drain({ transport: refusing });
-		expect((await rows())[0]).toMatchObject({ attempts: 1, sentAt: null, lastError: '451 try again later' });
+		expect((await rows())[0]).toMatchObject({
+			attempts: 1,
+			sentAt: null,
+			lastError: '451 try again later'
+		});
 		await drain(); // not due yet
 		expect((await rows())[0]!.sentAt).toBeNull();
 		later(5);

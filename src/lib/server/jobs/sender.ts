@@ -88,12 +88,18 @@ async function lease(db: Db, now: Date): Promise<OutboxRow[]> {
 		.returning();
 }
 
-async function deliver({ db, house, transport, clock, report }: SenderParts, row: OutboxRow): Promise<void> {
+async function deliver(
+	{ db, house, transport, clock, report }: SenderParts,
+	row: OutboxRow
+): Promise<void> {
 	const mine = eq(outbox.id, row.id);
 	try {
 		const letter = renderMail(house, row);
 		await transport.send(
-			{ messageId: messageId(row.id, house.origin), to: { name: row.toName, address: row.toAddress } },
+			{
+				messageId: messageId(row.id, house.origin),
+				to: { name: row.toName, address: row.toAddress }
+			},
 			letter
 		);
 		await db.update(outbox).set({ sentAt: clock(), leaseUntil: null, lastError: null }).where(mine);
@@ -110,7 +116,9 @@ async function deliver({ db, house, transport, clock, report }: SenderParts, row
 				parkedAt: parked ? now : null
 			})
 			.where(mine);
-		report(`Mail ${row.id} (${row.event}) ${parked ? 'was given up' : 'will be tried again'}: ${reason(error)}`);
+		report(
+			`Mail ${row.id} (${row.event}) ${parked ? 'was given up' : 'will be tried again'}: ${reason(error)}`
+		);
 	}
 }
 

@@ -17,7 +17,11 @@ export interface MailTransport {
 const Mailbox = z.email();
 
 /** `smtpUrl` as in smtp://host:port; `from` is one plain address. */
-export function openMailTransport(settings: { smtpUrl: string; from: string; houseName: string }): MailTransport {
+export function openMailTransport(settings: {
+	smtpUrl: string;
+	from: string;
+	houseName: string;
+}): MailTransport {
 	const server = new URL(settings.smtpUrl);
 	const secure = server.protocol === 'smtps:';
 	const smtp = createTransport({

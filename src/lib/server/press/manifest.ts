@@ -31,6 +31,9 @@ export async function readManifest(pressFolder: string): Promise<PressManifest> 
 	try {
 		return PressManifest.parse(JSON.parse(await readFile(join(pressFolder, MANIFEST), 'utf8')));
 	} catch (cause) {
-		throw new Error(`${pressFolder} holds no build of the reader’s frame. Make one: npm run build`, { cause });
+		throw new Error(
+			`${pressFolder} holds no build of the reader’s frame. Make one: npm run build`,
+			{ cause }
+		);
 	}
 }

@@ -8,6 +8,8 @@ import { catalogue } from '../../physics/calculators/index.ts';
 import type { ClaimRecords } from '../../renderer/records.ts';
 import Frame from '../../renderer/Frame.svelte';
 import type { FrameRelease } from '../../renderer/release.ts';
+import type { WidgetDocument } from '../../widget/document.ts';
+import { sampleChart, type ChartPoint } from '../../widget/evaluate.ts';
 import { canonicalJson, type Frozen } from '../../widget/freeze.ts';
 import type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
 import { readManifest, type PressManifest } from './manifest.ts';
@@ -56,7 +58,8 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		origin: input.origin ?? '',
 		document: frozen.document,
 		digest: frozen.digest,
-		records: input.records
+		records: input.records,
+		curves: curvesOf(frozen.document)
 	};
 	const calculators = new Map(used.map((calculator) => [calculator.id, calculator]));
 	const address = (name: string) => `/press/${name}`;
@@ -67,7 +70,9 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		script: address(press.frame.file),
 		ahead: namesOf([{ file: '', imports: press.frame.imports }, ...scripts]).map(address),
 		copyFace: address(press.copyFace),
-		calculators: Object.fromEntries(used.map(({ id }, index) => [id, address(scripts[index]?.file ?? '')]))
+		calculators: Object.fromEntries(
+			used.map(({ id }, index) => [id, address(scripts[index]?.file ?? '')])
+		)
 	});
 
 	const page = contentFile('frames', 'html', 'text/html; charset=utf-8', html);
@@ -77,12 +82,36 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		'application/json; charset=utf-8',
 		canonicalJson({ version: 1, release, frozen, makers: input.makers })
 	);
-	const assets = namesOf([press.frame, ...scripts, { file: '', imports: [...press.later, ...press.fonts] }]);
-	const files = [page, record, ...(await Promise.all(assets.map((name) => pressFile(pressFolder, name))))];
+	const assets = namesOf([
+		press.frame,
+		...scripts,
+		{ file: '', imports: [...press.later, ...press.fonts] }
+	]);
+	const files = [
+		page,
+		record,
+		...(await Promise.all(assets.map((name) => pressFile(pressFolder, name))))
+	];
 	return { digest: page.sha256, files, manifest: manifestOf(release, page, css, files) };
 }
 
-function manifestOf(release: FrameRelease, page: BundleFile, css: string, files: BundleFile[]): BundleManifest {
+/** Figures kept of a drawn line: a thousandth of a pixel in any frame. */
+const CURVE_FIGURES = 7;
+
+function curvesOf(document: WidgetDocument): FrameRelease['curves'] {
+	const charts = document.blocks.filter((block) => block.kind === 'chart');
+	const rounded = ({ y }: ChartPoint) => (y === null ? null : Number(y.toPrecision(CURVE_FIGURES)));
+	return Object.fromEntries(
+		charts.map((chart) => [chart.id, sampleChart(document, {}, chart, catalogue).map(rounded)])
+	);
+}
+
+function manifestOf(
+	release: FrameRelease,
+	page: BundleFile,
+	css: string,
+	files: BundleFile[]
+): BundleManifest {
 	return {
 		version: 1,
 		slug: release.slug,
@@ -103,7 +132,8 @@ function calculatorOf(id: string): Calculator {
 
 function scriptOf(press: PressManifest, { id }: Calculator): PressManifest['frame'] {
 	const script = press.calculators[id];
-	if (!script) throw new Error(`The frame’s build has no calculator ${id}. Build again: npm run build`);
+	if (!script)
+		throw new Error(`The frame’s build has no calculator ${id}. Build again: npm run build`);
 	return script;
 }
 
@@ -124,7 +154,12 @@ async function pressFile(pressFolder: string, name: string): Promise<BundleFile>
 	return { key: `press/${name}`, contentType, bytes, sha256: sha256Hex(bytes) };
 }
 
-function contentFile(folder: string, ending: string, contentType: string, text: string): BundleFile {
+function contentFile(
+	folder: string,
+	ending: string,
+	contentType: string,
+	text: string
+): BundleFile {
 	const bytes = Buffer.from(text, 'utf8');
 	const sha256 = sha256Hex(bytes);
 	return { key: `${folder}/${sha256}.${ending}`, contentType, bytes, sha256 };

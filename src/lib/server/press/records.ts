@@ -50,7 +50,10 @@ export function recordsOf(
 				claim.id,
 				{
 					beam: picture ? { picture, words, reads: readsOnBeam(stated, reading) } : null,
-					says: stated && reading ? verdictSentence(stated, reading, verdict, 'reader', words) : verdict.reason,
+					says:
+						stated && reading
+							? verdictSentence(stated, reading, verdict, 'reader', words)
+							: verdict.reason,
 					checkedBy: checkersOf(claim.id, signings),
 					...groundsOf(document, claim, calculators)
 				}
@@ -80,7 +83,9 @@ function groundsOf(
 	const methods = used.flatMap(({ sources }) => sources.slice(0, 1).map(sourceWords));
 	return {
 		restsOn: [...new Set([...given, ...methods])],
-		working: [...new Set(used.flatMap(({ equations }) => equations.slice(0, 1).map(({ says }) => says)))]
+		working: [
+			...new Set(used.flatMap(({ equations }) => equations.slice(0, 1).map(({ says }) => says)))
+		]
 	};
 }
 
@@ -90,7 +95,8 @@ function valueSource(setting: SettingSource): string[] {
 		const line = lineById(setting.line);
 		return line ? [`${line.label}: ${line.source}`] : [];
 	}
-	const set = setting.from === 'fixed' && typeof setting.value === 'object' ? setting.value.set : undefined;
+	const set =
+		setting.from === 'fixed' && typeof setting.value === 'object' ? setting.value.set : undefined;
 	return typeof set === 'string' && isSetName(set) ? [cosmologySets[set].source] : [];
 }
 
@@ -99,7 +105,10 @@ function isSetName(name: string): name is keyof typeof cosmologySets {
 }
 
 /** A setting rests on where it came from, not on the calculator that takes it. */
-function settingGrounds(document: WidgetDocument, ref: { step: string; setting: string }): string[] {
+function settingGrounds(
+	document: WidgetDocument,
+	ref: { step: string; setting: string }
+): string[] {
 	const setting = document.steps.find(({ id }) => id === ref.step)?.settings[ref.setting];
 	if (!setting) return [];
 	return setting.from === 'line' ? valueSource(setting) : ['the writer’s choice'];

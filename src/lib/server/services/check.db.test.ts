@@ -29,13 +29,18 @@ describe('pulling a proof', () => {
 	test('wants a complete piece, and lists what is missing', async () => {
 		await desk.create();
 		await expect(desk.pull()).rejects.toEqual(
-			code('proof-not-ready', { findings: expect.arrayContaining([expect.objectContaining({ code: 'no-copy' })]) })
+			code('proof-not-ready', {
+				findings: expect.arrayContaining([expect.objectContaining({ code: 'no-copy' })])
+			})
 		);
 	});
 
 	test('twice from one draft gives one proof; after a change, the next', async () => {
 		const first = await desk.toProof();
-		expect(await pullProof(await office.as(desk.writer), SLUG)).toEqual({ proofId: first, number: 1 });
+		expect(await pullProof(await office.as(desk.writer), SLUG)).toEqual({
+			proofId: first,
+			number: 1
+		});
 		await desk.edit((document) => reword(document, 'opening', 'faint', 'feeble'));
 		expect(await pullProof(await office.as(desk.writer), SLUG)).toMatchObject({ number: 2 });
 	});
@@ -59,7 +64,12 @@ describe('pulling a proof', () => {
 });
 
 describe('a signature lapses when what it covers changes, and only then', () => {
-	const all = (state: string) => ({ 'rest-frequency': state, stretch: state, frequency: state, crest: state });
+	const all = (state: string) => ({
+		'rest-frequency': state,
+		stretch: state,
+		frequency: state,
+		crest: state
+	});
 	beforeEach(() => desk.toChecked());
 	const afterEdit = async (change: Parameters<Desk['edit']>[0]) => {
 		await desk.edit(change);
@@ -72,14 +82,22 @@ describe('a signature lapses when what it covers changes, and only then', () => 
 	});
 
 	test('one character of a signed sentence: that claim alone', async () => {
-		expect(await afterEdit((document) => reword(document, 'opening', 'a faint radio wave', 'a feint radio wave'))).toEqual({
+		expect(
+			await afterEdit((document) =>
+				reword(document, 'opening', 'a faint radio wave', 'a feint radio wave')
+			)
+		).toEqual({
 			...all('signed'),
 			'rest-frequency': 'lapsed'
 		});
 	});
 
 	test('a comma counts', async () => {
-		expect(await afterEdit((document) => reword(document, 'opening', ' as long as it set out.', ', as long as it set out.'))).toEqual({
+		expect(
+			await afterEdit((document) =>
+				reword(document, 'opening', ' as long as it set out.', ', as long as it set out.')
+			)
+		).toEqual({
 			...all('signed'),
 			stretch: 'lapsed'
 		});
@@ -89,7 +107,8 @@ describe('a signature lapses when what it covers changes, and only then', () => 
 		expect(
 			await afterEdit((document) => {
 				for (const inline of contentOf(document, 'opening')) {
-					if (inline.kind === 'claim' && inline.claim === 'stretch') inline.text = 'nearly 21 times';
+					if (inline.kind === 'claim' && inline.claim === 'stretch')
+						inline.text = 'nearly 21 times';
 				}
 			})
 		).toEqual({ ...all('signed'), stretch: 'lapsed' });
@@ -101,7 +120,12 @@ describe('a signature lapses when what it covers changes, and only then', () => 
 				const age = document.steps.find(({ id }) => id === 'age');
 				age!.settings.cosmology = { from: 'fixed', value: { set: 'Planck15' } };
 			})
-		).toMatchObject({ stretch: 'lapsed', frequency: 'lapsed', crest: 'lapsed', 'rest-frequency': 'signed' });
+		).toMatchObject({
+			stretch: 'lapsed',
+			frequency: 'lapsed',
+			crest: 'lapsed',
+			'rest-frequency': 'signed'
+		});
 	});
 
 	test('where the slider starts: the claims it reaches', async () => {
@@ -123,21 +147,27 @@ describe('a signature lapses when what it covers changes, and only then', () => 
 
 	test('put back as it was, the old signature holds again', async () => {
 		await afterEdit((document) => reword(document, 'opening', 'faint', 'feeble'));
-		expect(await afterEdit((document) => reword(document, 'opening', 'feeble', 'faint'))).toEqual(all('signed'));
+		expect(await afterEdit((document) => reword(document, 'opening', 'feeble', 'faint'))).toEqual(
+			all('signed')
+		);
 	});
 
 	test('the signer is told apart from the sentence that changed', async () => {
 		await afterEdit((document) => reword(document, 'opening', 'faint', 'feeble'));
 		const claim = (await desk.piece()).proof!.claims.find(({ id }) => id === 'rest-frequency')!;
 		expect(claim.sentence).toContain('feeble');
-		expect(claim.signatures).toMatchObject([{ inForce: false, proofNumber: 1, by: { name: 'Mateus Quevarro' } }]);
+		expect(claim.signatures).toMatchObject([
+			{ inForce: false, proofNumber: 1, by: { name: 'Mateus Quevarro' } }
+		]);
 		expect(claim.signatures[0]!.sentence).toContain('faint');
 	});
 
 	test('taken back by its signer, and by nobody else', async () => {
 		const signature = (await desk.piece()).proof!.claims[0]!.signatures[0]!;
 		const ama = await office.add('Ama Tindleforth', ['scientist']);
-		await expect(takeBackSignature(await office.as(ama), SLUG, { signatureId: signature.id })).rejects.toEqual(code('not-permitted'));
+		await expect(
+			takeBackSignature(await office.as(ama), SLUG, { signatureId: signature.id })
+		).rejects.toEqual(code('not-permitted'));
 		await takeBackSignature(await office.as(desk.scientist), SLUG, { signatureId: signature.id });
 		expect((await desk.states())[signature.claim]).toBe('unsigned');
 	});
@@ -145,7 +175,10 @@ describe('a signature lapses when what it covers changes, and only then', () => 
 	test('signing again what one has signed changes nothing', async () => {
 		const { proof } = await desk.piece();
 		const first = proof!.claims[0]!;
-		const again = await signClaim(await office.as(desk.scientist), SLUG, { proofId: proof!.id, claim: first.id });
+		const again = await signClaim(await office.as(desk.scientist), SLUG, {
+			proofId: proof!.id,
+			claim: first.id
+		});
 		expect(again.signatureId).toBe(first.signatures[0]!.id);
 	});
 });
@@ -156,7 +189,9 @@ describe('signing', () => {
 		const ctx = await office.as(desk.scientist);
 		office.wait(16);
 		const later = { ...ctx, now: office.now };
-		await expect(signClaim(later, SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(code('confirm-needed'));
+		await expect(signClaim(later, SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(
+			code('confirm-needed')
+		);
 	});
 
 	test('a claim that tips can’t be signed', async () => {
@@ -165,7 +200,9 @@ describe('signing', () => {
 			if (inline.kind === 'claim' && inline.claim === 'stretch') inline.text = 'about 42 times';
 		}
 		const proofId = await desk.toProof(tipping);
-		await expect(signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(code('claim-tips'));
+		await expect(
+			signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' })
+		).rejects.toEqual(code('claim-tips'));
 	});
 
 	test('a claim without a number to weigh can’t be signed', async () => {
@@ -174,40 +211,66 @@ describe('signing', () => {
 			if (inline.kind === 'claim' && inline.claim === 'stretch') inline.text = 'ever so much';
 		}
 		const proofId = await desk.toProof(wordless);
-		await expect(signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(code('claim-unweighed'));
+		await expect(
+			signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' })
+		).rejects.toEqual(code('claim-unweighed'));
 	});
 
 	test('a claim that isn’t there is not found', async () => {
 		const proofId = await desk.toProof();
-		await expect(signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'no-such' })).rejects.toEqual(code('not-found'));
+		await expect(
+			signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'no-such' })
+		).rejects.toEqual(code('not-found'));
 	});
 });
 
 describe('a query', () => {
 	const ask = async (by = desk.scientist) => {
 		const { proof } = await desk.piece();
-		return raiseQuery(await office.as(by), SLUG, { proofId: proof!.id, claim: 'stretch', question: 'Since when, exactly?' });
+		return raiseQuery(await office.as(by), SLUG, {
+			proofId: proof!.id,
+			claim: 'stretch',
+			question: 'Since when, exactly?'
+		});
 	};
-	const thread = async () => (await desk.piece()).proof!.claims.find(({ id }) => id === 'stretch')!.queries;
+	const thread = async () =>
+		(await desk.piece()).proof!.claims.find(({ id }) => id === 'stretch')!.queries;
 
 	test('is asked, answered and closed; meanwhile the claim can’t be signed', async () => {
 		const proofId = await desk.toProof();
 		const { queryId } = await ask();
 		expect((await desk.states()).stretch).toBe('queried');
-		expect(await desk.piece()).toMatchObject({ working: 'queried', heldBy: { personId: desk.writer } });
-		const sign = async () => signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' });
+		expect(await desk.piece()).toMatchObject({
+			working: 'queried',
+			heldBy: { personId: desk.writer }
+		});
+		const sign = async () =>
+			signClaim(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch' });
 		await expect(sign()).rejects.toEqual(code('query-open'));
 
-		await answerQuery(await office.as(desk.writer), SLUG, { queryId, answer: 'Since 180 million years.' });
-		expect(await desk.piece()).toMatchObject({ working: 'queried', heldBy: { personId: desk.scientist } });
+		await answerQuery(await office.as(desk.writer), SLUG, {
+			queryId,
+			answer: 'Since 180 million years.'
+		});
+		expect(await desk.piece()).toMatchObject({
+			working: 'queried',
+			heldBy: { personId: desk.scientist }
+		});
 		await expect(sign()).rejects.toEqual(code('query-open'));
 		await closeQuery(await office.as(desk.scientist), SLUG, { queryId });
 		await sign();
 		expect((await desk.states()).stretch).toBe('signed');
 		expect(await thread()).toMatchObject([
-			{ question: 'Since when, exactly?', answer: 'Since 180 million years.', askedBy: { personId: desk.scientist }, answeredBy: { personId: desk.writer } }
+			{
+				question: 'Since when, exactly?',
+				answer: 'Since 180 million years.',
+				askedBy: { personId: desk.scientist },
+				answeredBy: { personId: desk.writer }
+			}
 		]);
-		await expect(answerQuery(await office.as(desk.writer), SLUG, { queryId, answer: 'More.' })).rejects.toEqual(code('query-closed'));
+		await expect(
+			answerQuery(await office.as(desk.writer), SLUG, { queryId, answer: 'More.' })
+		).rejects.toEqual(code('query-closed'));
 	});
 
 	test('stays open on the next proof, until it is closed', async () => {
@@ -221,7 +284,9 @@ describe('a query', () => {
 	test('can’t be closed by the writer who was asked', async () => {
 		await desk.toProof();
 		const { queryId } = await ask();
-		await expect(closeQuery(await office.as(desk.writer), SLUG, { queryId })).rejects.toEqual(code('not-permitted'));
+		await expect(closeQuery(await office.as(desk.writer), SLUG, { queryId })).rejects.toEqual(
+			code('not-permitted')
+		);
 		await closeQuery(await office.as(desk.editor), SLUG, { queryId });
 	});
 
@@ -244,10 +309,18 @@ describe('a query', () => {
 	test('a query that fails queues no mail', async () => {
 		const proofId = await desk.toProof();
 		await expect(
-			raiseQuery(await office.as(desk.scientist), SLUG, { proofId, claim: 'no-such', question: 'Why?' })
+			raiseQuery(await office.as(desk.scientist), SLUG, {
+				proofId,
+				claim: 'no-such',
+				question: 'Why?'
+			})
 		).rejects.toEqual(code('not-found'));
 		await expect(
-			raiseQuery(await office.as(desk.scientist), SLUG, { proofId, claim: 'stretch', question: 'W\u0000hy?' })
+			raiseQuery(await office.as(desk.scientist), SLUG, {
+				proofId,
+				claim: 'stretch',
+				question: 'W\u0000hy?'
+			})
 		).rejects.toEqual(code('input-broken'));
 		expect(await office.db.select().from(outbox)).toEqual([]);
 	});
@@ -265,19 +338,30 @@ describe('passing', () => {
 	test('wants every claim signed, and says which aren’t and what to do', async () => {
 		const proofId = await desk.toProof();
 		expect(await open()).toMatchObject([
-			{ side: 'claims', says: '4 claims are not signed: 1a, 1b, 2a, 2b.', mend: expect.stringContaining('scientist') },
+			{
+				side: 'claims',
+				says: '4 claims are not signed: 1a, 1b, 2a, 2b.',
+				mend: expect.stringContaining('scientist')
+			},
 			{ side: 'people' }
 		]);
 		await expect(desk.pass(proofId)).rejects.toEqual(code('conditions-open'));
 		await desk.signAll();
 		expect(await open()).toEqual([]);
 		await desk.pass(proofId);
-		expect(await desk.piece()).toMatchObject({ working: 'passed', proof: { passedBy: { personId: desk.editor } } });
+		expect(await desk.piece()).toMatchObject({
+			working: 'passed',
+			proof: { passedBy: { personId: desk.editor } }
+		});
 	});
 
 	test('an open query stands in the way', async () => {
 		const proofId = await desk.toChecked();
-		await raiseQuery(await office.as(desk.writer), SLUG, { proofId, claim: 'crest', question: 'Is it?' });
+		await raiseQuery(await office.as(desk.writer), SLUG, {
+			proofId,
+			claim: 'crest',
+			question: 'Is it?'
+		});
 		expect(await open()).toMatchObject([{ side: 'claims', says: 'A query is open on 2b.' }]);
 		await expect(desk.pass(proofId)).rejects.toEqual(code('conditions-open'));
 	});
@@ -286,7 +370,9 @@ describe('passing', () => {
 		const proofId = await desk.toChecked();
 		const ctx = await office.as(desk.editor);
 		office.wait(16);
-		await expect(passProof({ ...ctx, now: office.now }, SLUG, { proofId })).rejects.toEqual(code('confirm-needed'));
+		await expect(passProof({ ...ctx, now: office.now }, SLUG, { proofId })).rejects.toEqual(
+			code('confirm-needed')
+		);
 	});
 
 	test('drops when a signature is taken back or a query raised', async () => {
@@ -297,13 +383,19 @@ describe('passing', () => {
 		expect((await desk.piece()).proof!.passedBy).toBeNull();
 		await desk.signAll();
 		await desk.pass(proofId);
-		await raiseQuery(await office.as(desk.scientist), SLUG, { proofId, claim: 'crest', question: 'Is it?' });
+		await raiseQuery(await office.as(desk.scientist), SLUG, {
+			proofId,
+			claim: 'crest',
+			question: 'Is it?'
+		});
 		expect(await desk.piece()).toMatchObject({ working: 'queried', proof: { passedBy: null } });
 	});
 
 	test('leaves a trail in the daybook, in order', async () => {
 		await desk.pass(await desk.toChecked());
-		const events = (await office.db.select().from(daybook).orderBy(daybook.seq)).map(({ event }) => event);
+		const events = (await office.db.select().from(daybook).orderBy(daybook.seq)).map(
+			({ event }) => event
+		);
 		expect(events.filter((event) => event !== 'person-added')).toEqual([
 			'piece-created',
 			'proof-pulled',
@@ -322,7 +414,9 @@ describe('writer, checker and editor of one proof are three people', () => {
 		await desk.create();
 		await desk.save(firstLight, both);
 		const proofId = await desk.pull();
-		await expect(signClaim(await office.as(both), SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(code('same-person-twice'));
+		await expect(
+			signClaim(await office.as(both), SLUG, { proofId, claim: 'stretch' })
+		).rejects.toEqual(code('same-person-twice'));
 	});
 
 	test('an editor who changed the draft can’t pass it', async () => {

@@ -11,7 +11,11 @@ import { requireFresh } from './sessions.ts';
 import { isOpen, isReleased } from './standing.ts';
 
 /** Signs one claim of the newest proof. Signing again what one has signed changes nothing. */
-export async function signClaim(ctx: Context, slug: string, input: SignClaim): Promise<{ signatureId: string }> {
+export async function signClaim(
+	ctx: Context,
+	slug: string,
+	input: SignClaim
+): Promise<{ signatureId: string }> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'sign-claim');
 	return ctx.db.transaction(async (tx) => {
@@ -23,9 +27,12 @@ export async function signClaim(ctx: Context, slug: string, input: SignClaim): P
 		if (!standingClaim) throw new SteelyardError('not-found');
 		const { examined, queries } = standingClaim;
 		if (queries.some(isOpen)) throw new SteelyardError('query-open');
-		if (examined.verdict.verdict === 'tips') throw new SteelyardError('claim-tips', { reason: examined.verdict.reason });
+		if (examined.verdict.verdict === 'tips')
+			throw new SteelyardError('claim-tips', { reason: examined.verdict.reason });
 		if (examined.verdict.verdict === 'unweighed') throw new SteelyardError('claim-unweighed');
-		const own = standingClaim.signatures.find(({ inForce, personId }) => inForce && personId === actor.personId);
+		const own = standingClaim.signatures.find(
+			({ inForce, personId }) => inForce && personId === actor.personId
+		);
 		if (own) return { signatureId: own.id };
 
 		const [signature] = await tx
@@ -53,7 +60,11 @@ export async function signClaim(ctx: Context, slug: string, input: SignClaim): P
 }
 
 /** Takes one's own signature back, as long as the newest proof isn't released. A pass that rested on it drops. */
-export async function takeBackSignature(ctx: Context, slug: string, input: TakeBackSignature): Promise<void> {
+export async function takeBackSignature(
+	ctx: Context,
+	slug: string,
+	input: TakeBackSignature
+): Promise<void> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'read-proof');
 	await ctx.db.transaction(async (tx) => {

@@ -41,9 +41,10 @@ export async function readColophon(ctx: Pick<Context, 'db'>, slug: string): Prom
 		.select({ document: releases.document })
 		.from(releases)
 		.where(eq(releases.id, newest.id));
-	if (!proof || !released) throw new Error(`Release ${newest.number} of ${slug} has lost its proof.`);
+	if (!proof || !released)
+		throw new Error(`Release ${newest.number} of ${slug} has lost its proof.`);
 
-	const { claims, people } = standingOf(dossier, proof);
+	const { claims, people } = standingOf(dossier, proof, newest.releasedAt);
 	const names = await nameBook(ctx.db, [
 		...people.writers,
 		proof.passedBy,
@@ -62,7 +63,7 @@ export async function readColophon(ctx: Pick<Context, 'db'>, slug: string): Prom
 				words: examined.words,
 				verdict: examined.verdict,
 				checkedBy: signatures
-					.filter(({ inForce, signedAt }) => inForce && signedAt <= newest.releasedAt)
+					.filter(({ inForce }) => inForce)
 					.map(({ personId, signedAt }) => ({ name: nameOf(personId), on: signedAt.toISOString() }))
 			})),
 		writers: people.writers.map(nameOf),

@@ -7,7 +7,9 @@ export type PieceRow = typeof pieces.$inferSelect;
 export type ProofRow = typeof proofs.$inferSelect;
 export type SignatureRow = typeof signatures.$inferSelect & { proofNumber: number };
 export type QueryRow = typeof queries.$inferSelect & { proofNumber: number };
-export type ReleaseRow = Omit<typeof releases.$inferSelect, 'document' | 'manifest'> & { proofNumber: number };
+export type ReleaseRow = Omit<typeof releases.$inferSelect, 'document' | 'manifest'> & {
+	proofNumber: number;
+};
 
 export interface Dossier {
 	piece: PieceRow;
@@ -22,9 +24,14 @@ export interface Dossier {
 }
 
 /** The dossier of one piece, null when there is none; reads by `slug` or by a row already locked. */
-export async function readDossier(db: Db, which: { slug: string } | { piece: PieceRow }): Promise<Dossier | null> {
+export async function readDossier(
+	db: Db,
+	which: { slug: string } | { piece: PieceRow }
+): Promise<Dossier | null> {
 	const rows =
-		'piece' in which ? [which.piece] : await db.select().from(pieces).where(eq(pieces.slug, which.slug));
+		'piece' in which
+			? [which.piece]
+			: await db.select().from(pieces).where(eq(pieces.slug, which.slug));
 	return (await gather(db, rows))[0] ?? null;
 }
 
@@ -71,7 +78,8 @@ async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 		.orderBy(desc(releases.number));
 
 	return rows.map((piece) => {
-		const ofPiece = <T extends { pieceId: string }>(all: T[]) => all.filter(({ pieceId }) => pieceId === piece.id);
+		const ofPiece = <T extends { pieceId: string }>(all: T[]) =>
+			all.filter(({ pieceId }) => pieceId === piece.id);
 		return {
 			piece,
 			writers: ofPiece(writers).map(({ personId }) => personId),

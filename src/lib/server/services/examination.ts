@@ -6,7 +6,7 @@ import { claimCovers, coverHash, type ClaimCover } from '../../widget/cover.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
 import { evaluate } from '../../widget/evaluate.ts';
 import { findings, type Finding } from '../../widget/findings.ts';
-import { digestOf } from '../../widget/freeze.ts';
+import { digestOf, freeze } from '../../widget/freeze.ts';
 import { claimPlaces, wordsAt, type ClaimPlace } from '../../widget/places.ts';
 
 export interface ExaminedClaim extends ClaimPlace {
@@ -19,6 +19,8 @@ export interface Examination {
 	/** In reading order. */
 	claims: ExaminedClaim[];
 	findings: Finding[];
+	/** The digest a proof of it would have, with the calculators that run now. */
+	digest: string;
 }
 
 /** The same document gives the same findings while the process runs, so the desk needn't weigh everything again. */
@@ -39,11 +41,18 @@ export function examine(document: WidgetDocument): Examination {
 function examineAnew(document: WidgetDocument): Examination {
 	const verdicts = judgeClaims(document, catalogue);
 	const covers = claimCovers(document, catalogue);
-	const places = claimPlaces(document, wordsAt(document, evaluate(document, {}, catalogue), catalogue));
+	const places = claimPlaces(
+		document,
+		wordsAt(document, evaluate(document, {}, catalogue), catalogue)
+	);
 	const claims = places.flatMap((place) => {
 		const verdict = verdicts.get(place.claim.id);
 		const cover = covers.get(place.claim.id);
 		return verdict && cover ? [{ ...place, verdict, cover, coverHash: coverHash(cover) }] : [];
 	});
-	return { claims, findings: findings(document, catalogue) };
+	return {
+		claims,
+		findings: findings(document, catalogue),
+		digest: freeze(document, catalogue).digest
+	};
 }

@@ -23,7 +23,10 @@ const RULES: Rule[] = [
 		return {
 			side: 'claims',
 			met: open.length === 0,
-			says: open.length === 0 ? `${claimsAre(signed)} signed.` : `${claimsAre(open.length)} not signed: ${labels(open)}.`,
+			says:
+				open.length === 0
+					? `${claimsAre(signed)} signed.`
+					: `${claimsAre(open.length)} not signed: ${labels(open)}.`,
 			mend: open.length === 0 ? '' : 'A scientist who didn’t write this signs or queries each one.',
 			href: routes.check(slug)
 		};
@@ -36,7 +39,10 @@ const RULES: Rule[] = [
 			side: 'claims',
 			met: tipping.length === 0,
 			says: tipping.length === 0 ? 'No claim tips.' : `These tip: ${labels(tipping)}.`,
-			mend: tipping.length === 0 ? '' : 'The writer changes the words or the reading, and pulls a new proof.',
+			mend:
+				tipping.length === 0
+					? ''
+					: 'The writer changes the words or the reading, and pulls a new proof.',
 			href: routes.manuscript(slug)
 		};
 	},
@@ -58,7 +64,9 @@ const RULES: Rule[] = [
 		return {
 			side: 'people',
 			met,
-			says: met ? `Written by ${named(writers)}; checked by ${named(checkers)}.` : 'Nobody besides the writers has checked this proof.',
+			says: met
+				? `Written by ${named(writers)}; checked by ${named(checkers)}.`
+				: 'Nobody besides the writers has checked this proof.',
 			mend: met ? '' : 'A scientist who didn’t write this signs the claims.'
 		};
 	},
@@ -76,12 +84,32 @@ const RULES: Rule[] = [
 		return {
 			side: 'galley',
 			met: findings.length === 0,
-			says: findings.length === 0 ? 'Title, point, copy, sliders and charts are complete.' : findings.map(({ says }) => says).join(' '),
+			says:
+				findings.length === 0
+					? 'Title, point, copy, sliders and charts are complete.'
+					: findings.map(({ says }) => says).join(' '),
 			mend: findings.length === 0 ? '' : 'The writer sees to it and pulls a new proof.',
 			href: routes.manuscript(slug)
 		};
 	},
-	() => ({ side: 'time', met: true, says: 'Nothing holds it back: it can go out at once.', mend: '' })
+	({ proof, slug }) => {
+		const met = examine(proof.document).digest === proof.digest;
+		return {
+			side: 'galley',
+			met,
+			says: met
+				? 'The calculators are the ones it was checked with.'
+				: 'A calculator has changed since this proof was pulled.',
+			mend: met ? '' : 'The writer pulls a new proof; what has moved is checked again.',
+			href: routes.manuscript(slug)
+		};
+	},
+	() => ({
+		side: 'time',
+		met: true,
+		says: 'Nothing holds it back: it can go out at once.',
+		mend: ''
+	})
 ];
 
 /** A piece without a proof has one condition: that there be one. */

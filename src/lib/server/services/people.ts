@@ -21,7 +21,10 @@ export interface NewPerson {
 }
 
 /** Adds a person; the e-mail address must be new. Returns their id. */
-export async function addPerson(ctx: Pick<Context, 'db' | 'actor' | 'now'>, person: NewPerson): Promise<string> {
+export async function addPerson(
+	ctx: Pick<Context, 'db' | 'actor' | 'now'>,
+	person: NewPerson
+): Promise<string> {
 	return ctx.db.transaction(async (tx) => {
 		const [added] = await tx
 			.insert(people)
@@ -53,11 +56,15 @@ export async function setRoles(
 
 async function setRolesIn(tx: Db, personId: string, roles: readonly Role[]): Promise<void> {
 	await tx.delete(personRoles).where(eq(personRoles.personId, personId));
-	if (roles.length > 0) await tx.insert(personRoles).values(roles.map((role) => ({ personId, role })));
+	if (roles.length > 0)
+		await tx.insert(personRoles).values(roles.map((role) => ({ personId, role })));
 }
 
 /** Closes a person's account; acts at their next request. Their signatures stay. */
-export async function disablePerson(ctx: Pick<Context, 'db' | 'actor' | 'now'>, personId: string): Promise<void> {
+export async function disablePerson(
+	ctx: Pick<Context, 'db' | 'actor' | 'now'>,
+	personId: string
+): Promise<void> {
 	await ctx.db.transaction(async (tx) => {
 		await tx.update(people).set({ disabledAt: ctx.now }).where(eq(people.id, personId));
 		await record(tx, ctx, 'person-disabled', { disabledId: personId });
@@ -77,11 +84,17 @@ export async function readActor(db: Db, personId: string): Promise<Actor | null>
 }
 
 /** A lookup from id to name for everyone named in `ids`. */
-export async function nameBook(db: Db, ids: Iterable<string | null>): Promise<(personId: string) => PersonName> {
+export async function nameBook(
+	db: Db,
+	ids: Iterable<string | null>
+): Promise<(personId: string) => PersonName> {
 	const wanted = [...new Set(ids)].filter((id) => id !== null);
 	const rows =
 		wanted.length > 0
-			? await db.select({ id: people.id, name: people.name }).from(people).where(inArray(people.id, wanted))
+			? await db
+					.select({ id: people.id, name: people.name })
+					.from(people)
+					.where(inArray(people.id, wanted))
 			: [];
 	const names = new Map(rows.map(({ id, name }) => [id, name]));
 	return (personId) => ({ personId, name: names.get(personId) ?? 'Someone who has left' });

@@ -67,7 +67,10 @@ function viewProof(proof: ProofRow, { claims, people }: Standing, names: Names):
 	};
 }
 
-function viewClaim({ examined, state, signatures, queries }: StandingClaim, names: Names): ClaimView {
+function viewClaim(
+	{ examined, state, signatures, queries }: StandingClaim,
+	names: Names
+): ClaimView {
 	const { claim, label, words, sentence, before, after, verdict } = examined;
 	return {
 		id: claim.id,
@@ -80,17 +83,15 @@ function viewClaim({ examined, state, signatures, queries }: StandingClaim, name
 		reading: claim.form === 'exempt' ? null : claim.reading,
 		verdict,
 		state,
-		signatures: signatures.map(
-			(row): SignatureView => ({
-				id: row.id,
-				claim: row.claim,
-				by: names(row.personId),
-				signedAt: row.signedAt.toISOString(),
-				proofNumber: row.proofNumber,
-				inForce: row.inForce,
-				sentence: row.sentence
-			})
-		),
+		signatures: signatures.map((row): SignatureView => ({
+			id: row.id,
+			claim: row.claim,
+			by: names(row.personId),
+			signedAt: row.signedAt.toISOString(),
+			proofNumber: row.proofNumber,
+			inForce: row.inForce,
+			sentence: row.sentence
+		})),
 		queries: queries.map((row) => viewQuery(row, names))
 	};
 }
@@ -142,7 +143,8 @@ function holder(
 	standing: Standing | null,
 	working: WorkingState
 ): { by: string | null; since: Date } {
-	if (working === 'draft' || !proof || !standing) return { by: piece.savedBy, since: piece.savedAt };
+	if (working === 'draft' || !proof || !standing)
+		return { by: piece.savedBy, since: piece.savedAt };
 	if (working === 'at-rest') return { by: null, since: releases[0]?.releasedAt ?? proof.pulledAt };
 	if (working === 'passed') return { by: proof.passedBy, since: proof.passedAt ?? proof.pulledAt };
 	if (working === 'queried') {
@@ -153,22 +155,31 @@ function holder(
 			: { by: proof.pulledBy, since: oldest.askedAt };
 	}
 	const last = signatures.at(-1)?.signedAt ?? proof.pulledAt;
-	return { by: null, since: working === 'checked' && last > proof.pulledAt ? last : proof.pulledAt };
+	return {
+		by: null,
+		since: working === 'checked' && last > proof.pulledAt ? last : proof.pulledAt
+	};
 }
 
 function missing(dossier: Dossier, standing: Standing | null, working: WorkingState): string {
 	if (working === 'at-rest') return '';
 	if (working === 'passed') return 'its release';
 	if (working === 'checked') return 'an editor’s pass';
-	const examination = examine(working === 'draft' || !dossier.proof ? dossier.piece.document : dossier.proof.document);
+	const examination = examine(
+		working === 'draft' || !dossier.proof ? dossier.piece.document : dossier.proof.document
+	);
 	const weighed = examination.claims.filter(({ claim }) => claim.form !== 'exempt');
-	const verdicts = (name: string) => weighed.filter(({ verdict }) => verdict.verdict === name).length;
-	const states = (name: string) => standing?.claims.filter(({ state }) => state === name).length ?? 0;
+	const verdicts = (name: string) =>
+		weighed.filter(({ verdict }) => verdict.verdict === name).length;
+	const states = (name: string) =>
+		standing?.claims.filter(({ state }) => state === name).length ?? 0;
 	const open = standing?.claims.flatMap(({ queries }) => queries.filter(isOpen)).length ?? 0;
 	return [
 		counted(verdicts('tips'), 'tips', 'tip'),
 		counted(verdicts('unweighed'), 'not weighed'),
-		working === 'draft' ? counted(examination.findings.length, 'thing to add', 'things to add') : '',
+		working === 'draft'
+			? counted(examination.findings.length, 'thing to add', 'things to add')
+			: '',
 		working === 'draft' ? '' : counted(states('unsigned') + states('lapsed'), 'to sign'),
 		counted(open, 'query', 'queries')
 	]

@@ -51,7 +51,9 @@ describe('a new piece', () => {
 		const ctx = await office.as(desk.writer);
 		await createPiece(ctx, { title: 'Tides' });
 		expect((await createPiece(ctx, { title: 'Tides' })).slug).toBe('tides-2');
-		await expect(createPiece(ctx, { title: 'Tides', slug: 'tides' })).rejects.toEqual(code('slug-taken'));
+		await expect(createPiece(ctx, { title: 'Tides', slug: 'tides' })).rejects.toEqual(
+			code('slug-taken')
+		);
 	});
 });
 
@@ -59,7 +61,10 @@ describe('saving a draft', () => {
 	beforeEach(() => desk.create());
 
 	test('counts the version up, and reads back what was saved', async () => {
-		expect(await save(1, firstLight)).toMatchObject({ version: 2, savedAt: office.now.toISOString() });
+		expect(await save(1, firstLight)).toMatchObject({
+			version: 2,
+			savedAt: office.now.toISOString()
+		});
 		expect((await desk.piece()).document).toEqual(firstLight);
 	});
 
@@ -73,24 +78,33 @@ describe('saving a draft', () => {
 		await save(1, firstLight);
 		const kofi = await office.add('Kofi Adjarra-Lund', ['writer']);
 		await expect(save(1, { ...firstLight, title: 'Another' }, kofi)).rejects.toEqual(
-			code('version-conflict', { version: 2, savedBy: { personId: desk.writer, name: 'Tamsin Orrelby' }, document: firstLight })
+			code('version-conflict', {
+				version: 2,
+				savedBy: { personId: desk.writer, name: 'Tamsin Orrelby' },
+				document: firstLight
+			})
 		);
 		expect((await desk.piece()).document).toEqual(firstLight);
 	});
 
 	test('of many saves on one version at once, one wins and the others are told', async () => {
 		const saves = await Promise.allSettled(
-			Array.from({ length: 8 }, (_, index) => save(1, { ...firstLight, title: `Version by ${index}` }))
+			Array.from({ length: 8 }, (_, index) =>
+				save(1, { ...firstLight, title: `Version by ${index}` })
+			)
 		);
 		expect(saves.filter(({ status }) => status === 'fulfilled')).toHaveLength(1);
 		for (const outcome of saves) {
-			if (outcome.status === 'rejected') expect(outcome.reason).toEqual(code('version-conflict', { version: 2 }));
+			if (outcome.status === 'rejected')
+				expect(outcome.reason).toEqual(code('version-conflict', { version: 2 }));
 		}
 		expect((await desk.piece()).version).toBe(2);
 	});
 
 	test('an unfinished draft is kept', async () => {
-		await expect(save(1, { ...firstLight, title: '', point: '' })).resolves.toMatchObject({ version: 2 });
+		await expect(save(1, { ...firstLight, title: '', point: '' })).resolves.toMatchObject({
+			version: 2
+		});
 	});
 
 	test.each([
@@ -104,7 +118,9 @@ describe('saving a draft', () => {
 		['half a character', { ...firstLight, point: '\ud800' }]
 	])('one that doesn’t hang together is refused with the place named: %s', async (_, document) => {
 		await expect(save(1, document)).rejects.toEqual(
-			code('document-broken', { issues: expect.arrayContaining([expect.objectContaining({ message: expect.any(String) })]) })
+			code('document-broken', {
+				issues: expect.arrayContaining([expect.objectContaining({ message: expect.any(String) })])
+			})
 		);
 		expect((await desk.piece()).version).toBe(1);
 	});
@@ -114,23 +130,38 @@ describe('saving a draft', () => {
 		await save(2, firstLight, desk.editor);
 		expect((await desk.piece()).writers.map(({ personId }) => personId)).toEqual([desk.writer]);
 		await save(2, { ...firstLight, title: 'First light, on the dial' }, desk.editor);
-		expect((await desk.piece()).writers.map(({ personId }) => personId).sort()).toEqual([desk.writer, desk.editor].sort());
+		expect((await desk.piece()).writers.map(({ personId }) => personId).sort()).toEqual(
+			[desk.writer, desk.editor].sort()
+		);
 		expect(await office.db.select().from(pieceWriters)).toHaveLength(2);
 	});
 
 	test('a piece that isn’t there is not found', async () => {
-		await expect(saveDraft(await office.as(desk.writer), 'nowhere', { baseVersion: 1, document: firstLight })).rejects.toEqual(code('not-found'));
-		await expect(getPiece(await office.as(desk.writer), 'nowhere')).rejects.toEqual(code('not-found'));
+		await expect(
+			saveDraft(await office.as(desk.writer), 'nowhere', { baseVersion: 1, document: firstLight })
+		).rejects.toEqual(code('not-found'));
+		await expect(getPiece(await office.as(desk.writer), 'nowhere')).rejects.toEqual(
+			code('not-found')
+		);
 	});
 });
 
 test('the desk says what each piece waits for, from draft to checked', async () => {
 	const line = async () => (await listPieces(await office.as(desk.editor)))[0];
 	await desk.create();
-	expect(await line()).toMatchObject({ working: 'draft', missing: '2 things to add', heldBy: { name: 'Tamsin Orrelby' } });
+	expect(await line()).toMatchObject({
+		working: 'draft',
+		missing: '2 things to add',
+		heldBy: { name: 'Tamsin Orrelby' }
+	});
 	await desk.save(firstLight);
 	await desk.pull();
-	expect(await line()).toMatchObject({ working: 'in-check', missing: '4 to sign', heldBy: null, proofNumber: 1 });
+	expect(await line()).toMatchObject({
+		working: 'in-check',
+		missing: '4 to sign',
+		heldBy: null,
+		proofNumber: 1
+	});
 	await desk.signAll();
 	expect(await line()).toMatchObject({ working: 'checked', missing: 'an editor’s pass' });
 	await desk.edit((document) => reword(document, 'opening', 'faint', 'feeble'));

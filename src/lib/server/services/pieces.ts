@@ -35,7 +35,10 @@ export async function getPiece(ctx: Context, slug: string): Promise<PieceView> {
 }
 
 /** An empty sheet under this title. Without a slug one is made from the title; a given one must be free. */
-export async function createPiece(ctx: Context, input: CreatePiece): Promise<{ id: string; slug: string }> {
+export async function createPiece(
+	ctx: Context,
+	input: CreatePiece
+): Promise<{ id: string; slug: string }> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'create-piece');
 	refuseUnstorable(input);
@@ -101,7 +104,8 @@ export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): P
 			.returning();
 		if (!row) throw await conflict(tx, piece);
 		const first = await addWriter(tx, piece.id, actor.personId, now);
-		if (first) await record(tx, ctx, 'draft-first-changed', { pieceId: piece.id, version: row.version });
+		if (first)
+			await record(tx, ctx, 'draft-first-changed', { pieceId: piece.id, version: row.version });
 		return saved(row);
 	});
 }
@@ -112,7 +116,11 @@ function saved(piece: PieceRow): Saved {
 
 async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
 	const names = await nameBook(tx, [piece.savedBy]);
-	const current: Conflict = { ...saved(piece), savedBy: names(piece.savedBy), document: piece.document };
+	const current: Conflict = {
+		...saved(piece),
+		savedBy: names(piece.savedBy),
+		document: piece.document
+	};
 	return new SteelyardError('version-conflict', { ...current });
 }
 

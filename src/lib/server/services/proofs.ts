@@ -1,8 +1,6 @@
 /** Proofs: pulled from the draft, passed by an editor when every condition is met. */
 import { eq } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
-import { freeze } from '../../widget/freeze.ts';
 import { requirePermission, type Actor } from '../../workflow/permissions.ts';
 import type { Condition } from '../../workflow/piece.ts';
 import type { Context } from '../context.ts';
@@ -18,16 +16,18 @@ import { requireFresh } from './sessions.ts';
 import { isReleased, standingOf, type Standing } from './standing.ts';
 
 /** Freezes the draft under the next number. Pulling twice from the same draft gives the same proof. */
-export async function pullProof(ctx: Context, slug: string): Promise<{ proofId: string; number: number }> {
+export async function pullProof(
+	ctx: Context,
+	slug: string
+): Promise<{ proofId: string; number: number }> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'pull-proof');
 	return ctx.db.transaction(async (tx) => {
 		const piece = await lockPiece(tx, slug);
-		const lacking = examine(piece.document).findings;
+		const { findings: lacking, digest } = examine(piece.document);
 		if (lacking.length > 0) throw new SteelyardError('proof-not-ready', { findings: lacking });
 
 		const { proof: newest, writers } = await dossierOf(tx, piece);
-		const { digest } = freeze(piece.document, catalogue);
 		if (newest?.digest === digest) return { proofId: newest.id, number: newest.number };
 
 		const number = (newest?.number ?? 0) + 1;
@@ -44,7 +44,12 @@ export async function pullProof(ctx: Context, slug: string): Promise<{ proofId: 
 			})
 			.returning({ id: proofs.id });
 		if (!pulled) throw new Error('The database took a proof and gave back no id.');
-		await record(tx, ctx, 'proof-pulled', { pieceId: piece.id, proofId: pulled.id, number, digest });
+		await record(tx, ctx, 'proof-pulled', {
+			pieceId: piece.id,
+			proofId: pulled.id,
+			number,
+			digest
+		});
 		return { proofId: pulled.id, number };
 	});
 }
@@ -58,7 +63,11 @@ export async function passConditions(ctx: Context, slug: string): Promise<Condit
 }
 
 /** Passes the newest proof for press. Throws `conditions-open` with what is still open. */
-export async function passProof(ctx: Context, slug: string, input: { proofId: string }): Promise<void> {
+export async function passProof(
+	ctx: Context,
+	slug: string,
+	input: { proofId: string }
+): Promise<void> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'pass-proof');
 	await ctx.db.transaction(async (tx) => {
@@ -69,13 +78,26 @@ export async function passProof(ctx: Context, slug: string, input: { proofId: st
 		if (open.length > 0) throw new SteelyardError('conditions-open', { conditions: open });
 		if (proof.passedAt) return;
 
-		await tx.update(proofs).set({ passedBy: actor.personId, passedAt: now }).where(eq(proofs.id, proof.id));
-		await record(tx, ctx, 'proof-passed', { pieceId: proof.pieceId, proofId: proof.id, digest: proof.digest });
+		await tx
+			.update(proofs)
+			.set({ passedBy: actor.personId, passedAt: now })
+			.where(eq(proofs.id, proof.id));
+		await record(tx, ctx, 'proof-passed', {
+			pieceId: proof.pieceId,
+			proofId: proof.id,
+			digest: proof.digest
+		});
 	});
 }
 
 /** Takes a pass away when what it rested on has changed; a released proof keeps its pass. */
-export async function dropPass(tx: Db, ctx: Context, dossier: Dossier, proof: ProofRow, cause: string): Promise<void> {
+export async function dropPass(
+	tx: Db,
+	ctx: Context,
+	dossier: Dossier,
+	proof: ProofRow,
+	cause: string
+): Promise<void> {
 	if (!proof.passedAt || isReleased(dossier, proof)) return;
 	await tx.update(proofs).set({ passedBy: null, passedAt: null }).where(eq(proofs.id, proof.id));
 	await record(tx, ctx, 'pass-dropped', { pieceId: proof.pieceId, proofId: proof.id, cause });
@@ -90,7 +112,8 @@ export interface LockedProof {
 /** The piece locked, with its newest proof; throws `proof-superseded` when that isn't the one the caller looked at. */
 export async function lockNewestProof(tx: Db, slug: string, proofId: string): Promise<LockedProof> {
 	const locked = await lockAnyProof(tx, slug);
-	if (locked.proof.id !== proofId) throw new SteelyardError('proof-superseded', { newest: locked.proof.number });
+	if (locked.proof.id !== proofId)
+		throw new SteelyardError('proof-superseded', { newest: locked.proof.number });
 	return locked;
 }
 
@@ -109,6 +132,9 @@ async function dossierOf(tx: Db, piece: Dossier['piece']): Promise<Dossier> {
 }
 
 async function conditionsFor(db: Db, actor: Actor, dossier: Dossier): Promise<Condition[]> {
-	const people = [...(dossier.proof?.writers ?? []), ...dossier.signatures.map(({ personId }) => personId)];
+	const people = [
+		...(dossier.proof?.writers ?? []),
+		...dossier.signatures.map(({ personId }) => personId)
+	];
 	return conditionsOf(dossier, actor, await nameBook(db, people));
 }

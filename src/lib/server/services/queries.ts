@@ -14,7 +14,11 @@ import { refuseUnstorable } from './storable.ts';
 import { inTransaction } from './transaction.ts';
 
 /** Asks the writers about one claim of the newest proof. A pass drops. */
-export async function raiseQuery(ctx: Context, slug: string, input: RaiseQuery): Promise<{ queryId: string }> {
+export async function raiseQuery(
+	ctx: Context,
+	slug: string,
+	input: RaiseQuery
+): Promise<{ queryId: string }> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'query-claim');
 	refuseUnstorable({ question: input.question });
@@ -36,10 +40,17 @@ export async function raiseQuery(ctx: Context, slug: string, input: RaiseQuery):
 			})
 			.returning({ id: queries.id });
 		if (!query) throw new Error('The database took a query and gave back no id.');
-		await record(tx, ctx, 'query-raised', { pieceId: proof.pieceId, queryId: query.id, claim: input.claim });
+		await record(tx, ctx, 'query-raised', {
+			pieceId: proof.pieceId,
+			queryId: query.id,
+			claim: input.claim
+		});
 		await dropPass(tx, ctx, dossier, proof, 'query-raised');
 		const about = { slug, title: proof.document.title, by: actor.name, claim: label };
-		for (const writer of await mailboxes(tx, proof.writers.filter((id) => id !== actor.personId))) {
+		for (const writer of await mailboxes(
+			tx,
+			proof.writers.filter((id) => id !== actor.personId)
+		)) {
 			await queueMail(tx, now, writer, { event: 'query-raised', input: about });
 		}
 		return { queryId: query.id };
@@ -85,7 +96,10 @@ export async function closeQuery(ctx: Context, slug: string, input: CloseQuery):
 			can(actor, 'sign-claim', resource) ||
 			can(actor, 'pass-proof', resource);
 		if (!may) throw new SteelyardError('not-permitted');
-		await tx.update(queries).set({ closedBy: actor.personId, closedAt: now }).where(eq(queries.id, query.id));
+		await tx
+			.update(queries)
+			.set({ closedBy: actor.personId, closedAt: now })
+			.where(eq(queries.id, query.id));
 		await record(tx, ctx, 'query-closed', { pieceId: query.pieceId, queryId: query.id });
 	});
 }
@@ -99,7 +113,9 @@ function openQuery({ dossier }: LockedProof, queryId: string): QueryRow {
 
 /** “2b”; null when the proof has no such claim. */
 function labelOf({ standing }: LockedProof, claimId: string): string | null {
-	return standing.claims.find(({ examined }) => examined.claim.id === claimId)?.examined.label ?? null;
+	return (
+		standing.claims.find(({ examined }) => examined.claim.id === claimId)?.examined.label ?? null
+	);
 }
 
 async function mailboxes(tx: Db, ids: readonly string[]) {

@@ -45,7 +45,8 @@ export async function readSession(
 		.select()
 		.from(sessions)
 		.where(and(eq(sessions.id, sessionId), isNull(sessions.revokedAt)));
-	if (!row || row.expiresAt <= now || row.lastSeenAt.getTime() + IDLE_MS <= now.getTime()) return null;
+	if (!row || row.expiresAt <= now || row.lastSeenAt.getTime() + IDLE_MS <= now.getTime())
+		return null;
 	const actor = await readActor(db, row.personId);
 	if (!actor) return null;
 	if (now.getTime() - row.lastSeenAt.getTime() >= SEEN_EVERY_MS) {

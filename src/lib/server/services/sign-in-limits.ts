@@ -27,7 +27,8 @@ export async function countPassphraseTry(tx: Db, now: Date, attempt: Try): Promi
 	const account = eq(signInAttempts.accountHash, accountHash);
 	const device = deviceHash ? eq(signInAttempts.deviceHash, deviceHash) : undefined;
 	const usual =
-		device !== undefined && (await howMany(tx, account, device, eq(signInAttempts.succeeded, true))) > 0;
+		device !== undefined &&
+		(await howMany(tx, account, device, eq(signInAttempts.succeeded, true))) > 0;
 
 	const wrong = and(
 		eq(signInAttempts.kind, 'passphrase'),
@@ -60,8 +61,10 @@ export async function countLinkWish(tx: Db, now: Date, attempt: Try): Promise<vo
 	);
 	const account = eq(signInAttempts.accountHash, hashes(attempt).accountHash);
 	const slowed =
-		(await howMany(tx, recent, account)) >= LINKS_PER_ACCOUNT || (await howMany(tx, recent)) >= LINKS_IN_ALL;
-	if (slowed) throw new SteelyardError('sign-in-slowed', { retryAfterSeconds: LINK_WINDOW_MS / 1000 });
+		(await howMany(tx, recent, account)) >= LINKS_PER_ACCOUNT ||
+		(await howMany(tx, recent)) >= LINKS_IN_ALL;
+	if (slowed)
+		throw new SteelyardError('sign-in-slowed', { retryAfterSeconds: LINK_WINDOW_MS / 1000 });
 	await insertTry(tx, now, 'link', attempt, false);
 }
 
@@ -86,10 +89,17 @@ async function insertTry(
 }
 
 async function howMany(tx: Db, ...conditions: (SQL | undefined)[]): Promise<number> {
-	const [row] = await tx.select({ rows: count() }).from(signInAttempts).where(and(...conditions));
+	const [row] = await tx
+		.select({ rows: count() })
+		.from(signInAttempts)
+		.where(and(...conditions));
 	return row?.rows ?? 0;
 }
 
 function hashes({ email, address, device }: Try) {
-	return { accountHash: sha256(email), addressHash: sha256(address), deviceHash: device ? sha256(device) : null };
+	return {
+		accountHash: sha256(email),
+		addressHash: sha256(address),
+		deviceHash: device ? sha256(device) : null
+	};
 }

@@ -5,8 +5,22 @@ import { noShelf, Office, SECRET } from '../../../../tests/support/office.ts';
 import { hashPassphrase } from '../auth/passphrase.ts';
 import { daybook, outbox, sessions, signInAttempts, signInLinks } from '../db/schema/index.ts';
 import { disablePerson, setRoles } from './people.ts';
-import { ABSOLUTE_MS, IDLE_MS, isFresh, readSession, requireFresh, revokeSessions, signOut } from './sessions.ts';
-import { confirmPassphrase, linkToken, sendSignInLink, signInByLink, signInByPassphrase } from './sign-in.ts';
+import {
+	ABSOLUTE_MS,
+	IDLE_MS,
+	isFresh,
+	readSession,
+	requireFresh,
+	revokeSessions,
+	signOut
+} from './sessions.ts';
+import {
+	confirmPassphrase,
+	linkToken,
+	sendSignInLink,
+	signInByLink,
+	signInByPassphrase
+} from './sign-in.ts';
 
 const RIGHT = 'a rider on the arm';
 const EMAIL = 'tamsin@varrowmere.example';
@@ -28,7 +42,8 @@ beforeEach(async () => {
 });
 
 const code = (code: string) => expect.objectContaining({ code });
-const signIn = (passphrase: string, email = EMAIL) => signInByPassphrase(office.stranger(), { email, passphrase });
+const signIn = (passphrase: string, email = EMAIL) =>
+	signInByPassphrase(office.stranger(), { email, passphrase });
 
 describe('by passphrase', () => {
 	test('the right one opens a session that reads as the person, whatever the case of the address', async () => {
@@ -40,7 +55,9 @@ describe('by passphrase', () => {
 	test('a wrong one, an unknown address and a person without one fail alike', async () => {
 		await office.add('Ama Tindleforth', ['scientist'], null);
 		await expect(signIn('something else')).rejects.toEqual(code('sign-in-failed'));
-		await expect(signIn(RIGHT, 'nobody@varrowmere.example')).rejects.toEqual(code('sign-in-failed'));
+		await expect(signIn(RIGHT, 'nobody@varrowmere.example')).rejects.toEqual(
+			code('sign-in-failed')
+		);
 		await expect(signIn(RIGHT, 'ama@varrowmere.example')).rejects.toEqual(code('sign-in-failed'));
 	});
 
@@ -88,7 +105,9 @@ describe('by passphrase', () => {
 		);
 		const { sha256 } = await import('../auth/hashes.ts');
 		await office.db.update(signInAttempts).set({ addressHash: sha256('192.0.2.7') });
-		await expect(signIn(RIGHT, 'perpetua@varrowmere.example')).rejects.toEqual(code('sign-in-slowed'));
+		await expect(signIn(RIGHT, 'perpetua@varrowmere.example')).rejects.toEqual(
+			code('sign-in-slowed')
+		);
 		office.client = { address: '192.0.2.8', device: null };
 		await expect(signIn(RIGHT, 'perpetua@varrowmere.example')).resolves.toBeDefined();
 	});
@@ -173,10 +192,14 @@ describe('a session', () => {
 
 describe('by link', () => {
 	const NONCE = 'the nonce of this browser';
-	const send = (nonce = NONCE, email = EMAIL) => sendSignInLink(office.stranger(), { email, nonce });
+	const send = (nonce = NONCE, email = EMAIL) =>
+		sendSignInLink(office.stranger(), { email, nonce });
 	const enter = (token: string, nonce = NONCE) => signInByLink(office.stranger(), { token, nonce });
 	const newestToken = async () => {
-		const links = await office.db.select().from(signInLinks).where(eq(signInLinks.personId, tamsin));
+		const links = await office.db
+			.select()
+			.from(signInLinks)
+			.where(eq(signInLinks.personId, tamsin));
 		const open = links.find(({ usedAt }) => usedAt === null);
 		return linkToken(SECRET, open!.id);
 	};

@@ -11,7 +11,12 @@ import { queueMail } from '../mail/outbox.ts';
 import { record } from './daybook.ts';
 import { normalEmail } from './people.ts';
 import { openSession } from './sessions.ts';
-import { countLinkWish, countPassphraseTry, markRight, recordLinkSignIn } from './sign-in-limits.ts';
+import {
+	countLinkWish,
+	countPassphraseTry,
+	markRight,
+	recordLinkSignIn
+} from './sign-in-limits.ts';
 import { inTransaction } from './transaction.ts';
 
 export const LINK_LIFE_MS = 10 * 60_000;
@@ -28,7 +33,9 @@ export async function signInByPassphrase(
 	{ passphrase, ...given }: { email: string; passphrase: string }
 ): Promise<SignedIn> {
 	const email = normalEmail(given.email);
-	const tryId = await ctx.db.transaction((tx) => countPassphraseTry(tx, ctx.now, { ...ctx.client, email }));
+	const tryId = await ctx.db.transaction((tx) =>
+		countPassphraseTry(tx, ctx.now, { ...ctx.client, email })
+	);
 	const person = await findPerson(ctx.db, email);
 	// Outside any transaction: it takes tens of milliseconds.
 	const fits = await passphraseFits(person?.passphraseHash ?? null, passphrase);
@@ -50,7 +57,8 @@ export async function confirmPassphrase(ctx: Context, passphrase: string): Promi
 	const tryId = await ctx.db.transaction((tx) =>
 		countPassphraseTry(tx, ctx.now, { ...ctx.client, email: person.email })
 	);
-	if (!(await passphraseFits(person.passphraseHash, passphrase))) throw new SteelyardError('sign-in-failed');
+	if (!(await passphraseFits(person.passphraseHash, passphrase)))
+		throw new SteelyardError('sign-in-failed');
 	await ctx.db.transaction(async (tx) => {
 		await markRight(tx, tryId, ctx.client.device ?? newId());
 		await tx.update(sessions).set({ freshAt: ctx.now }).where(eq(sessions.id, session.id));
@@ -62,7 +70,10 @@ export async function confirmPassphrase(ctx: Context, passphrase: string): Promi
  * Mails a link to the address when it belongs to someone; does nothing, just as quietly, when it doesn't. The link
  * works once, for ten minutes, in the browser that keeps `nonce`, and not after a newer one was asked for.
  */
-export async function sendSignInLink(ctx: Context, wish: { email: string; nonce: string }): Promise<void> {
+export async function sendSignInLink(
+	ctx: Context,
+	wish: { email: string; nonce: string }
+): Promise<void> {
 	const email = normalEmail(wish.email);
 	// Counted on its own, so that a refusal stays counted too.
 	await ctx.db.transaction((tx) => countLinkWish(tx, ctx.now, { ...ctx.client, email }));
@@ -117,7 +128,12 @@ export async function signInByLink(
 	});
 }
 
-async function enter(tx: Db, ctx: Context, personId: string, by: 'passphrase' | 'link'): Promise<SessionInfo> {
+async function enter(
+	tx: Db,
+	ctx: Context,
+	personId: string,
+	by: 'passphrase' | 'link'
+): Promise<SessionInfo> {
 	const session = await openSession(tx, ctx.now, personId);
 	await record(tx, ctx, 'signed-in', { personId, by });
 	return session;

@@ -18,16 +18,18 @@ export interface Standing {
 
 /**
  * A signature is in force while what it covers is, to the last character, what the proof holds; it was not taken back;
- * and its signer hasn't become one of the proof's writers.
+ * and its signer hasn't become one of the proof's writers. With `at`, as that stood at that moment: a release keeps the
+ * names it went out with.
  */
-export function standingOf(dossier: Dossier, proof: ProofRow): Standing {
+export function standingOf(dossier: Dossier, proof: ProofRow, at?: Date): Standing {
 	const claims = examine(proof.document).claims.map((examined) => {
 		const id = examined.claim.id;
 		const signatures = dossier.signatures
-			.filter(({ claim, takenBackAt }) => claim === id && takenBackAt === null)
+			.filter((signature) => signature.claim === id && stoodAt(signature, at))
 			.map((signature) => ({
 				...signature,
-				inForce: signature.coverHash === examined.coverHash && !proof.writers.includes(signature.personId)
+				inForce:
+					signature.coverHash === examined.coverHash && !proof.writers.includes(signature.personId)
 			}));
 		const queries = dossier.queries.filter(({ claim }) => claim === id);
 		return { examined, signatures, queries, state: claimState(examined, signatures, queries) };
@@ -36,6 +38,11 @@ export function standingOf(dossier: Dossier, proof: ProofRow): Standing {
 		signatures.filter(({ inForce }) => inForce).map(({ personId }) => personId)
 	);
 	return { claims, people: { writers: proof.writers, checkers: [...new Set(checkers)] } };
+}
+
+function stoodAt({ signedAt, takenBackAt }: SignatureRow, at: Date | undefined): boolean {
+	if (!at) return takenBackAt === null;
+	return signedAt <= at && (takenBackAt === null || takenBackAt > at);
 }
 
 function claimState(

@@ -6,7 +6,8 @@ export interface TextIssue {
 	message: string;
 }
 
-const MESSAGE = 'This text holds a character that can’t be kept. Type it again instead of pasting it.';
+const MESSAGE =
+	'This text holds a character that can’t be kept. Type it again instead of pasting it.';
 
 /** Every string (and key) in a JSON value that can't be stored, by path; depth is the caller's to limit. */
 export function unstorableText(value: unknown, path = ''): TextIssue[] {

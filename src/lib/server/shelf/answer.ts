@@ -58,7 +58,12 @@ export function shelfAnswers(shelf: ReleaseShelf, { https }: { https: boolean })
 	};
 }
 
-function sendFile(request: IncomingMessage, response: ServerResponse, file: ShelfFile, headers: Headers): void {
+function sendFile(
+	request: IncomingMessage,
+	response: ServerResponse,
+	file: ShelfFile,
+	headers: Headers
+): void {
 	const encoding = acceptedEncoding(header(request, 'accept-encoding'));
 	const packed = encoding && file.packed[encoding];
 	const body = packed ?? file.plain;
@@ -82,7 +87,9 @@ function sendFile(request: IncomingMessage, response: ServerResponse, file: Shel
 function matches(given: string | undefined, tag: string): boolean {
 	if (!given) return false;
 	if (given.trim() === '*') return true;
-	return given.split(',').some((each) => /^(?:W\/)?"([0-9a-f]+)(?:-[a-z]+)?"$/.exec(each.trim())?.[1] === tag);
+	return given
+		.split(',')
+		.some((each) => /^(?:W\/)?"([0-9a-f]+)(?:-[a-z]+)?"$/.exec(each.trim())?.[1] === tag);
 }
 
 function sendCard(

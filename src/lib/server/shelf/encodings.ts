@@ -30,7 +30,11 @@ export async function pack(bytes: Uint8Array, contentType: string): Promise<Pack
 }
 
 /** True when a packed form holds exactly these bytes. */
-export async function unpacksTo(packed: Uint8Array, encoding: Encoding, bytes: Uint8Array): Promise<boolean> {
+export async function unpacksTo(
+	packed: Uint8Array,
+	encoding: Encoding,
+	bytes: Uint8Array
+): Promise<boolean> {
 	try {
 		const unpacked = await (encoding === 'br' ? fromBrotli : fromGzip)(packed);
 		return unpacked.equals(bytes);
@@ -49,7 +53,9 @@ export function acceptedEncoding(header: string | undefined): Encoding | null {
 		const weight = parameters.find((parameter) => parameter.startsWith('q='))?.slice(2);
 		(weight !== undefined && !(Number(weight) > 0) ? refused : allowed).add(name);
 	}
-	return ENCODINGS.find((name) => !refused.has(name) && (allowed.has(name) || allowed.has('*'))) ?? null;
+	return (
+		ENCODINGS.find((name) => !refused.has(name) && (allowed.has(name) || allowed.has('*'))) ?? null
+	);
 }
 
 function smaller(packed: Buffer, bytes: Uint8Array): Buffer | null {

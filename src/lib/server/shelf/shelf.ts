@@ -57,15 +57,19 @@ export class ReleaseShelf {
 	 * same number, or when a file of the same name has other bytes.
 	 */
 	async place({ manifest, files }: Bundle): Promise<void> {
-		if (!SLUG.test(manifest.slug)) throw new Error(`“${manifest.slug}” is no slug: small letters, digits, dashes.`);
+		if (!SLUG.test(manifest.slug))
+			throw new Error(`“${manifest.slug}” is no slug: small letters, digits, dashes.`);
 		const standing = this.#pages.get(pageKey(manifest.slug, manifest.release));
 		if (standing && standing.sha256 !== manifest.digest) {
-			throw new Error(`Release ${manifest.release} of ${manifest.slug} is out already, with other words.`);
+			throw new Error(
+				`Release ${manifest.release} of ${manifest.slug} is out already, with other words.`
+			);
 		}
 		const stored = new Map<string, StoredFile>();
 		for (const { key, sha256, bytes, contentType } of files) {
 			const known = this.#assets.get(assetName(key));
-			if (known && known.sha256 !== sha256) throw new Error(`${key} is on the shelf with other bytes.`);
+			if (known && known.sha256 !== sha256)
+				throw new Error(`${key} is on the shelf with other bytes.`);
 			stored.set(key, await this.#mirror.keepFile(sha256, bytes, contentType));
 		}
 		await this.#mirror.keepList(manifest);

@@ -45,7 +45,9 @@ test('a key that isn’t there is null, not an error', async () => {
 
 test('a store that isn’t there, or refuses, is away', async () => {
 	const gone = openObjectStore(settings('http://127.0.0.1:1'));
-	await expect(gone.put('a', new Uint8Array(1), 'text/plain')).rejects.toMatchObject({ code: 'store-away' });
+	await expect(gone.put('a', new Uint8Array(1), 'text/plain')).rejects.toMatchObject({
+		code: 'store-away'
+	});
 	const stranger = openObjectStore({ ...settings(fake.url), accessKeyId: 'another' });
 	await expect(stranger.get('a/b')).rejects.toMatchObject({ code: 'store-away' });
 });

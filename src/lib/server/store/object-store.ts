@@ -1,5 +1,12 @@
 /** Published bytes, by content-addressed key, in a store that speaks the S3 protocol. */
-import { CreateBucketCommand, GetObjectCommand, HeadObjectCommand, PutObjectCommand, S3Client, S3ServiceException } from '@aws-sdk/client-s3';
+import {
+	CreateBucketCommand,
+	GetObjectCommand,
+	HeadObjectCommand,
+	PutObjectCommand,
+	S3Client,
+	S3ServiceException
+} from '@aws-sdk/client-s3';
 import { SteelyardError } from '../../errors.ts';
 
 export interface ObjectStore {
@@ -30,7 +37,11 @@ export function openObjectStore(settings: StoreSettings): ObjectStore {
 		credentials: { accessKeyId: settings.accessKeyId, secretAccessKey: settings.secretAccessKey },
 		forcePathStyle: true, // a store on an address without wildcard host names
 		maxAttempts: 2,
-		requestHandler: { connectionTimeout: 2_000, requestTimeout: settings.requestTimeoutMs ?? 8_000, throwOnRequestTimeout: true },
+		requestHandler: {
+			connectionTimeout: 2_000,
+			requestTimeout: settings.requestTimeoutMs ?? 8_000,
+			throwOnRequestTimeout: true
+		},
 		// Older stores don't know the newer checksum trailers; our keys are the checksum.
 		requestChecksumCalculation: 'WHEN_REQUIRED',
 		responseChecksumValidation: 'WHEN_REQUIRED'
@@ -39,7 +50,8 @@ export function openObjectStore(settings: StoreSettings): ObjectStore {
 
 	return {
 		async put(key, bytes, contentType) {
-			const send = () => client.send(new PutObjectCommand({ ...at(key), Body: bytes, ContentType: contentType }));
+			const send = () =>
+				client.send(new PutObjectCommand({ ...at(key), Body: bytes, ContentType: contentType }));
 			await reached(async () => {
 				try {
 					await send();
@@ -59,7 +71,9 @@ export function openObjectStore(settings: StoreSettings): ObjectStore {
 			);
 		},
 		async head(key) {
-			const found = await reached(() => unlessMissing(() => client.send(new HeadObjectCommand(at(key)))));
+			const found = await reached(() =>
+				unlessMissing(() => client.send(new HeadObjectCommand(at(key))))
+			);
 			return found !== null;
 		},
 		close: () => client.destroy()
@@ -80,7 +94,9 @@ async function reached<T>(ask: () => Promise<T>): Promise<T> {
 	try {
 		return await ask();
 	} catch (error) {
-		throw new SteelyardError('store-away', { cause: error instanceof Error ? error.message : String(error) });
+		throw new SteelyardError('store-away', {
+			cause: error instanceof Error ? error.message : String(error)
+		});
 	}
 }
 

@@ -22,7 +22,10 @@ export const pieces = pgTable(
 		savedBy: person(),
 		savedAt: moment().notNull()
 	},
-	(table) => [unique('pieces_slug_unique').on(table.slug), index('pieces_saved_index').on(table.savedAt)]
+	(table) => [
+		unique('pieces_slug_unique').on(table.slug),
+		index('pieces_saved_index').on(table.savedAt)
+	]
 );
 
 /** Who has changed the draft since the last release, and when last: they can neither check nor pass it. */

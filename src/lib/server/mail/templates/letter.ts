@@ -14,8 +14,13 @@ export interface LetterParts {
 	foot: string;
 }
 
-export function writeLetter(houseName: string, { subject, paragraphs, link, foot }: LetterParts): Letter {
-	const text = [...paragraphs, `${link.words}:\n${link.href}`, `-- \n${foot}\n${houseName}`].join('\n\n');
+export function writeLetter(
+	houseName: string,
+	{ subject, paragraphs, link, foot }: LetterParts
+): Letter {
+	const text = [...paragraphs, `${link.words}:\n${link.href}`, `-- \n${foot}\n${houseName}`].join(
+		'\n\n'
+	);
 	const html = [
 		'<!doctype html><html lang="en"><head><meta charset="utf-8">',
 		`<title>${escapeHtml(subject)}</title></head>`,
@@ -34,7 +39,13 @@ function oneLine(text: string): string {
 	return text.replace(/[\u0000-\u001f\u007f]+/g, ' ').trim();
 }
 
-const ENTITIES: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
+const ENTITIES: Record<string, string> = {
+	'&': '&amp;',
+	'<': '&lt;',
+	'>': '&gt;',
+	'"': '&quot;',
+	"'": '&#39;'
+};
 
 function escapeHtml(text: string): string {
 	return text.replace(/[&<>"']/g, (character) => ENTITIES[character] ?? '');

@@ -6,7 +6,10 @@ export function queryAnswered(origin: string, { slug, title, by, claim }: QueryM
 	return {
 		subject: `Answer on ${claim}: ${title}`,
 		paragraphs: [`${by} has answered your question about claim ${claim} of “${title}”.`],
-		link: { words: 'Read it, and close the query or ask again', href: `${origin}${routes.check(slug)}` },
+		link: {
+			words: 'Read it, and close the query or ask again',
+			href: `${origin}${routes.check(slug)}`
+		},
 		foot: 'You get this because you asked.'
 	};
 }
