@@ -1,0 +1,55 @@
+/**
+ * What a partner pastes: an iframe in a sandbox, and under it a plain link that stays where a content system strips
+ * frames. No script. The height is kept free before the frame arrives, so that the page around it doesn't jump.
+ */
+import { routes } from './routes.ts';
+import { isTextBlock, type WidgetDocument } from './widget/document.ts';
+import { blockText, tokenWords } from './widget/places.ts';
+
+export function embedSnippet(release: { origin: string; slug: string; document: WidgetDocument }): string {
+	const { origin, slug, document } = release;
+	const title = escapeAttribute(document.title);
+	return `<iframe src="${escapeAttribute(origin + routes.frame(slug))}"
+  title="${title} – interactive explainer" loading="lazy"
+  sandbox="allow-scripts allow-popups allow-popups-to-escape-sandbox"
+  allow="" referrerpolicy="strict-origin-when-cross-origin"
+  style="display:block;width:100%;border:0;height:${reservedHeight(document)}"></iframe>
+<p><a href="${escapeAttribute(origin + routes.publicPage(slug))}">${title}: text version and who checked it</a></p>`;
+}
+
+/** Widths between which the kept height slides, and the heights of the parts there, in CSS pixels. */
+const NARROW = { width: 320, padding: 32, title: 30, letter: 8.6, line: 28, chart: 330, control: 112 };
+const WIDE = { width: 620, padding: 48, title: 34, letter: 8.6, line: 28, chart: 330, control: 100 };
+
+/**
+ * A CSS height that fits the frame from 320 px wide to 620 and beyond. Worked out from the copy's length; too much is
+ * kept rather than too little, since a frame that is too low scrolls inside the page.
+ */
+export function reservedHeight(document: WidgetDocument): string {
+	const narrow = Math.ceil(heightAt(document, NARROW) / 10) * 10;
+	const wide = Math.ceil(heightAt(document, WIDE) / 10) * 10;
+	if (narrow <= wide) return `${wide}px`;
+	const slope = (narrow - wide) / (WIDE.width - NARROW.width);
+	const base = Math.round(narrow + slope * NARROW.width);
+	return `clamp(${wide}px,calc(${base}px - ${Math.round(slope * 100)}vw),${narrow}px)`;
+}
+
+function heightAt(document: WidgetDocument, at: typeof NARROW): number {
+	const inner = at.width - at.padding;
+	const lines = (text: string) => Math.ceil((text.length * at.letter) / inner);
+	const blocks = document.blocks.reduce((sum, block) => {
+		if (isTextBlock(block)) return sum + lines(blockText(block, tokenWords)) * at.line + 16;
+		return sum + (block.kind === 'chart' ? at.chart : at.control);
+	}, 0);
+	const head = lines(document.title) * at.title + lines(document.point) * at.line + 24;
+	const foot = 140;
+	return at.padding + head + blocks + foot;
+}
+
+function escapeAttribute(text: string): string {
+	return text
+		.replaceAll('&', '&amp;')
+		.replaceAll('"', '&quot;')
+		.replaceAll('<', '&lt;')
+		.replaceAll('>', '&gt;');
+}

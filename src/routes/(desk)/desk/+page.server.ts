@@ -1,0 +1,42 @@
+import { CreatePiece } from '$lib/forms/create-piece.ts';
+import { routes } from '$lib/routes.ts';
+import { formFailure, pageFailure } from '$lib/server/http/failures.ts';
+import { createPiece, getPiece, listPieces } from '$lib/server/services/pieces.ts';
+import { can } from '$lib/workflow/permissions.ts';
+import { fail, redirect } from '@sveltejs/kit';
+import { superValidate } from 'sveltekit-superforms';
+import { zod4 } from 'sveltekit-superforms/adapters';
+import type { Actions, PageServerLoad } from './$types';
+import { inHand } from './in-hand.ts';
+
+export const load: PageServerLoad = async ({ locals: { context } }) => {
+	const { actor } = context;
+	const pieces = await listPieces(context).catch(pageFailure);
+	const inWork = actor && can(actor, 'read-proof')
+		? await Promise.all(
+				pieces
+					.filter(({ working }) => working !== 'at-rest')
+					.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
+			)
+		: [];
+	return {
+		now: context.now.toISOString(),
+		pieces,
+		hands: actor ? inHand(actor, inWork) : [],
+		slip: await superValidate(zod4(CreatePiece), { id: 'slip' })
+	};
+};
+
+export const actions: Actions = {
+	create: async ({ locals, request }) => {
+		const form = await superValidate(request, zod4(CreatePiece), { id: 'slip' });
+		if (!form.valid) return fail(400, { form });
+		let slug: string;
+		try {
+			({ slug } = await createPiece(locals.context, form.data));
+		} catch (thrown) {
+			return formFailure(form, thrown);
+		}
+		redirect(303, routes.manuscript(slug));
+	}
+};
