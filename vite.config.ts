@@ -1,9 +1,10 @@
 import { sveltekit } from '@sveltejs/kit/vite';
 import tailwindcss from '@tailwindcss/vite';
 import { defineConfig } from 'vitest/config';
+import { signs } from './embed/signs.ts';
 
 export default defineConfig({
-	plugins: [tailwindcss(), sveltekit()],
+	plugins: [signs(), tailwindcss(), sveltekit()],
 	build: {
 		// A font as a data: address would be refused by `font-src 'self'`.
 		assetsInlineLimit: (file) => (/\.(woff2?|ttf)$/.test(file) ? false : undefined)

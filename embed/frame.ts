@@ -16,8 +16,13 @@ interface Inlined {
 }
 
 async function wake(target: HTMLElement, { release, calculators }: Inlined): Promise<void> {
-	const loaded = await Promise.all(Object.entries(calculators).map(([id, address]) => loadCalculator(id, address)));
-	hydrate(Frame, { target, props: { release, calculators: new Map(loaded) satisfies CalculatorSet } });
+	const loaded = await Promise.all(
+		Object.entries(calculators).map(([id, address]) => loadCalculator(id, address))
+	);
+	hydrate(Frame, {
+		target,
+		props: { release, calculators: new Map(loaded) satisfies CalculatorSet }
+	});
 	document.documentElement.dataset.awake = '';
 	tellHeight();
 }

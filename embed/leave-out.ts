@@ -49,7 +49,10 @@ export function leaveOut(): Plugin {
 				const cut = CUTS.find(({ files }) => files.test(id));
 				if (!cut) return null;
 				const spans = membersToLeaveOut(this.parse(code) as unknown as Node, cut);
-				return spans.reduceRight((kept, [start, end]) => kept.slice(0, start) + kept.slice(end), code);
+				return spans.reduceRight(
+					(kept, [start, end]) => kept.slice(0, start) + kept.slice(end),
+					code
+				);
 			}
 		}
 	};
@@ -80,7 +83,9 @@ function spansIn(node: Node, { members }: Cut): [number, number][] {
 function childrenOf(node: Node): Node[] {
 	return Object.values(node)
 		.flatMap((member) => (Array.isArray(member) ? member : [member]))
-		.filter((member): member is Node => typeof member === 'object' && member !== null && 'type' in member);
+		.filter(
+			(member): member is Node => typeof member === 'object' && member !== null && 'type' in member
+		);
 }
 
 function keyOf(property: Node): string {

@@ -20,7 +20,8 @@ export function pressManifest(frameEntry: string): Plugin {
 			const style = names.find((name) => name.endsWith('.css'));
 			const fonts = names.filter((name) => name.endsWith('.woff2')).sort();
 			const copyFace = fonts.find((name) => name.startsWith('literata-'));
-			if (!frame || !style || !copyFace) throw new Error('The build lacks the frame, its style or its copy face.');
+			if (!frame || !style || !copyFace)
+				throw new Error('The build lacks the frame, its style or its copy face.');
 
 			const byName = new Map(chunks.map((chunk) => [chunk.fileName, chunk]));
 			const shared = new Set([frame.fileName, ...importsOf(frame, byName)]);
@@ -37,19 +38,25 @@ export function pressManifest(frameEntry: string): Plugin {
 				copyFace,
 				calculators: {}
 			};
-			for (const chunk of chunks.filter(({ isEntry, fileName }) => isEntry && fileName !== frame.fileName)) {
+			for (const chunk of chunks.filter(
+				({ isEntry, fileName }) => isEntry && fileName !== frame.fileName
+			)) {
 				const script = {
 					file: chunk.fileName,
 					imports: importsOf(chunk, byName).filter((name) => !shared.has(name))
 				};
-				for (const id of await calculatorIds(join(dir, chunk.fileName))) manifest.calculators[id] = script;
+				for (const id of await calculatorIds(join(dir, chunk.fileName)))
+					manifest.calculators[id] = script;
 			}
 			writeFileSync(join(dir, MANIFEST), JSON.stringify(manifest, null, '\t'));
 		}
 	};
 }
 
-function importsOf(chunk: Rolldown.OutputChunk | undefined, byName: Map<string, Rolldown.OutputChunk>): string[] {
+function importsOf(
+	chunk: Rolldown.OutputChunk | undefined,
+	byName: Map<string, Rolldown.OutputChunk>
+): string[] {
 	const found = new Set<string>();
 	const visit = ({ imports }: Rolldown.OutputChunk) => {
 		for (const name of imports) {

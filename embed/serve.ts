@@ -16,7 +16,8 @@ try {
 	process.stdout.write(`ready ${env.ORIGIN}\n`);
 } catch (error) {
 	// A bug shows where it is; what a person can mend is a sentence already.
-	const isBug = error instanceof TypeError || error instanceof ReferenceError || !(error instanceof Error);
-	process.stderr.write(`${isBug ? (error as Error).stack ?? String(error) : error.message}\n`);
+	const isBug =
+		error instanceof TypeError || error instanceof ReferenceError || !(error instanceof Error);
+	process.stderr.write(`${isBug ? ((error as Error).stack ?? String(error)) : error.message}\n`);
 	process.exit(1);
 }

@@ -33,13 +33,17 @@ export async function startServer(settings: ServerSettings): Promise<Server> {
 	const shelf = shelfOf(settings.dataFolder);
 	const report = await shelf.load();
 	if (report.damaged.length > 0) {
-		process.stderr.write(`Published copies on disk can’t be used and wait for the store: ${report.damaged.join(', ')}\n`);
+		process.stderr.write(
+			`Published copies on disk can’t be used and wait for the store: ${report.damaged.join(', ')}\n`
+		);
 	}
 	const answerFromShelf = shelfAnswers(shelf, { https: settings.origin.startsWith('https:') });
 
 	let pages: Promise<PageHandler> | undefined;
+	const guarded = guardHeaders(settings.origin);
 	const server = createServer((request, response) => {
 		if (answerFromShelf(request, response)) return;
+		response.setHeaders(guarded);
 		Promise.resolve(pages).then(
 			(handler) => (handler ? handler(request, response) : unavailable(response)),
 			() => unavailable(response)
@@ -63,14 +67,38 @@ export async function startServer(settings: ServerSettings): Promise<Server> {
 	return server;
 }
 
+/**
+ * What even a static file or a fault is answered with: the app's pages put their own policy over it.
+ * Files under /_app and /static are answered before the app's hooks run.
+ */
+function guardHeaders(origin: string): Map<string, string> {
+	const headers = new Map([
+		['Content-Security-Policy', "default-src 'none'; frame-ancestors 'none'"],
+		['Cross-Origin-Resource-Policy', 'same-origin'],
+		['Referrer-Policy', 'no-referrer'],
+		['X-Content-Type-Options', 'nosniff'],
+		['X-Frame-Options', 'DENY']
+	]);
+	if (origin.startsWith('https:')) {
+		headers.set('Strict-Transport-Security', 'max-age=63072000; includeSubDomains');
+	}
+	return headers;
+}
+
 function unavailable(response: ServerResponse): void {
-	response.writeHead(503, { 'Content-Type': 'text/plain; charset=utf-8', 'Retry-After': '2', 'Cache-Control': 'no-store' });
+	response.writeHead(503, {
+		'Content-Type': 'text/plain; charset=utf-8',
+		'Retry-After': '2',
+		'Cache-Control': 'no-store'
+	});
 	response.end('Starting. Try again in a moment.\n');
 }
 
 function listen(server: Server, { host, port }: ServerSettings): Promise<void> {
 	return new Promise((resolve, reject) => {
-		server.once('error', (error: NodeJS.ErrnoException) => reject(new Error(listenSentence(error, host, port))));
+		server.once('error', (error: NodeJS.ErrnoException) =>
+			reject(new Error(listenSentence(error, host, port)))
+		);
 		server.listen(port, host, () => {
 			server.removeAllListeners('error');
 			resolve();
@@ -95,9 +123,10 @@ function listenSentence(error: NodeJS.ErrnoException, host: string, port: number
 /** Stops taking connections, lets answers under way finish, closes the app, and resolves when all of it is done. */
 export async function stopServer(server: Server, reason: string): Promise<void> {
 	const closed = new Promise<void>((resolve) => server.close(() => resolve()));
-	server.closeIdleConnections();
+	const idle = setInterval(() => server.closeIdleConnections(), 50);
 	const late = setTimeout(() => server.closeAllConnections(), DRAIN);
 	await closed;
+	clearInterval(idle);
 	clearTimeout(late);
 	// The adapter's own event, awaited: the database is closed by one of its listeners.
 	const events: EventEmitter = process;

@@ -20,7 +20,11 @@ export function signs(): Plugin {
 		name: 'steelyard:signs',
 		async config(config) {
 			const root = config.root ?? process.cwd();
-			return { resolve: { alias: { [ADDRESS]: await cutSigns(join(root, 'node_modules/.cache/steelyard')) } } };
+			return {
+				resolve: {
+					alias: { [ADDRESS]: await cutSigns(join(root, 'node_modules/.cache/steelyard')) }
+				}
+			};
 		}
 	};
 }

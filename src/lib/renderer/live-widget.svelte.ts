@@ -11,7 +11,8 @@ import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../wi
 import { settingStated } from '../widget/places.ts';
 import { printStated, stateReading } from '../widget/stated.ts';
 import { snapToGrid } from './controls/grid.ts';
-import type { ClaimRecords } from './records.ts';
+import type { ClaimRecord } from './records.ts';
+import type { Released } from './release.ts';
 
 /** What stands where a number is printed: its words, or the sentence that says why there is none. */
 export type Printed = { ok: true; words: string } | { ok: false; refusal: Refusal };
@@ -27,13 +28,15 @@ export class LiveWidget {
 	/** True once the page answers to the reader. */
 	awake = $state(false);
 
-	evaluation: Evaluation = $derived.by(() => evaluate(this.#document(), this.values, this.#calculators()));
+	evaluation: Evaluation = $derived.by(() =>
+		evaluate(this.#document(), this.values, this.#calculators())
+	);
 
 	constructor(
 		document: () => WidgetDocument,
 		calculators: () => CalculatorSet,
-		/** How each claim is known, by claim id; null where nobody may ask, as in the manuscript. */
-		readonly records: ClaimRecords | null = null
+		/** What was worked out when the piece was released; null in the office, where everything is worked out anew. */
+		readonly released: Released | null = null
 	) {
 		this.#document = document;
 		this.#calculators = calculators;
@@ -45,6 +48,12 @@ export class LiveWidget {
 
 	get calculators(): CalculatorSet {
 		return this.#calculators();
+	}
+
+	/** How a claim is known; undefined where nobody may ask. */
+	record(claimId: string): ClaimRecord | undefined {
+		const { records } = this.released ?? {};
+		return records && Object.hasOwn(records, claimId) ? records[claimId] : undefined;
 	}
 
 	get atStart(): boolean {
@@ -84,7 +93,8 @@ export class LiveWidget {
 		const { value, unit } = outcome.reading;
 		if (typeof value === 'string') return { ok: true, words: value };
 		if (!Number.isFinite(value)) return noNumber('There is no number to give at this setting.');
-		if (!commensurable(unit, claim.unit)) return noNumber(`This reading can’t be given in ${claim.unit || 'plain numbers'}.`);
+		if (!commensurable(unit, claim.unit))
+			return noNumber(`This reading can’t be given in ${claim.unit || 'plain numbers'}.`);
 		return { ok: true, words: printStated(stateReading(value, unit, claim)) };
 	}
 

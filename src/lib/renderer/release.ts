@@ -2,7 +2,17 @@
 import type { WidgetDocument } from '../widget/document.ts';
 import type { ClaimRecords } from './records.ts';
 
-export interface FrameRelease {
+/** Worked out once, when the piece is released. */
+export interface Released {
+	records: ClaimRecords;
+	/**
+	 * The lines of charts at the first settings, by block id: readings in the chart's unit at even steps over the range of
+	 * its control, null where refused. With them a frame wakes without working each line again.
+	 */
+	curves: Readonly<Record<string, readonly (number | null)[]>>;
+}
+
+export interface FrameRelease extends Released {
 	slug: string;
 	number: number;
 	/** ISO 8601. */
@@ -13,5 +23,4 @@ export interface FrameRelease {
 	document: WidgetDocument;
 	/** SHA-256 of the frozen proof, in hex. */
 	digest: string;
-	records: ClaimRecords;
 }

@@ -14,7 +14,10 @@ const age: Control = {
 };
 
 test('a link sets a control', () => {
-	expect(settingsInLink('#wave-age=270', [age])).toEqual({ values: { 'wave-age': 270 }, notice: '' });
+	expect(settingsInLink('#wave-age=270', [age])).toEqual({
+		values: { 'wave-age': 270 },
+		notice: ''
+	});
 });
 
 test('a link between steps takes the nearest', () => {
@@ -29,9 +32,16 @@ test('a link past the end stands at the end, and says so', () => {
 	);
 });
 
-test.each(['', '#', '#wave-age=', '#wave-age=NaN', '#wave-age=Infinity', '#wave-age=<b>', '#__proto__=1', '#other=3', '#%'])(
-	'%s sets nothing',
-	(fragment) => {
-		expect(settingsInLink(fragment, [age])).toEqual({ values: {}, notice: '' });
-	}
-);
+test.each([
+	'',
+	'#',
+	'#wave-age=',
+	'#wave-age=NaN',
+	'#wave-age=Infinity',
+	'#wave-age=<b>',
+	'#__proto__=1',
+	'#other=3',
+	'#%'
+])('%s sets nothing', (fragment) => {
+	expect(settingsInLink(fragment, [age])).toEqual({ values: {}, notice: '' });
+});

@@ -34,5 +34,11 @@ export function settingsInLink(fragment: string, controls: readonly Control[]): 
 
 function inWords(value: number, unit: string): string {
 	const known = unitOf(unit) ? unit : '';
-	return printStated({ hedge: 'bare', hedgeWord: '', numeral: plainDecimal(value), scale: 1, unit: known });
+	return printStated({
+		hedge: 'bare',
+		hedgeWord: '',
+		numeral: plainDecimal(value),
+		scale: 1,
+		unit: known
+	});
 }

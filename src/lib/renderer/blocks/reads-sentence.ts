@@ -13,7 +13,8 @@ export function readsSentence(outcome: ReadingOutcome, unit: string | null): str
 	if (!outcome.ok) return outcome.refusal.message;
 	const { value, uncertainty } = outcome.reading;
 	if (typeof value === 'string') return `The calculator reads ${value}.`;
-	const inUnit = unit !== null && commensurable(outcome.reading.unit, unit) ? unit : outcome.reading.unit;
+	const inUnit =
+		unit !== null && commensurable(outcome.reading.unit, unit) ? unit : outcome.reading.unit;
 	const figures = uncertainty === 'exact' ? EXACT_FIGURES : FIGURES;
 	const give = giveOrTake(value, uncertainty, outcome.reading.unit, inUnit);
 	const reads = quantity(convert(value, outcome.reading.unit, inUnit), figures, inUnit);
@@ -21,7 +22,12 @@ export function readsSentence(outcome: ReadingOutcome, unit: string | null): str
 }
 
 /** Twice the standard uncertainty, to one figure: where the true value lies nineteen times in twenty. */
-function giveOrTake(value: number, uncertainty: Reading['uncertainty'], from: string, to: string): string {
+function giveOrTake(
+	value: number,
+	uncertainty: Reading['uncertainty'],
+	from: string,
+	to: string
+): string {
 	if (typeof uncertainty !== 'number' || uncertainty === 0) return '';
 	const twice = Math.abs(convert(value + 2 * uncertainty, from, to) - convert(value, from, to));
 	return twice > 0 ? `, give or take ${quantity(twice, 1, to)}` : '';

@@ -34,6 +34,7 @@ function stepsToEnd({ min, max, step }: Grid): number {
 }
 
 function decimals(value: number): number {
-	const [, fraction = '', exponent = '0'] = /^-?\d+(?:\.(\d+))?(?:e([+-]\d+))?$/.exec(String(value)) ?? [];
+	const [, fraction = '', exponent = '0'] =
+		/^-?\d+(?:\.(\d+))?(?:e([+-]\d+))?$/.exec(String(value)) ?? [];
 	return Math.min(100, Math.max(0, fraction.length - Number(exponent)));
 }

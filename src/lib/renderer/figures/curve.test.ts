@@ -12,7 +12,10 @@ test('the upright scale has round ends and holds the line', () => {
 });
 
 test('a level line still gets a scale, and no points get none', () => {
-	const scale = yScale([{ x: 0, y: 7 }, { x: 1, y: 7 }]);
+	const scale = yScale([
+		{ x: 0, y: 7 },
+		{ x: 1, y: 7 }
+	]);
 	expect(scale && scale.from < 7 && scale.to > 7).toBe(true);
 	expect(yScale([{ x: 0, y: 0 }])).toEqual({ from: -1, to: 1 });
 	expect(yScale([{ x: 0, y: null }])).toBeNull();
@@ -33,7 +36,10 @@ test('a refused reading leaves a gap', () => {
 });
 
 test('a band is cut to the scale, or left out', () => {
-	expect(bandOnScale({ from: 87.5, to: 108 }, { from: 40, to: 100 })).toEqual({ from: 87.5, to: 100 });
+	expect(bandOnScale({ from: 87.5, to: 108 }, { from: 40, to: 100 })).toEqual({
+		from: 87.5,
+		to: 100
+	});
 	expect(bandOnScale({ from: 200, to: 300 }, { from: 40, to: 100 })).toBeNull();
 });
 

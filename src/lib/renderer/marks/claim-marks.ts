@@ -22,21 +22,21 @@ export const level: Drawing = {
 	strokes: [HOOK, { d: BEAM }, FEET, RIDER]
 };
 
-export const claimMarks = {
+const drawings = {
 	unweighed: {
 		word: 'not weighed',
 		ink: 'slate',
-		strokes: [HOOK, { d: 'M1.5 11h4.5M8 11h8M18 11h4.5' }, { d: 'M3 11v3M21 11v3', dash: '1.5 1.5' }]
+		strokes: [
+			HOOK,
+			{ d: 'M1.5 11h4.5M8 11h8M18 11h4.5' },
+			{ d: 'M3 11v3M21 11v3', dash: '1.5 1.5' }
+		]
 	},
 	level,
 	leans: {
 		word: 'leans: decide',
 		ink: 'brass',
-		strokes: [
-			HOOK,
-			{ d: BEAM, turn: 10 },
-			{ d: 'M15 12.8h4.4v4.4H15z', width: 1.8, turn: 10 }
-		]
+		strokes: [HOOK, { d: BEAM, turn: 10 }, { d: 'M15 12.8h4.4v4.4H15z', width: 1.8, turn: 10 }]
 	},
 	tips: {
 		word: 'tips: doesn’t fit',
@@ -124,4 +124,6 @@ export const claimMarks = {
 	}
 } satisfies Record<string, Drawing>;
 
-export type ClaimMark = keyof typeof claimMarks;
+export type ClaimMark = keyof typeof drawings;
+
+export const claimMarks: Record<ClaimMark, Drawing> = drawings;
