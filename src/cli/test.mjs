@@ -23,7 +23,7 @@ const STAGES = [
 	{ name: 'lint', title: 'Lint', command: npmRun('lint') },
 	{ name: 'format', title: 'Format', command: npmRun('format:check') },
 	{ name: 'unit', title: 'Unit tests', project: 'unit' },
-	{ name: 'database', title: 'Database tests', project: 'database' },
+	{ name: 'database', title: 'Database tests', project: 'database', needs: ['build'] },
 	{ name: 'browser', title: 'Browser tests', project: 'browser', needs: ['build', 'chromium'] }
 ];
 

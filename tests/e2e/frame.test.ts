@@ -391,7 +391,7 @@ test('every calculator of the catalogue is in the build', async () => {
 });
 
 /** gzip -9, in bytes. The runtime that draws is 15 kB of the script; see DEVELOPERS.md for what would lower it. */
-const BUDGET = { document: 10_000, script: 44_000, everything: 150_000 };
+const BUDGET = { document: 10_000, script: 46_000, everything: 150_000 };
 
 test('the frame keeps to its budget', async () => {
 	const size = (keys: (key: string) => boolean) =>

@@ -62,7 +62,7 @@ const SOURCES = [
 	'package-lock.json'
 ];
 /** Changes here change nothing that is built. */
-const NOT_BUILT = [/\.test\.ts$/, /^src\/cli\//];
+const NOT_BUILT = [/\.test\.ts$/, /^src\/cli\//, /(^|\/)node_modules\//];
 
 function* filesUnder(path) {
 	const entries = readdirSync(path, { withFileTypes: true });
