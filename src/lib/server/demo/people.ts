@@ -15,5 +15,11 @@ export const DEMO_PEOPLE = {
 	mateus: { email: 'mateus@varrowmere.example', name: 'Dr Mateus Quevarro', roles: ['scientist'] },
 	ama: { email: 'ama@varrowmere.example', name: 'Dr Ama Tindleforth', roles: ['scientist'] },
 	perpetua: { email: 'perpetua@varrowmere.example', name: 'Perpetua Lindqvane', roles: ['editor'] },
+	/** The deputy holds two roles, and may use only one of them on any one proof. */
+	anselm: {
+		email: 'anselm@varrowmere.example',
+		name: 'Anselm Torviq',
+		roles: ['scientist', 'editor']
+	},
 	juno: { email: 'juno@varrowmere.example', name: 'Juno Castellmere', roles: ['admin'] }
 } as const satisfies Record<string, DemoPerson>;

@@ -1,0 +1,232 @@
+/**
+ * Keeps the draft: into this browser's journal at once, to the server a moment later, and says where it stands.
+ * Nothing here is thrown away until the server has said that it keeps it.
+ */
+import type { WidgetDocument } from '../widget/document.ts';
+import type { Journal, JournalEntry } from './journal.ts';
+
+/** How long typing rests before the server is asked to keep it. */
+const REST_MS = 400;
+/** A writer who never rests is kept this often. */
+const LONGEST_WAIT_MS = 2_000;
+const JOURNAL_MS = 200;
+const FIRST_RETRY_MS = 1_000;
+const LONGEST_RETRY_MS = 15_000;
+
+export type KeepState =
+	| { name: 'kept' }
+	| { name: 'unsynced' }
+	| { name: 'keeping' }
+	/** The server doesn't answer; `nextTry` counts from 1. */
+	| { name: 'away'; tries: number }
+	| { name: 'signed-out' }
+	| { name: 'conflict'; theirs: TheirVersion }
+	| { name: 'refused'; issues: string[] };
+
+export interface TheirVersion {
+	version: number;
+	savedAt: string;
+	savedBy: string;
+	document: unknown;
+}
+
+export interface Kept {
+	version: number;
+	/** ISO 8601, UTC. */
+	savedAt: string;
+}
+
+export interface AutosaveParts {
+	address: string;
+	journal: Journal;
+	fetch: typeof fetch;
+	now: () => Date;
+	/** The draft as it stands; called when it is about to be kept. */
+	draft: () => WidgetDocument;
+}
+
+export class Autosave {
+	state = $state.raw<KeepState>({ name: 'kept' });
+	/** When the server last said “kept”; ISO 8601, UTC. */
+	keptAt = $state('');
+	version = $state(0);
+
+	#parts: AutosaveParts;
+	#keepTimer: ReturnType<typeof setTimeout> | undefined;
+	#journalTimer: ReturnType<typeof setTimeout> | undefined;
+	#waitingSince: number | null = null;
+	#changesMade = 0;
+	#sending = false;
+
+	constructor(parts: AutosaveParts, kept: Kept) {
+		this.#parts = parts;
+		this.version = kept.version;
+		this.keptAt = kept.savedAt;
+	}
+
+	get isSynced(): boolean {
+		return this.state.name === 'kept';
+	}
+
+	/** To be called on every change of the draft. */
+	changed(): void {
+		this.#changesMade += 1;
+		const { name } = this.state;
+		if (name === 'kept' || name === 'refused') this.state = { name: 'unsynced' };
+		this.#journalTimer ??= setTimeout(() => void this.flushJournal(), JOURNAL_MS);
+		// A conflict waits for the writer, a lost sign-in and an away server for their own next try.
+		if (name === 'conflict' || name === 'signed-out' || name === 'away') return;
+		this.#keepSoon();
+	}
+
+	#keepSoon(): void {
+		const now = this.#parts.now().getTime();
+		this.#waitingSince ??= now;
+		const wait = Math.max(0, Math.min(REST_MS, this.#waitingSince + LONGEST_WAIT_MS - now));
+		clearTimeout(this.#keepTimer);
+		this.#keepTimer = setTimeout(() => void this.keep(), wait);
+	}
+
+	/** Writes the journal now: on its timer, and when the page goes away. */
+	async flushJournal(): Promise<void> {
+		clearTimeout(this.#journalTimer);
+		this.#journalTimer = undefined;
+		if (this.isSynced) return;
+		await this.#parts.journal.write(this.#entry());
+	}
+
+	#entry(): JournalEntry {
+		// The journal outlives this page, so it takes plain data, not the editor's own objects.
+		const document: unknown = JSON.parse(JSON.stringify(this.#parts.draft()));
+		return { baseVersion: this.version, document, at: this.#parts.now().toISOString() };
+	}
+
+	/** Asks the server to keep the draft as it stands; tries again by itself while the server is away. */
+	async keep(): Promise<void> {
+		clearTimeout(this.#keepTimer);
+		if (this.#sending) return this.#keepSoon();
+		this.#sending = true;
+		this.#waitingSince = null;
+		const sentChanges = this.#changesMade;
+		const tries = this.state.name === 'away' ? this.state.tries : 0;
+		if (tries === 0) this.state = { name: 'keeping' };
+		try {
+			const response = await this.#parts.fetch(this.#parts.address, {
+				method: 'PUT',
+				headers: { 'content-type': 'application/json' },
+				body: JSON.stringify({ baseVersion: this.version, document: this.#parts.draft() })
+			});
+			await this.#settle(response, sentChanges, tries);
+		} catch (error) {
+			// Only the network fails here: the answer's own troubles are states.
+			if (!(error instanceof TypeError) && !(error instanceof SyntaxError)) throw error;
+			this.#tryLater(tries);
+		} finally {
+			this.#sending = false;
+		}
+	}
+
+	async #settle(response: Response, sentChanges: number, tries: number): Promise<void> {
+		if (response.ok) {
+			const kept = (await response.json()) as Kept;
+			this.version = kept.version;
+			this.keptAt = kept.savedAt;
+			if (this.#changesMade === sentChanges) {
+				this.state = { name: 'kept' };
+				clearTimeout(this.#journalTimer);
+				this.#journalTimer = undefined;
+				await this.#parts.journal.clear();
+				return;
+			}
+			this.state = { name: 'unsynced' };
+			this.#keepSoon();
+			return;
+		}
+		await this.flushJournal();
+		switch (response.status) {
+			case 401:
+				this.state = { name: 'signed-out' };
+				return;
+			case 409:
+				this.state = { name: 'conflict', theirs: theirVersion(await response.json()) };
+				return;
+			case 422:
+			case 413:
+			case 403:
+				this.state = { name: 'refused', issues: issuesOf(await response.json()) };
+				return;
+			default:
+				this.#tryLater(tries);
+		}
+	}
+
+	#tryLater(tries: number): void {
+		this.state = { name: 'away', tries: tries + 1 };
+		const wait = Math.min(LONGEST_RETRY_MS, FIRST_RETRY_MS * 2 ** tries);
+		this.#keepTimer = setTimeout(() => void this.keep(), wait);
+	}
+
+	/** After a sign-in in another tab, or when the writer doesn't want to wait. */
+	tryNow(): Promise<void> {
+		if (this.state.name === 'conflict') return Promise.resolve();
+		this.state = { name: 'unsynced' };
+		return this.keep();
+	}
+
+	/** Keeps this browser's words as the newest version, on top of theirs, which are set aside here. */
+	async keepMine(): Promise<void> {
+		if (this.state.name !== 'conflict') return;
+		const { version, savedAt, document } = this.state.theirs;
+		await this.#parts.journal.setAside({ baseVersion: version, at: savedAt, document });
+		this.version = version;
+		this.state = { name: 'unsynced' };
+		return this.keep();
+	}
+
+	/** Sets this browser's words aside and goes on from theirs; the caller puts their words into the editor. */
+	async takeTheirs(): Promise<TheirVersion | null> {
+		if (this.state.name !== 'conflict') return null;
+		const { theirs } = this.state;
+		await this.#parts.journal.setAside(this.#entry());
+		await this.#parts.journal.clear();
+		this.version = theirs.version;
+		this.keptAt = theirs.savedAt;
+		this.state = { name: 'kept' };
+		return theirs;
+	}
+
+	/** Words in the journal grew from an older version than the server's: the writer decides. */
+	meetConflict(theirs: TheirVersion): void {
+		this.state = { name: 'conflict', theirs };
+	}
+
+	stop(): void {
+		clearTimeout(this.#keepTimer);
+		clearTimeout(this.#journalTimer);
+	}
+}
+
+interface ConflictDetails {
+	version: number;
+	savedAt: string;
+	savedBy: { name: string };
+	document: unknown;
+}
+
+/** The 409 answer's details: who saved what, when. */
+function theirVersion(body: unknown): TheirVersion {
+	const { version, savedAt, savedBy, document } = (body as { error: { details: ConflictDetails } })
+		.error.details;
+	return { version, savedAt, savedBy: savedBy.name, document };
+}
+
+function issuesOf(body: unknown): string[] {
+	const { error } = body as {
+		error?: { message?: string; help?: string; details?: { issues?: { message: string }[] } };
+	};
+	const issues = error?.details?.issues?.map(({ message }) => message) ?? [];
+	if (issues.length > 0) return issues;
+	return [
+		[error?.message, error?.help].filter(Boolean).join(' ') || 'The server can’t keep this draft.'
+	];
+}

@@ -1,0 +1,263 @@
+import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest';
+import type { WidgetDocument } from '../widget/document.ts';
+import { Autosave } from './autosave.svelte.ts';
+import type { Journal, JournalEntry } from './journal.ts';
+
+const EMPTY: WidgetDocument = {
+	version: 1,
+	language: 'en',
+	constants: '2026.1',
+	title: '',
+	point: '',
+	steps: [],
+	controls: [],
+	blocks: [],
+	claims: []
+};
+
+class MemoryJournal implements Journal {
+	entry: JournalEntry | null = null;
+	aside: JournalEntry[] = [];
+	read = () => Promise.resolve(this.entry);
+	write = (entry: JournalEntry) => {
+		this.entry = entry;
+		return Promise.resolve();
+	};
+	clear = () => {
+		this.entry = null;
+		return Promise.resolve();
+	};
+	setAside = (entry: JournalEntry) => {
+		this.aside.push(entry);
+		return Promise.resolve();
+	};
+}
+
+/** A server that keeps versions as the real one does, and can be taken away. */
+class Server {
+	version = 1;
+	document: WidgetDocument = EMPTY;
+	away = false;
+	answer: Response | null = null;
+	requests: { baseVersion: number; document: WidgetDocument }[] = [];
+
+	fetch = (_address: unknown, init?: RequestInit): Promise<Response> => {
+		if (this.away) return Promise.reject(new TypeError('fetch failed'));
+		const body = JSON.parse(init?.body as string) as Server['requests'][number];
+		this.requests.push(body);
+		if (this.answer) return Promise.resolve(this.answer.clone());
+		if (body.baseVersion !== this.version) {
+			return Promise.resolve(
+				Response.json(
+					{
+						error: {
+							code: 'version-conflict',
+							details: {
+								version: this.version,
+								savedAt: '2026-12-08T09:02:00.000Z',
+								savedBy: { personId: 'p-2', name: 'Kofi Adjarra-Lund' },
+								document: this.document
+							}
+						}
+					},
+					{ status: 409 }
+				)
+			);
+		}
+		this.version += 1;
+		this.document = body.document;
+		return Promise.resolve(
+			Response.json({ version: this.version, savedAt: new Date().toISOString() })
+		);
+	};
+}
+
+describe('autosave', () => {
+	let server: Server;
+	let journal: MemoryJournal;
+	let title: string;
+	let autosave: Autosave;
+
+	const type = (text: string) => {
+		title += text;
+		autosave.changed();
+	};
+	const pass = (ms: number) => vi.advanceTimersByTimeAsync(ms);
+
+	beforeEach(() => {
+		vi.useFakeTimers({ now: new Date('2026-12-08T09:00:00Z') });
+		server = new Server();
+		journal = new MemoryJournal();
+		title = '';
+		autosave = new Autosave(
+			{
+				address: '/api/pieces/first-light/draft',
+				journal,
+				fetch: server.fetch,
+				now: () => new Date(),
+				draft: () => ({ ...EMPTY, title })
+			},
+			{ version: 1, savedAt: '2026-12-08T08:59:00.000Z' }
+		);
+	});
+
+	afterEach(() => {
+		autosave.stop();
+		vi.useRealTimers();
+	});
+
+	test('a pause of 400 ms after typing keeps the draft once', async () => {
+		type('F');
+		await pass(300);
+		type('i');
+		await pass(399);
+		expect(server.requests).toHaveLength(0);
+		expect(autosave.state.name).toBe('unsynced');
+		await pass(1);
+		expect(server.requests).toEqual([{ baseVersion: 1, document: { ...EMPTY, title: 'Fi' } }]);
+		expect(autosave.state.name).toBe('kept');
+		expect(autosave.version).toBe(2);
+		expect(autosave.keptAt).toBe('2026-12-08T09:00:00.700Z');
+	});
+
+	test('typing without a pause is kept every two seconds all the same', async () => {
+		for (let i = 0; i < 30; i += 1) {
+			type('x');
+			await pass(100);
+		}
+		expect(server.requests.length).toBeGreaterThanOrEqual(1);
+	});
+
+	test('the journal has the words within 200 ms and is cleared when the server says kept', async () => {
+		type('F');
+		await pass(200);
+		expect(journal.entry).toMatchObject({ baseVersion: 1, document: { title: 'F' } });
+		await pass(200);
+		expect(autosave.state.name).toBe('kept');
+		expect(journal.entry).toBeNull();
+	});
+
+	test('a server that goes away loses nothing, and gets everything when it is back', async () => {
+		server.away = true;
+		type('First');
+		await pass(400);
+		expect(autosave.state).toEqual({ name: 'away', tries: 1 });
+		type(' light');
+		await pass(200);
+		expect(journal.entry).toMatchObject({ document: { title: 'First light' } });
+		await pass(5_000);
+		expect(autosave.state.name).toBe('away');
+		server.away = false;
+		await pass(15_000);
+		expect(autosave.state.name).toBe('kept');
+		expect(server.document.title).toBe('First light');
+		expect(journal.entry).toBeNull();
+	});
+
+	test('retries back off and never wait longer than 15 s', async () => {
+		server.away = true;
+		const tries: number[] = [];
+		type('x');
+		for (let second = 0; second < 60; second += 1) {
+			await pass(1_000);
+			if (autosave.state.name === 'away') tries.push(autosave.state.tries);
+		}
+		expect(tries.at(-1)).toBeGreaterThanOrEqual(6);
+		expect(tries.at(-1)).toBeLessThanOrEqual(9);
+	});
+
+	test('words typed while the server is answering are sent after', async () => {
+		let answer: (response: Response) => void = () => undefined;
+		const fetchOnce = vi
+			.fn(server.fetch)
+			.mockImplementationOnce(() => new Promise((resolve) => (answer = resolve)));
+		autosave = new Autosave(
+			{
+				address: '/x',
+				journal,
+				fetch: fetchOnce,
+				now: () => new Date(),
+				draft: () => ({ ...EMPTY, title })
+			},
+			{ version: 1, savedAt: '' }
+		);
+		type('a');
+		await pass(400);
+		type('b');
+		answer(Response.json({ version: 1, savedAt: '2026-12-08T09:00:01.000Z' }));
+		await pass(0);
+		expect(autosave.state.name).toBe('unsynced');
+		await pass(1_000);
+		expect(server.document.title).toBe('ab');
+		expect(autosave.state.name).toBe('kept');
+	});
+
+	test('a lost sign-in keeps the text and goes on after signing in again', async () => {
+		server.answer = Response.json({ error: { code: 'not-signed-in' } }, { status: 401 });
+		type('x');
+		await pass(400);
+		expect(autosave.state.name).toBe('signed-out');
+		expect(journal.entry).toMatchObject({ document: { title: 'x' } });
+		type('y');
+		await pass(2_000);
+		expect(server.requests).toHaveLength(1);
+		server.answer = null;
+		await autosave.tryNow();
+		expect(server.document.title).toBe('xy');
+	});
+
+	test('a refused draft shows what is wrong, and the next change tries again', async () => {
+		server.answer = Response.json(
+			{
+				error: {
+					message: 'This document doesn’t hang together.',
+					details: { issues: [{ message: 'Cut one tie.' }] }
+				}
+			},
+			{ status: 422 }
+		);
+		type('x');
+		await pass(400);
+		expect(autosave.state).toEqual({ name: 'refused', issues: ['Cut one tie.'] });
+		server.answer = null;
+		type('y');
+		await pass(400);
+		expect(autosave.state.name).toBe('kept');
+	});
+
+	describe('when someone else saved in between', () => {
+		beforeEach(async () => {
+			server.version = 4;
+			server.document = { ...EMPTY, title: 'Theirs' };
+			type('Mine');
+			await pass(400);
+		});
+
+		test('the conflict says who and when, and waits', async () => {
+			expect(autosave.state).toMatchObject({
+				name: 'conflict',
+				theirs: { version: 4, savedBy: 'Kofi Adjarra-Lund' }
+			});
+			expect(journal.entry).toMatchObject({ document: { title: 'Mine' } });
+			type('!');
+			await pass(5_000);
+			expect(server.requests).toHaveLength(1);
+		});
+
+		test('keep mine puts these words on top of theirs', async () => {
+			await autosave.keepMine();
+			expect(server.document.title).toBe('Mine');
+			expect(journal.aside).toMatchObject([{ baseVersion: 4, document: { title: 'Theirs' } }]);
+			expect(server.version).toBe(5);
+			expect(autosave.state.name).toBe('kept');
+		});
+
+		test('load theirs sets mine aside in the journal', async () => {
+			const theirs = await autosave.takeTheirs();
+			expect(theirs?.document).toMatchObject({ title: 'Theirs' });
+			expect(journal.aside).toMatchObject([{ document: { title: 'Mine' } }]);
+			expect(autosave.version).toBe(4);
+			expect(autosave.isSynced).toBe(true);
+		});
+	});
+});

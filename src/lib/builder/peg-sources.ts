@@ -1,0 +1,51 @@
+/** What a peg can be fed from: readings and sliders in units that convert, and never a ring. */
+import { resolveUnit, type Calculator } from '../physics/calculator.ts';
+import { commensurable, units, type Unit } from '../physics/units/units.ts';
+import type { Control, SettingSource, Step } from '../widget/document.ts';
+import { wiringOf } from '../widget/graph.ts';
+import { fixedSettings } from '../widget/tie-units.ts';
+import type { BenchReading } from './bench-readings.ts';
+
+/** The unit a numeric setting has, given the step's choices; null for choices and parameter sets. */
+export function pegUnit(step: Step, calculator: Calculator, key: string): string | null {
+	const spec = calculator.inputs[key];
+	return spec?.kind === 'number' ? resolveUnit(spec.unit, fixedSettings(step)) : null;
+}
+
+/** Units a field may be typed in. Plain numbers stay plain: a factor isn't a per cent by accident. */
+export function unitsLike(symbol: string): readonly Unit[] {
+	if (symbol === '') return units.filter((unit) => unit.symbol === '');
+	return units.filter((unit) => unit.symbol !== '' && commensurable(unit.symbol, symbol));
+}
+
+export function readingsForPeg(
+	steps: readonly Step[],
+	step: Step,
+	unit: string,
+	readings: readonly BenchReading[]
+): BenchReading[] {
+	return readings.filter(({ ref, outcome, tag }) => {
+		if (tag === '' || 'control' in ref || !('output' in ref)) return false;
+		if (wiringOf(steps, ref).steps.some(({ id }) => id === step.id)) return false;
+		return outcome.ok && commensurable(outcome.reading.unit, unit);
+	});
+}
+
+export function controlsForPeg(controls: readonly Control[], unit: string): Control[] {
+	return controls.filter((control) => commensurable(control.unit, unit));
+}
+
+/** One string for each source, for a list to choose from. */
+export function sourceKey(source: SettingSource | undefined): string {
+	if (!source) return 'none';
+	switch (source.from) {
+		case 'fixed':
+			return 'fixed';
+		case 'line':
+			return 'line';
+		case 'control':
+			return `control ${source.control}`;
+		case 'reading':
+			return `reading ${source.step} ${source.output}`;
+	}
+}
