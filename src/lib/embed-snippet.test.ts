@@ -21,13 +21,18 @@ test('a title can’t break out of its attribute', () => {
 });
 
 test('longer copy keeps more room, and a narrow frame more than a wide one', () => {
-	const [, wide = 0, narrow = 0] = /clamp\((\d+)px,.*,(\d+)px\)/.exec(reservedHeight(firstLight))?.map(Number) ?? [];
+	const [, wide = 0, narrow = 0] =
+		/clamp\((\d+)px,.*,(\d+)px\)/.exec(reservedHeight(firstLight))?.map(Number) ?? [];
 	expect(narrow).toBeGreaterThan(wide);
 	const longer = {
 		...firstLight,
 		blocks: [
 			...firstLight.blocks,
-			{ id: 'more', kind: 'paragraph' as const, content: [{ kind: 'text' as const, text: 'More. '.repeat(80) }] }
+			{
+				id: 'more',
+				kind: 'paragraph' as const,
+				content: [{ kind: 'text' as const, text: 'More. '.repeat(80) }]
+			}
 		]
 	};
 	const [, longerWide = 0] = /clamp\((\d+)px/.exec(reservedHeight(longer))?.map(Number) ?? [];

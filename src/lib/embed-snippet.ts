@@ -6,7 +6,11 @@ import { routes } from './routes.ts';
 import { isTextBlock, type WidgetDocument } from './widget/document.ts';
 import { blockText, tokenWords } from './widget/places.ts';
 
-export function embedSnippet(release: { origin: string; slug: string; document: WidgetDocument }): string {
+export function embedSnippet(release: {
+	origin: string;
+	slug: string;
+	document: WidgetDocument;
+}): string {
 	const { origin, slug, document } = release;
 	const title = escapeAttribute(document.title);
 	return `<iframe src="${escapeAttribute(origin + routes.frame(slug))}"
@@ -18,8 +22,24 @@ export function embedSnippet(release: { origin: string; slug: string; document: 
 }
 
 /** Widths between which the kept height slides, and the heights of the parts there, in CSS pixels. */
-const NARROW = { width: 320, padding: 32, title: 30, letter: 8.6, line: 28, chart: 330, control: 112 };
-const WIDE = { width: 620, padding: 48, title: 34, letter: 8.6, line: 28, chart: 330, control: 100 };
+const NARROW = {
+	width: 320,
+	padding: 32,
+	title: 30,
+	letter: 8.6,
+	line: 28,
+	chart: 330,
+	control: 112
+};
+const WIDE = {
+	width: 620,
+	padding: 48,
+	title: 34,
+	letter: 8.6,
+	line: 28,
+	chart: 330,
+	control: 100
+};
 
 /**
  * A CSS height that fits the frame from 320 px wide to 620 and beyond. Worked out from the copy's length; too much is

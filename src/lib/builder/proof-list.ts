@@ -1,4 +1,5 @@
 /** All that is missing before a proof can be pulled, each with the way to it. */
+import { undeclaredFindings } from '../factcheck/undeclared.ts';
 import type { CalculatorSet } from '../physics/calculator.ts';
 import type { WidgetDocument } from '../widget/document.ts';
 import { findings, type Finding } from '../widget/findings.ts';
@@ -23,7 +24,11 @@ export function missingForProof(
 			says: message,
 			go: { title: true }
 		})),
-		...findings(document, calculators).map((finding, index) => missingOf(finding, index, numbers)),
+		...[
+			...findings(document, calculators),
+			// Those in the copy follow below, each with its own place.
+			...undeclaredFindings(document).filter(({ code }) => code === 'number-in-headline')
+		].map((finding, index) => missingOf(finding, index, numbers)),
 		...numbers.filter(isUndeclared).map((number): Missing => ({
 			key: `number ${number.key}`,
 			says: `“${number.words}” isn’t weighed. Tie it to a reading, or say that it is no claim.`,

@@ -1,6 +1,7 @@
 /** Every number in the copy with what is known of it: found by the detector, marked as a claim, or printed live. */
 import type { Node } from 'prosemirror-model';
 import { detectQuantities, type DetectedQuantity } from '../factcheck/detect.ts';
+import { wantsWeighing } from '../factcheck/undeclared.ts';
 import type { Claim } from '../widget/document.ts';
 import { claimOf, schema, wiringOf } from './schema.ts';
 
@@ -30,7 +31,8 @@ const detected = new WeakMap<Node, DetectedQuantity[]>();
 export function quantitiesOf(block: Node): DetectedQuantity[] {
 	const known = detected.get(block);
 	if (known) return known;
-	const found = detectQuantities(block.textBetween(0, block.content.size, undefined, ATOM), 'en');
+	const text = block.textBetween(0, block.content.size, undefined, ATOM);
+	const found = detectQuantities(text, 'en').filter(wantsWeighing);
 	detected.set(block, found);
 	return found;
 }

@@ -75,10 +75,19 @@ describe('declaring a number', () => {
 	test('tying again keeps the claim and changes what it hangs on', () => {
 		const before = fresh();
 		const tied = before.apply(tie(before.tr, onlyNumber(before), reading));
-		const again = tied.apply(tie(tied.tr, onlyNumber(tied), { control: 'age' }));
+		const other = { step: 'line', output: 'observedWavelength' };
+		const again = tied.apply(tie(tied.tr, onlyNumber(tied), other));
 		expect(toDocument(again.doc).claims).toEqual([
-			{ id: toDocument(tied.doc).claims[0]?.id, form: 'stated', reading: { control: 'age' } }
+			{ id: toDocument(tied.doc).claims[0]?.id, form: 'stated', reading: other }
 		]);
+	});
+
+	test('tied to a slider, the words give way to the slider’s own value, and the claim goes', () => {
+		const before = fresh();
+		const tied = before.apply(tie(before.tr, onlyNumber(before), reading));
+		const set = toDocument(tied.apply(tie(tied.tr, onlyNumber(tied), { control: 'age' })).doc);
+		expect(set.claims).toEqual([]);
+		expect(JSON.stringify(set.blocks)).toContain('"kind":"setting","control":"age"');
 	});
 
 	test('untying leaves the words and no claim', () => {

@@ -19,11 +19,13 @@ function declare(transaction: Transaction, number: NumberInCopy, entry: Entry): 
 		.setDocAttribute('claims', [...others, { ...entry, id } as Claim]);
 }
 
+/** Words tied to a slider would go false as soon as it moves, so the slider's own value is printed in their place. */
 export function tie(
 	transaction: Transaction,
 	number: NumberInCopy,
 	reading: ReadingRef
 ): Transaction {
+	if ('control' in reading) return printSetting(transaction, number, reading.control);
 	if (number.claim?.form === 'live') {
 		return replaceClaim(transaction, { ...number.claim, reading });
 	}
@@ -54,13 +56,7 @@ export function printLive(
 	reading: ReadingRef,
 	format: LiveFormat
 ): Transaction {
-	if ('control' in reading) {
-		return transaction.replaceWith(
-			number.from,
-			number.to,
-			schema.node('setting', { control: reading.control })
-		);
-	}
+	if ('control' in reading) return printSetting(transaction, number, reading.control);
 	const id = newId('claim');
 	return transaction
 		.replaceWith(number.from, number.to, schema.node('live', { claim: id }))
@@ -68,6 +64,20 @@ export function printLive(
 			...wiringOf(transaction.doc).claims,
 			{ id, form: 'live', reading, ...format } satisfies Claim
 		]);
+}
+
+/** A slider's value in place of the words. It is a setting, and no claim: an entry that stood for the words goes. */
+function printSetting(
+	transaction: Transaction,
+	number: NumberInCopy,
+	control: string
+): Transaction {
+	return transaction
+		.replaceWith(number.from, number.to, schema.node('setting', { control }))
+		.setDocAttribute(
+			'claims',
+			wiringOf(transaction.doc).claims.filter(({ id }) => id !== number.claim?.id)
+		);
 }
 
 export function replaceClaim(transaction: Transaction, claim: Claim): Transaction {

@@ -6,7 +6,7 @@ import {
 	type CalculatorSet
 } from '../physics/calculator.ts';
 import type { Claim, Control, Inline, WidgetDocument } from '../widget/document.ts';
-import { judgeClaims, settingsOf, undeclared } from './judge.ts';
+import { judgeClaims, settingsOf } from './judge.ts';
 
 /** Twice what it is given, so that the expected readings can be seen. Refuses past 90. */
 const doubler: Calculator = defineCalculator({
@@ -203,24 +203,21 @@ describe('settingsOf', () => {
 	});
 });
 
-describe('undeclared', () => {
-	const content: Inline[] = [
-		{ kind: 'text', text: 'It is 7 metres long; ' },
-		{ kind: 'claim', claim: 'it', text: 'about 14 metres' },
-		{ kind: 'text', text: ' when doubled, in ' },
-		{ kind: 'setting', control: 'length' },
-		{ kind: 'text', text: ' steps and several ways, a few kilometres off.' }
-	];
-	test('finds what is neither tied nor named, where it stands', () => {
-		const found = undeclared(documentOf(content, [{ id: 'it', form: 'stated', reading: output }]));
-		expect(found.map(({ surface }) => surface)).toEqual(['Twice', '7 metres', 'a few kilometres']);
-		const text =
-			'It is 7 metres long; about 14 metres when doubled, in \ufffc steps and several ways, a few kilometres off.';
-		for (const { blockId, start, end, surface } of found.filter(
-			({ blockId }) => blockId === 'text'
-		)) {
-			expect(text.slice(start, end), blockId).toBe(surface);
-		}
-		expect(found[0]).toMatchObject({ blockId: 'title', start: 0 });
+describe('stated words in a result sentence', () => {
+	const stated: Claim = { id: 'it', form: 'stated', reading: output };
+	const content: Inline[] = [{ kind: 'claim', claim: 'it', text: 'about 14 metres' }];
+	const inBlock = (kind: 'result' | 'paragraph') => {
+		const document = documentOf(content, [stated]);
+		return { ...document, blocks: [{ id: 'text', kind, content }] };
+	};
+	test('are weighed at every setting, since the sentence moves', () => {
+		const verdict = judgeClaims(inBlock('result'), calculators).get('it');
+		expect(verdict).toMatchObject({ verdict: 'tips', suggestions: [] });
+		expect(verdict?.reason).toMatch(/^These words stand still while their sentence moves\. At \d/);
+	});
+	test('elsewhere they tell of the first settings', () => {
+		expect(judgeClaims(inBlock('paragraph'), calculators).get('it')).toMatchObject({
+			verdict: 'level'
+		});
 	});
 });

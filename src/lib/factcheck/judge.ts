@@ -1,17 +1,17 @@
 /** Weighs every claim of a document: stated words as they stand, live numbers at every setting that matters. */
 import type { CalculatorSet } from '../physics/calculator.ts';
 import { commensurable } from '../physics/units/units.ts';
-import {
-	isTextBlock,
-	type Claim,
-	type Control,
-	type ControlValues,
-	type WidgetDocument
+import type {
+	Claim,
+	Control,
+	ControlValues,
+	ReadingRef,
+	WidgetDocument
 } from '../widget/document.ts';
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
 import { wiringOf } from '../widget/graph.ts';
-import { blockText, claimPlaces, liveStated, type Words } from '../widget/places.ts';
-import { plainDecimal, printStated } from '../widget/stated.ts';
+import { claimPlaces, liveStated, tokenWords, type ClaimPlace } from '../widget/places.ts';
+import { plainDecimal, printStated, type Stated } from '../widget/stated.ts';
 import { decide, unweighed, type Decision } from './decide.ts';
 import { detectQuantities, type DetectedQuantity, type QuantityForm } from './detect.ts';
 import { suggestWordings } from './suggestions.ts';
@@ -20,12 +20,6 @@ import type { WeighedReading } from './weighing.ts';
 
 /** Settings of each slider that a live number is weighed at; the one it starts at comes on top. */
 const SETTINGS = 11;
-
-/** Stands for a live number or a setting where only the writer's own words count. */
-const ATOM = '\ufffc';
-
-const ownWords: Words = (inline) =>
-	inline.kind === 'text' || inline.kind === 'claim' ? inline.text : ATOM;
 
 type Evaluated = (values: ControlValues) => Evaluation;
 
@@ -38,13 +32,11 @@ export function judgeClaims(
 	calculators: CalculatorSet
 ): Map<string, Verdict> {
 	const evaluated = evaluateOnce(document, calculators);
-	const words = new Map(
-		claimPlaces(document, ownWords).map((place) => [place.claim.id, place.words])
-	);
+	const places = new Map(claimPlaces(document, tokenWords).map((place) => [place.claim.id, place]));
 	return new Map(
 		document.claims.map((claim) => [
 			claim.id,
-			judgeClaim(document, claim, words.get(claim.id), evaluated, calculators)
+			judgeClaim(document, claim, places.get(claim.id), evaluated, calculators)
 		])
 	);
 }
@@ -63,16 +55,16 @@ function evaluateOnce(document: WidgetDocument, calculators: CalculatorSet): Eva
 function judgeClaim(
 	document: WidgetDocument,
 	claim: Claim,
-	words: string | undefined,
+	place: ClaimPlace | undefined,
 	evaluated: Evaluated,
 	calculators: CalculatorSet
 ): Verdict {
-	if (words === undefined) return silent('Its words are no longer in the copy.');
+	if (place === undefined) return silent('Its words are no longer in the copy.');
 	switch (claim.form) {
 		case 'exempt':
 			return silent(`Not a claim: ${asSentence(claim.reason)}`);
 		case 'stated':
-			return judgeStated(words, readingAt(document, evaluated({}), claim.reading, calculators));
+			return judgeStated(document, claim, place, evaluated, calculators);
 		case 'live':
 			return judgeLive(document, claim, evaluated, calculators);
 	}
@@ -105,22 +97,53 @@ const NO_RULE: Partial<Record<QuantityForm, string>> = {
 	'small-word': 'A small word isn’t weighed yet: give a number.'
 };
 
-function judgeStated(words: string, outcome: ReadingOutcome): Verdict {
-	const read = numberOf(outcome);
-	if (!read.ok) return silent(read.reason);
-	const quantity = quantityFor(words, read.reading.unit);
-	if (!quantity) return silent('No number in these words.');
-	const { stated } = quantity;
-	if (!stated) return silent(NO_RULE[quantity.kind] ?? 'No number in these words.');
-	const decision = decide(stated, read.reading);
-	const suggestions = suggestWordings(stated, read.reading);
-	if (!quantity.doubleHedge) return { ...decision, suggestions };
+/**
+ * Words in a result sentence stand beside numbers that move, so a reader takes them as true at every setting: they are
+ * weighed at all of them. Words elsewhere tell of the first settings.
+ */
+function judgeStated(
+	document: WidgetDocument,
+	claim: Extract<Claim, { form: 'stated' }>,
+	{ words, blockId }: ClaimPlace,
+	evaluated: Evaluated,
+	calculators: CalculatorSet
+): Verdict {
+	const weighAt = (values: ControlValues) =>
+		weighWords(words, readingAt(document, evaluated(values), claim.reading, calculators));
+	const start = weighAt({});
+	const suggestions = start.stated ? suggestWordings(start.stated, start.reading) : [];
+	const moves = document.blocks.some(({ id, kind }) => id === blockId && kind === 'result');
+	const worst = moves ? worstOf(tryThroughout(document, claim.reading, weighAt)) : null;
+	if (!worst || rank(worst.decision) <= rank(start.decision)) {
+		return { ...start.decision, suggestions };
+	}
 	return {
-		...decision,
-		severity: 'block',
-		reason: 'Two hedges on one number: keep one.',
-		suggestions
+		...worst.decision,
+		reason: `These words stand still while their sentence moves. At ${worst.setting}: ${worst.decision.reason}`,
+		suggestions: []
 	};
+}
+
+type WeighedWords =
+	| { decision: Decision; stated: Stated; reading: WeighedReading }
+	| { decision: Decision; stated: null };
+
+function weighWords(words: string, outcome: ReadingOutcome): WeighedWords {
+	const untold = (reason: string): WeighedWords => ({ decision: unweighed(reason), stated: null });
+	const read = numberOf(outcome);
+	if (!read.ok) return untold(read.reason);
+	const quantity = quantityFor(words, read.reading.unit);
+	if (!quantity?.stated) {
+		return untold((quantity && NO_RULE[quantity.kind]) ?? 'No number in these words.');
+	}
+	const decision: Decision = quantity.doubleHedge
+		? {
+				...decide(quantity.stated, read.reading),
+				severity: 'block',
+				reason: 'Two hedges on one number: keep one.'
+			}
+		: decide(quantity.stated, read.reading);
+	return { decision, stated: quantity.stated, reading: read.reading };
 }
 
 /** The first quantity of the reading's dimension; where none is, the first at all, so that the mismatch is told. */
@@ -141,8 +164,6 @@ function judgeLive(
 	evaluated: Evaluated,
 	calculators: CalculatorSet
 ): Verdict {
-	const reached = wiringOf(document.steps, claim.reading).controls;
-	const controls = document.controls.filter(({ id }) => reached.includes(id));
 	const weighAt = (values: ControlValues): Decision => {
 		const evaluation = evaluated(values);
 		const read = numberOf(readingAt(document, evaluation, claim.reading, calculators));
@@ -155,18 +176,12 @@ function judgeLive(
 		const stated = liveStated(document, evaluation, claim.id, calculators);
 		return stated ? decide(stated, read.reading) : unweighed('No reading.');
 	};
-
 	const start = weighAt({});
-	const trials = controls.flatMap((control) =>
-		settingsOf(control).map((value): Trial => ({
-			decision: weighAt(value === control.initial ? {} : { [control.id]: value }),
-			setting: settingWords(control, value, controls.length > 1)
-		}))
-	);
-	const worst = trials.reduce<Trial | null>(
-		(worse, trial) => (worse && rank(worse.decision) >= rank(trial.decision) ? worse : trial),
-		null
-	);
+	const trials = tryThroughout(document, claim.reading, (values) => ({
+		decision: weighAt(values)
+	}));
+	const worst = worstOf(trials);
+	const controls = controlsReaching(document, claim.reading);
 	if (!worst || rank(worst.decision) <= rank(start))
 		return { ...told(start, trials, controls), suggestions: [] };
 	return {
@@ -174,6 +189,33 @@ function judgeLive(
 		reason: `At ${worst.setting}: ${worst.decision.reason}`,
 		suggestions: []
 	};
+}
+
+function controlsReaching(document: WidgetDocument, reading: ReadingRef): Control[] {
+	const reached = wiringOf(document.steps, reading).controls;
+	return document.controls.filter(({ id }) => reached.includes(id));
+}
+
+/** Weighs from end to end of every slider that reaches the reading, the others at their first settings. */
+function tryThroughout(
+	document: WidgetDocument,
+	reading: ReadingRef,
+	weighAt: (values: ControlValues) => { decision: Decision }
+): Trial[] {
+	const controls = controlsReaching(document, reading);
+	return controls.flatMap((control) =>
+		settingsOf(control).map((value): Trial => ({
+			decision: weighAt(value === control.initial ? {} : { [control.id]: value }).decision,
+			setting: settingWords(control, value, controls.length > 1)
+		}))
+	);
+}
+
+function worstOf(trials: readonly Trial[]): Trial | null {
+	return trials.reduce<Trial | null>(
+		(worse, trial) => (worse && rank(worse.decision) >= rank(trial.decision) ? worse : trial),
+		null
+	);
 }
 
 /** The first settings are as bad as it gets: their own reason, and for level numbers how far that was tried. */
@@ -214,36 +256,4 @@ function settingWords({ label, unit }: Control, value: number, named: boolean): 
 	const numeral = plainDecimal(Number(value.toPrecision(12)));
 	const printed = printStated({ hedge: 'bare', hedgeWord: '', numeral, scale: 1, unit });
 	return named ? `${printed} (${label})` : printed;
-}
-
-export interface UndeclaredNumber {
-	/** A block's id, or `title` or `point`. */
-	blockId: string;
-	/** UTF-16 offsets in the block's text, where each live number or setting counts as one character. */
-	start: number;
-	end: number;
-	surface: string;
-}
-
-/** Numbers in the copy that are neither tied to a reading nor named as no claim. Words like “several” alone are let be. */
-export function undeclared(document: WidgetDocument): UndeclaredNumber[] {
-	const lines = [
-		{ blockId: 'title', text: document.title, declared: [] },
-		{ blockId: 'point', text: document.point, declared: [] },
-		...document.blocks.filter(isTextBlock).map((block) => {
-			let offset = 0;
-			const declared = block.content.flatMap((inline) => {
-				const start = offset;
-				offset += ownWords(inline).length;
-				return inline.kind === 'claim' ? [{ start, end: offset }] : [];
-			});
-			return { blockId: block.id, text: blockText(block, ownWords), declared };
-		})
-	];
-	return lines.flatMap(({ blockId, text, declared }) =>
-		detectQuantities(text, 'en')
-			.filter(({ start, end }) => !declared.some((claim) => start < claim.end && end > claim.start))
-			.filter(({ kind, unit }) => unit !== '' || (kind !== 'small-word' && kind !== 'order-word'))
-			.map(({ start, end, surface }) => ({ blockId, start, end, surface }))
-	);
 }

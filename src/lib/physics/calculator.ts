@@ -73,6 +73,12 @@ export interface NumberInput {
 	/** The value a fresh try-out starts from; used by `runCalculator` only when `optional`. */
 	initial: number;
 	optional?: boolean;
+	/** What stands in when an optional input isn't given, where no single number does (“the gas temperature”). */
+	absent?: string;
+	/** Needed when this other input is given; left out without a word otherwise. */
+	neededWith?: string;
+	/** Only whole numbers are taken. */
+	whole?: boolean;
 	/** Draw and step the input on a logarithmic scale. */
 	log?: boolean;
 }
@@ -93,7 +99,42 @@ export interface CosmologyInput {
 	optional?: boolean;
 }
 
-export type InputSpec = NumberInput | ChoiceInput | CosmologyInput;
+/**
+ * A number whose written digits matter (rounding). Given as text, “2.345”, or as a number, which then stands for its
+ * shortest decimal form.
+ */
+export interface DecimalInput {
+	kind: 'decimal';
+	label: string;
+	symbol?: string;
+	initial: string;
+	optional?: boolean;
+}
+
+/**
+ * Numbers in a row, or rows of numbers. Given as arrays, or as text with commas between numbers and semicolons between
+ * rows: “67.4, 73.04”, “1, 0.5; 0.5, 1”.
+ */
+export interface ListInput {
+	kind: 'list';
+	label: string;
+	symbol?: string;
+	shape: 'row' | 'rows';
+	/** What the numbers of each row are, where every row has the same ones. */
+	columns?: string[];
+	/** Hard limits of every number. */
+	min: number;
+	max: number;
+	minExclusive?: boolean;
+	/** The longest row, and the most rows. */
+	longest: number;
+	initial: string;
+	optional?: boolean;
+	/** What stands in when an optional list isn't given. */
+	absent?: string;
+}
+
+export type InputSpec = NumberInput | ChoiceInput | CosmologyInput | DecimalInput | ListInput;
 
 export interface OutputSpec {
 	label: string;
@@ -130,7 +171,10 @@ export interface CheckValue {
 
 export type RawInputs = Record<string, unknown>;
 
-/** Inputs after checking: numbers in the declared unit, choices among the options, cosmologies as full parameters. */
+/**
+ * Inputs after checking: numbers in the declared unit, choices among the options, cosmologies as full parameters,
+ * decimals as plain text, lists as arrays.
+ */
 // eslint-disable-next-line @typescript-eslint/no-explicit-any
 export type CheckedInputs = Record<string, any>;
 
@@ -195,7 +239,10 @@ export function defineCalculator(definition: CalculatorDefinition): Calculator {
 			);
 		}
 	}
-	for (const key of (definition.oneOf ?? []).flat()) {
+	const companions = Object.values(definition.inputs).flatMap((input) =>
+		input.kind === 'number' && input.neededWith ? [input.neededWith] : []
+	);
+	for (const key of [...(definition.oneOf ?? []).flat(), ...companions]) {
 		if (!Object.hasOwn(definition.inputs, key))
 			throw new Error(`${definition.id}: no input “${key}”`);
 	}

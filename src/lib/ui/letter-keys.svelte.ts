@@ -21,7 +21,8 @@ export class LetterKeys {
 
 	/** The key a person meant as a letter key; null inside fields, with Ctrl, Alt or Meta, or when switched off. */
 	meant(event: KeyboardEvent): string | null {
-		if (!this.on || event.ctrlKey || event.altKey || event.metaKey || event.defaultPrevented) return null;
+		if (!this.on || event.ctrlKey || event.altKey || event.metaKey || event.defaultPrevented)
+			return null;
 		const target = event.target;
 		if (target instanceof HTMLElement) {
 			if (target.isContentEditable || target.closest('input, textarea, select')) return null;

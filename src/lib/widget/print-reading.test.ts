@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { printDigits, printReading, readingWords } from './print-reading.ts';
+import { printDigits, printReading, printUnit, readingWords } from './print-reading.ts';
 
 const NB = '\u00a0';
 
@@ -40,6 +40,15 @@ describe('printReading', () => {
 	test('leaves words as they are', () => {
 		expect(printReading({ value: 'X band', unit: '', uncertainty: 'exact' }).value).toBe('X band');
 	});
+});
+
+test.each([
+	['m/s2', 'm/s²'],
+	['kg/m3', 'kg/m³'],
+	['MHz', 'MHz'],
+	['', '']
+])('unit %s is printed %s', (symbol, printed) => {
+	expect(printUnit(symbol)).toBe(printed);
 });
 
 test.each([

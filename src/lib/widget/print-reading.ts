@@ -8,7 +8,7 @@ import { plainDecimal, printNumeral, roundToFigures } from './stated.ts';
 export interface PrintedReading {
 	/** The value alone: “68.14”, “1.989 × 10³⁰”, or the words of a text reading. */
 	value: string;
-	/** A symbol of the unit table; '' for a pure number. */
+	/** The unit's symbol as printed: “m/s²”; '' for a pure number. */
 	unit: string;
 	/** “u 0.04 MHz”, “exact”, “uncertainty not available”; '' for words. */
 	uncertainty: string;
@@ -36,8 +36,8 @@ export function printReading(
 		value: fits
 			? printNumeral(whole)
 			: printDigits(value, figuresFor(value, uncertainty, exactFigures), uncertainty === 'exact'),
-		unit,
-		uncertainty: uncertaintyWords(uncertainty, unit)
+		unit: printUnit(unit),
+		uncertainty: uncertaintyWords(uncertainty, printUnit(unit))
 	};
 }
 
@@ -48,6 +48,11 @@ export function readingWords(
 ): string {
 	const { value, unit } = printReading(reading, exactFigures);
 	return unit ? value + NO_BREAK + unit : value;
+}
+
+/** A unit's symbol with its powers raised: m/s2 is the table's, m/s² the reader's. */
+export function printUnit(symbol: string): string {
+	return symbol.replace(/(?<=[a-zA-Z])-?\d+/g, (power) => superscript(Number(power)));
 }
 
 /** A number with so many significant figures: plain from 0.0001 to ten million, else with a power of ten. */

@@ -60,10 +60,15 @@ const RULES: Record<Action, Rule> = {
 export type Denial = 'not-permitted' | 'same-person-twice';
 
 /** Null when the actor may; otherwise why not. */
-export function denial(actor: Actor, action: Action, resource: Resource = { proof: null }): Denial | null {
+export function denial(
+	actor: Actor,
+	action: Action,
+	resource: Resource = { proof: null }
+): Denial | null {
 	const rule = RULES[action];
 	if (!actor.roles.some((role) => rule.roles.includes(role))) return 'not-permitted';
-	if (rule.apart && resource.proof && !rule.apart(actor, resource.proof)) return 'same-person-twice';
+	if (rule.apart && resource.proof && !rule.apart(actor, resource.proof))
+		return 'same-person-twice';
 	return null;
 }
 
@@ -72,7 +77,11 @@ export function can(actor: Actor, action: Action, resource?: Resource): boolean 
 }
 
 /** Throws the denial as an error that says what to do. */
-export function requirePermission(actor: Actor | null, action: Action, resource?: Resource): asserts actor is Actor {
+export function requirePermission(
+	actor: Actor | null,
+	action: Action,
+	resource?: Resource
+): asserts actor is Actor {
 	if (!actor) throw new SteelyardError('not-signed-in');
 	const reason = denial(actor, action, resource);
 	if (reason) throw new SteelyardError(reason, { action });

@@ -7,7 +7,14 @@ export const CLAIM_STATES = ['unsigned', 'signed', 'lapsed', 'queried', 'exempt'
 export type ClaimState = (typeof CLAIM_STATES)[number];
 
 /** Working copy and live release are two machines, shown as two marks side by side. */
-export const WORKING_STATES = ['draft', 'in-check', 'queried', 'checked', 'passed', 'at-rest'] as const;
+export const WORKING_STATES = [
+	'draft',
+	'in-check',
+	'queried',
+	'checked',
+	'passed',
+	'at-rest'
+] as const;
 export type WorkingState = (typeof WORKING_STATES)[number];
 
 export interface PersonName {
@@ -121,13 +128,19 @@ export interface Condition {
 /** What still has to happen, from the parts alone: state is derived, never stored. */
 export function workingState(piece: {
 	draftDigest: string;
-	proof: { digest: string; passed: boolean; released: boolean; claimStates: readonly ClaimState[] } | null;
+	proof: {
+		digest: string;
+		passed: boolean;
+		released: boolean;
+		claimStates: readonly ClaimState[];
+	} | null;
 }): WorkingState {
 	const { proof, draftDigest } = piece;
 	if (!proof || proof.digest !== draftDigest) return 'draft';
 	if (proof.released) return 'at-rest';
 	if (proof.passed) return 'passed';
 	if (proof.claimStates.includes('queried')) return 'queried';
-	if (proof.claimStates.every((state) => state === 'signed' || state === 'exempt')) return 'checked';
+	if (proof.claimStates.every((state) => state === 'signed' || state === 'exempt'))
+		return 'checked';
 	return 'in-check';
 }

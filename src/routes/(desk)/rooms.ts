@@ -47,6 +47,16 @@ export function roomOf(routeId: string | null): Room['key'] | null {
 export function keysOf(room: Room['key'] | null, rooms: Room[]): KeyGroup[] {
 	const own: Partial<Record<Room['key'], KeyGroup>> = {
 		desk: { title: 'Desk', keys: [{ press: ['N'], does: 'new slip' }] },
+		manuscript: {
+			title: 'Manuscript',
+			keys: [
+				{ press: ['='], does: 'tie the number at the cursor' },
+				{ press: ['Ctrl .'], does: 'next number that isn’t weighed' },
+				{ press: ['Ctrl B'], does: 'the bench' },
+				{ press: ['/'], does: 'in an empty line: put something in' },
+				{ press: ['Ctrl Z'], does: 'undo' }
+			]
+		},
 		check: {
 			title: 'Check',
 			keys: [

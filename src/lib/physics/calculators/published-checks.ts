@@ -3,8 +3,10 @@
  * A calculator shows its own on its page; the tests weigh them all.
  */
 import type { CheckValue } from '../calculator.ts';
+import { CLOSED_FORM_CHECKS } from './published-checks-closed-forms.ts';
 
 const PUBLISHED: Record<string, CheckValue[]> = {
+	...CLOSED_FORM_CHECKS,
 	'cosmo.at_z': [
 		{
 			id: 'chk-01',
@@ -201,6 +203,90 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 			unit: '',
 			source: 'Hills et al. 2018, Nature 564 E32',
 			verification: 'from memory'
+		}
+	],
+	'g21.deepest': [
+		{
+			id: 'chk-26',
+			statement: 'Deepest 21 cm absorption near 78 MHz for unheated gas',
+			inputs: { cosmology: { set: 'Planck18' }, Yp: 0.245, z: 17.2 },
+			output: 'dTb_exact',
+			outputScale: 0.001,
+			published: -0.2,
+			tolerance: 0.03,
+			unit: 'K',
+			source: 'Barkana 2018; Cohen et al. 2017',
+			verification: 'from memory'
+		}
+	],
+	'g21.tk_for_depth': [
+		{
+			id: 'chk-27',
+			statement: 'Gas temperature needed for −500 mK at z = 17.2 (approximate formula)',
+			inputs: { cosmology: { set: 'Planck18' }, z: 17.2, depth_mK: -500 },
+			output: 'Tk',
+			outputScale: 1,
+			published: 3.3,
+			tolerance: 0.3,
+			unit: 'K',
+			source: 'Barkana 2018, Nature 555 71 (below about 3.2 K)',
+			verification: 'from memory'
+		}
+	],
+	'g21.foreground': [
+		{
+			id: 'chk-28',
+			statement: 'Sky temperature at 78 MHz (average, 180 K at 180 MHz)',
+			inputs: { Tref_K: 180, nuref_MHz: 180, nu_MHz: 78, index: -2.6 },
+			output: 'Tsky',
+			outputScale: 1,
+			published: 1600,
+			tolerance: 300,
+			unit: 'K',
+			source: 'Furlanetto, Oh & Briggs 2006',
+			verification: 'from memory'
+		}
+	],
+	'thermal.tla1': [
+		{
+			id: 'chk-23',
+			statement: 'Gas temperature at z = 17.2 without heating',
+			inputs: { cosmology: { set: 'Planck18' }, Yp: 0.245, z: 17.2 },
+			output: 'Tk',
+			outputScale: 1,
+			published: 7,
+			tolerance: 0.5,
+			unit: 'K',
+			source: 'Barkana 2018, Nature 555 71 (about 7 K)',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-24',
+			statement: 'Residual ionised fraction (z = 20)',
+			inputs: { cosmology: { set: 'Planck18' }, Yp: 0.245, z: 20 },
+			output: 'x_e',
+			outputScale: 1,
+			published: 0.00021,
+			tolerance: 3e-5,
+			unit: '',
+			source: 'Seager, Sasselov & Scott 1999/2000: 2-3e-4',
+			verification: 'from memory'
+		},
+		{
+			id: 'chk-25',
+			statement: 'x_e at z = 200, h = 0.70, Ob = 0.04, Om = 0.24, Y = 0.25, T0 = 2.725',
+			inputs: {
+				cosmology: { H0: 70, Om0: 0.24, Tcmb0: 2.725, Neff: 3.04, m_nu: [0], Ob0: 0.04 },
+				Yp: 0.25,
+				z: 200
+			},
+			output: 'x_e',
+			outputScale: 1,
+			published: 0.00035714,
+			tolerance: 1e-6,
+			unit: '',
+			source: 'RECFAST 1.5.2 example output (public code output file)',
+			verification: 'verified: compared with a stored RECFAST output file'
 		}
 	],
 	'energy.convert': [

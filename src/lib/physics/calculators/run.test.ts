@@ -1,6 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { defineCalculator, type CalculatorDefinition, type RawInputs } from '../calculator.ts';
+import {
+	defineCalculator,
+	type CalculatorDefinition,
+	type ListInput,
+	type RawInputs
+} from '../calculator.ts';
 import { catalogue } from './index.ts';
 import { runCalculator } from './run.ts';
 
@@ -381,11 +386,15 @@ describe('any input at all', () => {
 					if (spec.kind === 'choice')
 						return [key, fc.constantFrom(...spec.options.map((option) => option.value))];
 					if (spec.kind === 'cosmology') return [key, cosmologies];
+					if (spec.kind === 'decimal') return [key, fc.oneof(fc.double(), decimals)];
+					if (spec.kind === 'list') return [key, lists(spec)];
 					return [
 						key,
 						fc.oneof(
 							fc.constantFrom(spec.min, spec.max, spec.initial),
-							fc.double({ min: spec.min, max: spec.max, noNaN: true })
+							spec.whole
+								? fc.integer({ min: spec.min, max: spec.max })
+								: fc.double({ min: spec.min, max: spec.max, noNaN: true })
 						)
 					];
 				});
@@ -397,9 +406,25 @@ describe('any input at all', () => {
 				}),
 				{ seed: 4620, numRuns: 400 }
 			);
-		}
+		},
+		60_000 // four hundred thermal histories of ten milliseconds, on a machine that may be busy
 	);
 });
+
+const decimals = fc.stringMatching(/^[+-]?[0-9]{1,6}(\.[0-9]{0,9})?(e[+-]?[0-9]{1,2})?$/);
+
+function lists(spec: ListInput): fc.Arbitrary<unknown> {
+	const number = fc.oneof(
+		fc.constantFrom(spec.min, spec.max, 0.5, 1),
+		fc.double({ min: spec.min, max: spec.max, noNaN: true })
+	);
+	const length = spec.columns?.length;
+	const row = fc.array(number, { minLength: length ?? 1, maxLength: length ?? 3 });
+	return fc.oneof(
+		fc.constant(spec.initial),
+		spec.shape === 'row' ? row : fc.array(row, { minLength: 1, maxLength: 3 })
+	);
+}
 
 const cosmologies = fc.oneof(
 	fc.constantFrom('Planck18', 'Planck15', 'Planck13', 'WMAP9', 'Simple').map((set) => ({ set })),

@@ -8,6 +8,7 @@ import {
 	type Calculator,
 	type CheckedInputs,
 	type ChoiceInput,
+	type InputSpec,
 	type NumberInput,
 	type RawInputs,
 	type Reading,
@@ -18,7 +19,8 @@ import {
 } from '../calculator.ts';
 import { resolveCosmology } from './cosmology/parameters.ts';
 import { nearestOf } from './nearest.ts';
-import { printNumber } from './wording.ts';
+import { printNumber, rangeWords } from './wording.ts';
+import { checkDecimal, checkList } from './written.ts';
 
 type Checked<T> = { ok: true; value: T } | { ok: false; refusal: Refusal };
 
@@ -117,21 +119,32 @@ function checkInputs(calculator: Calculator, raw: RawInputs): Checked<CheckedInp
 		const given = raw[key];
 		if (!isGiven(given)) {
 			if (grouped.has(key)) continue;
+			if (spec.kind === 'number' && spec.neededWith && !isGiven(raw[spec.neededWith])) continue;
 			if (!spec.optional) {
 				return refuse('missing-input', `${spec.label} is missing. Give a value for “${key}”.`, key);
 			}
+			if ('absent' in spec && spec.absent !== undefined) continue;
 		}
-		const wanted = isGiven(given) ? given : spec.initial;
-		const checked =
-			spec.kind === 'number'
-				? checkNumber(key, spec, wanted)
-				: spec.kind === 'choice'
-					? checkChoice(key, spec, wanted)
-					: resolveCosmology(wanted, key);
+		const checked = checkInput(key, spec, isGiven(given) ? given : spec.initial);
 		if (!checked.ok) return checked;
 		inputs[key] = checked.value;
 	}
 	return { ok: true, value: inputs };
+}
+
+function checkInput(key: string, spec: InputSpec, given: unknown): Checked<unknown> {
+	switch (spec.kind) {
+		case 'number':
+			return checkNumber(key, spec, given);
+		case 'choice':
+			return checkChoice(key, spec, given);
+		case 'cosmology':
+			return resolveCosmology(given, key);
+		case 'decimal':
+			return checkDecimal(key, spec, given);
+		case 'list':
+			return checkList(key, spec, given);
+	}
 }
 
 function isGiven(value: unknown): boolean {
@@ -158,24 +171,26 @@ function checkNumber(key: string, spec: NumberInput, given: unknown): Checked<nu
 	if (tooLow || tooHigh) {
 		return refuse(
 			'out-of-range',
-			`${spec.label} must be ${rangeWords(spec)}; ${printNumber(given)} was given.`,
+			`${spec.label} must be ${rangeWords(spec, typeof spec.unit === 'string' ? spec.unit : '')}; ${printNumber(given)} was given.`,
+			key
+		);
+	}
+	if (spec.whole && !Number.isInteger(given)) {
+		return refuse(
+			'not-whole',
+			`${spec.label} must be a whole number; ${printNumber(given)} was given.`,
 			key
 		);
 	}
 	return { ok: true, value: given };
 }
 
-/** “more than −1 and at most 100000 nm”. */
-function rangeWords(spec: NumberInput): string {
-	const low = `${spec.minExclusive ? 'more than' : 'at least'} ${printNumber(spec.min)}`;
-	const high = `${spec.maxExclusive ? 'less than' : 'at most'} ${printNumber(spec.max)}`;
-	const unit = typeof spec.unit === 'string' && spec.unit ? ` ${spec.unit}` : '';
-	return `${low} and ${high}${unit}`;
-}
-
 function checkChoice(key: string, spec: ChoiceInput, given: unknown): Checked<string> {
 	const values = spec.options.map((option) => option.value);
 	if (typeof given === 'string' && values.includes(given)) return { ok: true, value: given };
+	// JSON's true and false choose “true” and “false”, where a calculator offers them.
+	if (typeof given === 'boolean' && values.includes(String(given)))
+		return { ok: true, value: String(given) };
 	const near = typeof given === 'string' ? nearestOf(given, values) : undefined;
 	const hint = near ? `Did you mean “${near}”?` : `Choose one of ${values.join(', ')}.`;
 	const found =

@@ -12,3 +12,13 @@ export function printNumber(value: number): string {
 	const lead = digits === '1' ? '' : digits === '-1' ? '−' : `${digits.replace('-', '−')} × `;
 	return `${lead}10${power}`;
 }
+
+/** “more than −1 and at most 100000 nm”. */
+export function rangeWords(
+	limits: { min: number; max: number; minExclusive?: boolean; maxExclusive?: boolean },
+	unit = ''
+): string {
+	const low = `${limits.minExclusive ? 'more than' : 'at least'} ${printNumber(limits.min)}`;
+	const high = `${limits.maxExclusive ? 'less than' : 'at most'} ${printNumber(limits.max)}`;
+	return `${low} and ${high}${unit ? ` ${unit}` : ''}`;
+}

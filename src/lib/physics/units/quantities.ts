@@ -91,14 +91,57 @@ export const QUANTITY_KINDS = {
 		unit: 'K',
 		mistakenFor: ['temperature']
 	},
+	'gas-temperature': {
+		label: 'temperature of the gas',
+		unit: 'K',
+		mistakenFor: ['spin-temperature', 'background-temperature', 'temperature-difference']
+	},
+	'spin-temperature': {
+		label: 'spin temperature of hydrogen',
+		unit: 'K',
+		mistakenFor: ['gas-temperature']
+	},
+	'background-temperature': {
+		label: 'temperature of the background',
+		unit: 'K',
+		mistakenFor: ['gas-temperature']
+	},
+	coupling: { label: 'strength of coupling', unit: '' },
+	'optical-depth': { label: 'optical depth', unit: '' },
+	'ionised-fraction': { label: 'share of the hydrogen that is ionised', unit: '' },
+	'rate-coefficient': { label: 'rate coefficient', unit: 'cm3/s' },
+	'photon-intensity': { label: 'stream of photons', unit: '1/(cm2 s Hz sr)' },
+	bandwidth: { label: 'width of a band of frequencies', unit: 'Hz', mistakenFor: ['frequency'] },
 	angle: { label: 'angle', unit: 'rad' },
+	area: { label: 'area', unit: 'm2' },
 	density: { label: 'density', unit: 'kg/m3' },
 	volume: { label: 'volume', unit: 'm3' },
 	magnitude: { label: 'magnitude', unit: 'mag' },
 	'distance-modulus': { label: 'distance modulus', unit: 'mag', mistakenFor: ['magnitude'] },
 	'length-per-angle': { label: 'length seen under an angle', unit: 'kpc/arcsec' },
 	'angle-per-length': { label: 'angle that a length covers', unit: 'arcsec/kpc' },
-	'neutrino-mass': { label: 'mass of a neutrino', unit: 'eV' }
+	'neutrino-mass': { label: 'mass of a neutrino', unit: 'eV' },
+
+	'speed-share': {
+		label: 'speed as a share of that of light',
+		unit: '',
+		mistakenFor: ['redshift']
+	},
+	'lorentz-factor': { label: 'Lorentz factor', unit: '' },
+	rapidity: { label: 'rapidity', unit: '' },
+	momentum: { label: 'momentum', unit: 'kg m/s' },
+	refractivity: { label: 'refractive index less one', unit: '' },
+	'radiance-by-wavelength': { label: 'radiance for each length of wave', unit: 'W m-3 sr-1' },
+	'radiance-by-frequency': { label: 'radiance for each hertz', unit: 'W m-2 Hz-1 sr-1' },
+	irradiance: { label: 'power through each square metre', unit: 'W/m2', mistakenFor: ['power'] },
+	luminosity: { label: 'power given off as light', unit: 'W', mistakenFor: ['irradiance'] },
+	'number-density': { label: 'number in each cubic metre', unit: 'm-3', mistakenFor: ['density'] },
+	'energy-density': { label: 'energy in each cubic metre', unit: 'J/m3' },
+	'solid-angle': { label: 'patch of sky', unit: 'sr', mistakenFor: ['angle'] },
+	parallax: { label: 'parallax', unit: 'rad' },
+	activity: { label: 'decays in each second', unit: 'Bq' },
+	'spring-constant': { label: 'stiffness of a spring', unit: 'N/m' },
+	strain: { label: 'strain of a gravitational wave', unit: '' }
 } as const satisfies Record<string, QuantityRow>;
 
 export type QuantityKind = keyof typeof QUANTITY_KINDS;

@@ -5,7 +5,8 @@
  * Angle and magnitude count as dimensions here although SI calls them pure numbers: a degree never becomes a per cent.
  */
 
-export type BaseDimension = 'm' | 'kg' | 's' | 'K' | 'A' | 'mol' | 'cd' | 'angle' | 'magnitude';
+export type BaseDimension =
+	'm' | 'kg' | 's' | 'K' | 'A' | 'mol' | 'cd' | 'angle' | 'magnitude' | 'unstated';
 export type Dimension = Readonly<Partial<Record<BaseDimension, number>>>;
 
 export interface UnitRow {
@@ -43,6 +44,9 @@ const NUMBER: Dimension = {};
 const SI_BROCHURE = 'BIPM, The International System of Units (SI Brochure), 9th edition, 2019';
 const IAU_2012_B2 = 'IAU 2012 Resolution B2: au = 149 597 870 700 m';
 const IAU_2015_B2 = 'IAU 2015 Resolution B2: pc = 648 000/π au';
+const IAU_2015_B3 = 'IAU 2015 Resolution B3: nominal solar and planetary values';
+const NOMINAL_MASS =
+	'IAU 2015 Resolution B3 for GM; G of CODATA 2018, relative uncertainty 2.2 × 10⁻⁵';
 const JULIAN = 'IAU Style Manual 1989: Julian year of 365.25 d; light year = c × Julian year';
 const SP_811 = 'NIST Special Publication 811 (2008), appendix B.8';
 const TNT =
@@ -55,6 +59,7 @@ const LIGHT_SPEED = 299_792_458;
 /** Even, so that it is a double exactly. */
 const LIGHT_YEAR = LIGHT_SPEED * JULIAN_YEAR;
 const ELEMENTARY_CHARGE_DIGITS = 1.602176634;
+const GRAVITATION_DIGITS = 6.6743;
 const DEGREE = Math.PI / 180;
 
 export const UNIT_TABLE: readonly UnitRow[] = [
@@ -770,6 +775,216 @@ export const UNIT_TABLE: readonly UnitRow[] = [
 		many: 'cubic gigaparsecs',
 		symbols: ['Gpc³'],
 		source: IAU_2015_B2
+	},
+	{
+		symbol: 'm2',
+		dimension: { m: 2 },
+		factor: 1,
+		decade: 0,
+		one: 'square metre',
+		many: 'square metres',
+		symbols: ['m²'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'cm3/s',
+		dimension: { m: 3, s: -1 },
+		factor: 1,
+		decade: -6,
+		one: 'cubic centimetre a second',
+		many: 'cubic centimetres a second',
+		symbols: ['cm³/s', 'cm3 s-1', 'cm³ s⁻¹'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: '1/(cm2 s Hz sr)',
+		dimension: { m: -2, angle: -2 },
+		factor: 1,
+		decade: 4,
+		one: 'photon a square centimetre, second, hertz and steradian',
+		many: 'photons a square centimetre, second, hertz and steradian',
+		symbols: ['cm-2 s-1 Hz-1 sr-1', 'cm⁻² s⁻¹ Hz⁻¹ sr⁻¹'],
+		source: SI_BROCHURE
+	},
+
+	// Light, and what it carries
+	{
+		symbol: 'W/m2',
+		dimension: { kg: 1, s: -3 },
+		factor: 1,
+		decade: 0,
+		one: 'watt a square metre',
+		many: 'watts a square metre',
+		also: ['watt per square metre', 'watts per square metre'],
+		symbols: ['W/m²', 'W m-2', 'W m⁻²'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'W m-3 sr-1',
+		dimension: { kg: 1, m: -1, s: -3, angle: -2 },
+		factor: 1,
+		decade: 0,
+		one: 'watt a square metre, steradian and metre of wavelength',
+		many: 'watts a square metre, steradian and metre of wavelength',
+		symbols: ['W m⁻³ sr⁻¹'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'W m-2 Hz-1 sr-1',
+		dimension: { kg: 1, s: -2, angle: -2 },
+		factor: 1,
+		decade: 0,
+		one: 'watt a square metre, steradian and hertz',
+		many: 'watts a square metre, steradian and hertz',
+		symbols: ['W m⁻² Hz⁻¹ sr⁻¹'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'm-3',
+		dimension: { m: -3 },
+		factor: 1,
+		decade: 0,
+		one: 'in a cubic metre',
+		many: 'in a cubic metre',
+		symbols: ['m⁻³', '1/m3', '1/m³'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'J/m3',
+		dimension: { kg: 1, m: -1, s: -2 },
+		factor: 1,
+		decade: 0,
+		one: 'joule a cubic metre',
+		many: 'joules a cubic metre',
+		symbols: ['J/m³', 'J m-3', 'J m⁻³'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'sr',
+		dimension: { angle: 2 },
+		factor: 1,
+		decade: 0,
+		one: 'steradian',
+		many: 'steradians',
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'mas',
+		dimension: ANGLE,
+		factor: DEGREE / 3600,
+		decade: -3,
+		one: 'milliarcsecond',
+		many: 'milliarcseconds',
+		source: SI_BROCHURE
+	},
+
+	// Matter in motion
+	{
+		symbol: 'kg m/s',
+		dimension: { kg: 1, m: 1, s: -1 },
+		factor: 1,
+		decade: 0,
+		one: 'kilogram metre a second',
+		many: 'kilogram metres a second',
+		symbols: ['kg m s-1', 'kg m s⁻¹'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'N/m',
+		dimension: { kg: 1, s: -2 },
+		factor: 1,
+		decade: 0,
+		one: 'newton a metre',
+		many: 'newtons a metre',
+		also: ['newton per metre', 'newtons per metre'],
+		source: SI_BROCHURE
+	},
+	{
+		symbol: 'Bq',
+		dimension: FREQUENCY,
+		factor: 1,
+		decade: 0,
+		one: 'becquerel',
+		many: 'becquerels',
+		source: SI_BROCHURE
+	},
+
+	// Sun and planets as measures
+	{
+		symbol: 'Msun',
+		dimension: MASS,
+		factor: 1.3271244e20 / GRAVITATION_DIGITS,
+		decade: 11,
+		one: 'solar mass',
+		many: 'solar masses',
+		symbols: ['M☉'],
+		source: NOMINAL_MASS
+	},
+	{
+		symbol: 'Mearth',
+		dimension: MASS,
+		factor: 3.986004e14 / GRAVITATION_DIGITS,
+		decade: 11,
+		one: 'Earth mass',
+		many: 'Earth masses',
+		also: ['mass of the Earth', 'masses of the Earth'],
+		source: NOMINAL_MASS
+	},
+	{
+		symbol: 'Mjup',
+		dimension: MASS,
+		factor: 1.2668653e17 / GRAVITATION_DIGITS,
+		decade: 11,
+		one: 'Jupiter mass',
+		many: 'Jupiter masses',
+		source: NOMINAL_MASS
+	},
+	{
+		symbol: 'Rsun',
+		dimension: LENGTH,
+		factor: 6.957,
+		decade: 8,
+		one: 'solar radius',
+		many: 'solar radii',
+		source: IAU_2015_B3
+	},
+	{
+		symbol: 'Rearth',
+		dimension: LENGTH,
+		factor: 6.3781,
+		decade: 6,
+		one: 'Earth radius',
+		many: 'Earth radii',
+		source: `${IAU_2015_B3} (equatorial)`
+	},
+	{
+		symbol: 'Rjup',
+		dimension: LENGTH,
+		factor: 7.1492,
+		decade: 7,
+		one: 'Jupiter radius',
+		many: 'Jupiter radii',
+		source: `${IAU_2015_B3} (equatorial)`
+	},
+	{
+		symbol: 'Lsun',
+		dimension: POWER,
+		factor: 3.828,
+		decade: 26,
+		one: 'solar luminosity',
+		many: 'solar luminosities',
+		source: IAU_2015_B3
+	},
+
+	// A decay told without a unit of time: its times are in whatever unit the half-life was given in.
+	{
+		symbol: 'same',
+		dimension: { unstated: 1 },
+		factor: 1,
+		decade: 0,
+		one: 'in the unit of the half-life',
+		many: 'in the unit of the half-life',
+		source: 'no unit: a mark that times came without one'
 	},
 
 	// The sky

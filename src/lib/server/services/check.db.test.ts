@@ -35,6 +35,16 @@ describe('pulling a proof', () => {
 		);
 	});
 
+	test('is refused while a number in the copy is neither tied nor named as no claim', async () => {
+		await desk.toProof();
+		await desk.edit((document) => reword(document, 'opening', 'faint', '3 watt'));
+		await expect(desk.pull()).rejects.toEqual(
+			code('proof-not-ready', {
+				findings: [expect.objectContaining({ code: 'number-unweighed', at: { block: 'opening' } })]
+			})
+		);
+	});
+
 	test('twice from one draft gives one proof; after a change, the next', async () => {
 		const first = await desk.toProof();
 		expect(await pullProof(await office.as(desk.writer), SLUG)).toEqual({

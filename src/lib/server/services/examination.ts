@@ -1,5 +1,6 @@
 /** What the machine finds in a document: its claims, what a signature on each would cover, the verdicts, what is missing. */
 import { judgeClaims } from '../../factcheck/judge.ts';
+import { undeclaredFindings } from '../../factcheck/undeclared.ts';
 import type { Verdict } from '../../factcheck/verdict.ts';
 import { catalogue } from '../../physics/calculators/index.ts';
 import { claimCovers, coverHash, type ClaimCover } from '../../widget/cover.ts';
@@ -52,7 +53,7 @@ function examineAnew(document: WidgetDocument): Examination {
 	});
 	return {
 		claims,
-		findings: findings(document, catalogue),
+		findings: [...findings(document, catalogue), ...undeclaredFindings(document)],
 		digest: freeze(document, catalogue).digest
 	};
 }

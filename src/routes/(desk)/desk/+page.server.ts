@@ -12,13 +12,14 @@ import { inHand } from './in-hand.ts';
 export const load: PageServerLoad = async ({ locals: { context } }) => {
 	const { actor } = context;
 	const pieces = await listPieces(context).catch(pageFailure);
-	const inWork = actor && can(actor, 'read-proof')
-		? await Promise.all(
-				pieces
-					.filter(({ working }) => working !== 'at-rest')
-					.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
-			)
-		: [];
+	const inWork =
+		actor && can(actor, 'read-proof')
+			? await Promise.all(
+					pieces
+						.filter(({ working }) => working !== 'at-rest')
+						.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
+				)
+			: [];
 	return {
 		now: context.now.toISOString(),
 		pieces,

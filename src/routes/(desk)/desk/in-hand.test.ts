@@ -11,12 +11,34 @@ const perpetua = person('perpetua', 'editor');
 const name = ({ personId }: Actor) => ({ personId, name: personId });
 
 function claim(id: string, state: ClaimView['state'], queries: QueryView[] = []): ClaimView {
-	const verdict = { verdict: 'level', severity: 'none', rule: 'N1', reason: '', departurePercent: 0, suggestions: [] };
-	return { id, state, queries, signatures: [], label: id, form: 'stated', verdict } as unknown as ClaimView;
+	const verdict = {
+		verdict: 'level',
+		severity: 'none',
+		rule: 'N1',
+		reason: '',
+		departurePercent: 0,
+		suggestions: []
+	};
+	return {
+		id,
+		state,
+		queries,
+		signatures: [],
+		label: id,
+		form: 'stated',
+		verdict
+	} as unknown as ClaimView;
 }
 
 function query(answer: string | null): QueryView {
-	return { id: 'q', claim: 'c1', question: '?', askedBy: name(ama), answer, closedAt: null } as QueryView;
+	return {
+		id: 'q',
+		claim: 'c1',
+		question: '?',
+		askedBy: name(ama),
+		answer,
+		closedAt: null
+	} as QueryView;
 }
 
 function piece(working: PieceView['working'], claims: ClaimView[] = [], missing = ''): PieceView {
@@ -52,7 +74,11 @@ test('a draft is in its writer’s hands, with what it lacks', () => {
 });
 
 test('a proof is in the hands of scientists who didn’t write it', () => {
-	const view = piece('in-check', [claim('c1', 'unsigned'), claim('c2', 'lapsed'), claim('c3', 'signed')]);
+	const view = piece('in-check', [
+		claim('c1', 'unsigned'),
+		claim('c2', 'lapsed'),
+		claim('c3', 'signed')
+	]);
 	expect(asks(ama, view)).toEqual(['2 of 3 claims left to check; 1 signature has lapsed']);
 	expect(asks(person('tamsin', 'writer', 'scientist'), view)).toEqual([]);
 });
@@ -78,5 +104,8 @@ test('a checked proof waits for an editor who had no hand in it', () => {
 
 test('what stops others comes first', () => {
 	const answer = piece('queried', [claim('c1', 'queried', [query(null)])]);
-	expect(inHand(tamsin, [piece('draft'), answer]).map(({ act }) => act)).toEqual(['Answer', 'Write on']);
+	expect(inHand(tamsin, [piece('draft'), answer]).map(({ act }) => act)).toEqual([
+		'Answer',
+		'Write on'
+	]);
 });

@@ -22,7 +22,10 @@ export function inHand(actor: Actor, pieces: readonly PieceView[]): InHand[] {
 			...passesWanted(actor, piece),
 			...draftsWanted(actor, piece)
 		])
-		.map(({ piece: { slug, working, since }, ...row }) => ({ piece: { slug, working, since }, ...row }))
+		.map(({ piece: { slug, working, since }, ...row }) => ({
+			piece: { slug, working, since },
+			...row
+		}))
 		.sort((a, b) => a.rank - b.rank || a.piece.since.localeCompare(b.piece.since));
 }
 
@@ -119,4 +122,5 @@ const peopleOf = (proof: ProofView) => ({
 const atClaim = (slug: string, claim: string) =>
 	`${routes.check(slug)}?claim=${encodeURIComponent(claim)}`;
 
-const count = (number: number, one: string, many: string) => `${number} ${number === 1 ? one : many}`;
+const count = (number: number, one: string, many: string) =>
+	`${number} ${number === 1 ? one : many}`;

@@ -1,4 +1,5 @@
 import { defineCalculator, refuse, type Computed } from '../../calculator.ts';
+import { cosineOfDegrees, sineOfDegrees } from '../../numerics/degrees.ts';
 import { LAUNCHER_CAUTION } from '../energy/caution.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { printNumber } from '../wording.ts';
@@ -106,8 +107,7 @@ export const vacuum = defineCalculator({
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ v0_ms: v0, angle_deg: angle, h0_m: h0, g_ms2: g }): Computed {
 		const up = v0 * sineOfDegrees(angle);
-		// Sine of the complement, so that straight up has no sideways speed at all.
-		const along = v0 * sineOfDegrees(90 - Math.abs(angle));
+		const along = v0 * cosineOfDegrees(angle);
 		const rise = up > 0 ? (up * up) / (2 * g) : 0;
 		const underRoot = up * up + 2 * g * h0;
 		if (h0 < 0 && (up <= 0 || underRoot < 0)) {
@@ -139,7 +139,3 @@ export const vacuum = defineCalculator({
 		};
 	}
 });
-
-function sineOfDegrees(angle: number): number {
-	return Math.sin((angle * Math.PI) / 180);
-}

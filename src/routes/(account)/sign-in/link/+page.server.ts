@@ -9,9 +9,12 @@ import { formFailure } from '$lib/server/http/failures.ts';
 import { signInByLink } from '$lib/server/services/sign-in.ts';
 import type { Actions, PageServerLoad } from './$types';
 
-/** Opening the page does nothing: mail scanners open links too. The button consumes. */
+/**
+ * Opening the page does nothing: mail scanners open links too. The button consumes. The address goes to no other host;
+ * with `no-referrer` a browser would send the form without its origin, and be refused.
+ */
 export const load: PageServerLoad = async ({ url, setHeaders }) => {
-	setHeaders({ 'cache-control': 'no-store', 'referrer-policy': 'no-referrer' });
+	setHeaders({ 'cache-control': 'no-store', 'referrer-policy': 'same-origin' });
 	return {
 		form: await superValidate({ token: url.searchParams.get('token') ?? '' }, zod4(SignInByLink), {
 			errors: false

@@ -8,7 +8,11 @@ import { checkRows } from './check-rows.ts';
 export const load: PageServerLoad = ({ params }) => {
 	const calculator = catalogue.get(params.id);
 	if (!calculator) {
-		error(404, { message: 'There is no such calculator.', help: 'Take one from the shelf.', code: 'not-found' });
+		error(404, {
+			message: 'There is no such calculator.',
+			help: 'Take one from the shelf.',
+			code: 'not-found'
+		});
 	}
 	return {
 		id: calculator.id,

@@ -17,7 +17,10 @@ const APART = 0.14;
 export function domainBar(spec: NumberInput): DomainBar {
 	const scale = scaleOf(spec);
 	const good = spec.good ?? spec;
-	const ends = { from: scale(Math.max(spec.min, good.min)), to: scale(Math.min(spec.max, good.max)) };
+	const ends = {
+		from: scale(Math.max(spec.min, good.min)),
+		to: scale(Math.min(spec.max, good.max))
+	};
 	const labels = [
 		{ at: 0, text: label(spec.min) },
 		{ at: 1, text: label(spec.max) }
@@ -26,7 +29,8 @@ export function domainBar(spec: NumberInput): DomainBar {
 		[ends.from, good.min],
 		[ends.to, good.max]
 	] as const) {
-		if (labels.every((other) => Math.abs(other.at - at) >= APART)) labels.push({ at, text: label(value) });
+		if (labels.every((other) => Math.abs(other.at - at) >= APART))
+			labels.push({ at, text: label(value) });
 	}
 	return { good: ends, at: scale(spec.initial), labels };
 }

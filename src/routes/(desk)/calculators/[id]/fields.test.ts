@@ -14,16 +14,22 @@ describe('readNumber', () => {
 		expect(readNumber(typed)).toBe(value);
 	});
 
-	test.each(['', 'NaN', 'Infinity', '1e999', '0x10', '12 kg', '1,5', '--1'])('“%s” is no number', (typed) => {
-		expect(readNumber(typed)).toBeNull();
-	});
+	test.each(['', 'NaN', 'Infinity', '1e999', '0x10', '12 kg', '1,5', '--1'])(
+		'“%s” is no number',
+		(typed) => {
+			expect(readNumber(typed)).toBeNull();
+		}
+	);
 });
 
 describe('the fields of every calculator', () => {
 	test.each([...catalogue.values()].map((calculator) => [calculator.id, calculator] as const))(
 		'%s gives a reading with its first values',
 		(_id, calculator) => {
-			const { inputs, problems } = readFields(calculator, firstFields(calculator, new URLSearchParams()));
+			const { inputs, problems } = readFields(
+				calculator,
+				firstFields(calculator, new URLSearchParams())
+			);
 			expect(problems).toEqual({});
 			expect(runCalculator(calculator, inputs)).toMatchObject({ ok: true });
 		}
@@ -33,8 +39,14 @@ describe('the fields of every calculator', () => {
 test('settings in the address take the place of first values', () => {
 	const calculator = catalogue.get('line.observe');
 	if (!calculator) throw new Error('line.observe is gone.');
-	const fields = firstFields(calculator, new URLSearchParams('restFrequency_Hz=1420405751.768&z=19.85'));
-	expect(readFields(calculator, fields).inputs).toEqual({ restFrequency_Hz: 1420405751.768, z: 19.85 });
+	const fields = firstFields(
+		calculator,
+		new URLSearchParams('restFrequency_Hz=1420405751.768&z=19.85')
+	);
+	expect(readFields(calculator, fields).inputs).toEqual({
+		restFrequency_Hz: 1420405751.768,
+		z: 19.85
+	});
 });
 
 test('one parameter of a set can be overridden from the address', () => {

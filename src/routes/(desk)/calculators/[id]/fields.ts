@@ -26,7 +26,9 @@ export function firstFields(calculator: Calculator, query: URLSearchParams): Fie
 			fields[key] = query.get(`${key}.set`) ?? query.get(key) ?? spec.initial.set;
 			for (const [name, value] of overrides) fields[name] = value;
 		} else if (idle.has(key)) fields[key] = '';
-		else fields[key] = query.get(key) ?? (spec.optional && !groupOf(calculator, key) ? '' : String(spec.initial));
+		else
+			fields[key] =
+				query.get(key) ?? (spec.optional && !groupOf(calculator, key) ? '' : String(spec.initial));
 	}
 	return fields;
 }
@@ -39,7 +41,7 @@ export function readFields(calculator: Calculator, fields: Fields): ReadFields {
 		const spec = calculator.inputs[head];
 		const typed = text.trim();
 		if (!spec || typed === '') continue;
-		if (spec.kind === 'choice') inputs[key] = typed;
+		if (isWords(spec)) inputs[key] = typed;
 		else if (spec.kind === 'cosmology' && part === undefined) {
 			inputs[head] = { ...(inputs[head] as object | undefined), set: typed };
 		} else {
@@ -50,6 +52,11 @@ export function readFields(calculator: Calculator, fields: Fields): ReadFields {
 		}
 	}
 	return { inputs, problems };
+}
+
+/** Choices, decimals and lists are taken as they are typed: the calculator reads them. */
+function isWords({ kind }: InputSpec): boolean {
+	return kind === 'choice' || kind === 'decimal' || kind === 'list';
 }
 
 /** A number as people type it: a real minus or a hyphen, spaces between groups. Null for anything else. */

@@ -19,7 +19,8 @@ export function reading(document: WidgetDocument, calculators: CalculatorSet): C
 	const evaluation = evaluate(document, {}, calculators);
 	const words = wordsAt(document, evaluation, calculators);
 	return document.blocks.flatMap((block): CopyPart[] => {
-		if (isTextBlock(block)) return [{ id: block.id, kind: block.kind, text: blockText(block, words) }];
+		if (isTextBlock(block))
+			return [{ id: block.id, kind: block.kind, text: blockText(block, words) }];
 		if (block.kind === 'chart') {
 			const { id, title, description, source } = block;
 			return [{ id, kind: 'chart', text: description, title, source }];
@@ -33,13 +34,20 @@ export function reading(document: WidgetDocument, calculators: CalculatorSet): C
 }
 
 /** What the calculator reads for each claim, in the unit the copy uses, by claim id. */
-export function readings(document: WidgetDocument, calculators: CalculatorSet): Map<string, string> {
+export function readings(
+	document: WidgetDocument,
+	calculators: CalculatorSet
+): Map<string, string> {
 	const evaluation = evaluate(document, {}, calculators);
 	return new Map(
-		claimPlaces(document, wordsAt(document, evaluation, calculators)).flatMap(({ claim, words }) => {
-			const weighing = weighingOf(document, evaluation, claim, words, calculators);
-			return weighing ? [[claim.id, readsInWords(weighing.stated, weighing.reading)] as const] : [];
-		})
+		claimPlaces(document, wordsAt(document, evaluation, calculators)).flatMap(
+			({ claim, words }) => {
+				const weighing = weighingOf(document, evaluation, claim, words, calculators);
+				return weighing
+					? [[claim.id, readsInWords(weighing.stated, weighing.reading)] as const]
+					: [];
+			}
+		)
 	);
 }
 

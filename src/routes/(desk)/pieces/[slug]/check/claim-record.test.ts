@@ -16,12 +16,20 @@ function claimOf(document: WidgetDocument, id: string) {
 }
 
 describe('the record of a number that moves', () => {
-	const record = claimRecord(firstLight, claimOf(firstLight, 'frequency'), 'about 68 megahertz', catalogue);
+	const record = claimRecord(
+		firstLight,
+		claimOf(firstLight, 'frequency'),
+		'about 68 megahertz',
+		catalogue
+	);
 
 	test('is read in the unit of the copy, and worked from the first step on', () => {
 		expect(record?.reading).toMatchObject({ unit: 'MHz' });
 		expect(Number(record?.reading?.value)).toBeCloseTo(68.1, 1);
-		expect(record?.working.map(({ calculator }) => calculator)).toEqual(['cosmo.inverse', 'line.observe']);
+		expect(record?.working.map(({ calculator }) => calculator)).toEqual([
+			'cosmo.inverse',
+			'line.observe'
+		]);
 		expect(record?.working[0]?.readings).toEqual([
 			expect.objectContaining({ own: false, value: expect.stringMatching(/^19\.8/) as string })
 		]);
@@ -37,7 +45,9 @@ describe('the record of a number that moves', () => {
 	test('its address holds the settings that give the same reading', () => {
 		const address = new URL(record?.tryAt ?? '', 'http://localhost');
 		expect(address.pathname).toBe('/calculators/line.observe');
-		const inputs = Object.fromEntries([...address.searchParams].map(([key, value]) => [key, Number(value)]));
+		const inputs = Object.fromEntries(
+			[...address.searchParams].map(([key, value]) => [key, Number(value)])
+		);
 		const line = catalogue.get('line.observe');
 		const here = line && runCalculator(line, inputs);
 		const there = evaluate(firstLight, {}, catalogue).steps.line;
@@ -48,7 +58,12 @@ describe('the record of a number that moves', () => {
 });
 
 test('a number tied to a setting is read off the setting', () => {
-	const record = claimRecord(firstLight, claimOf(firstLight, 'rest-frequency'), '1420 megahertz', catalogue);
+	const record = claimRecord(
+		firstLight,
+		claimOf(firstLight, 'rest-frequency'),
+		'1420 megahertz',
+		catalogue
+	);
 	expect(record?.reading).toMatchObject({ value: '1420.41', unit: 'MHz', uncertainty: 'exact' });
 	expect(record?.strips).toEqual([]);
 });

@@ -3,7 +3,13 @@
  * settings and sources, and how the sentence fares along the sliders. Everything comes from `evaluate`.
  */
 import { weighingOf } from '$lib/factcheck/claim-weighing.ts';
-import type { Calculator, CalculatorSet, Reading, Result, Source } from '$lib/physics/calculator.ts';
+import type {
+	Calculator,
+	CalculatorSet,
+	Reading,
+	Result,
+	Source
+} from '$lib/physics/calculator.ts';
 import { lineById } from '$lib/physics/lines/catalogue.ts';
 import { commensurable, convert, convertDifference } from '$lib/physics/units/units.ts';
 import type {
@@ -15,7 +21,12 @@ import type {
 } from '$lib/widget/document.ts';
 import { evaluate, readingAt, type Evaluation } from '$lib/widget/evaluate.ts';
 import { wiringOf } from '$lib/widget/graph.ts';
-import { OUTPUT_FIGURES, printReading, readingWords, type PrintedReading } from '$lib/widget/print-reading.ts';
+import {
+	OUTPUT_FIGURES,
+	printReading,
+	readingWords,
+	type PrintedReading
+} from '$lib/widget/print-reading.ts';
 import type { Stated } from '$lib/widget/stated.ts';
 import { stripsOf, type Strip } from './probe-strips.ts';
 import { tryAddress } from './try-address.ts';
@@ -99,11 +110,17 @@ function inUnitOf(stated: Stated | null, reading: Reading): Reading {
 		value: convert(value, unit, stated.unit),
 		unit: stated.unit,
 		uncertainty:
-			typeof uncertainty === 'number' ? convertDifference(uncertainty, unit, stated.unit) : uncertainty
+			typeof uncertainty === 'number'
+				? convertDifference(uncertainty, unit, stated.unit)
+				: uncertainty
 	};
 }
 
-export function refLabel(document: WidgetDocument, ref: ReadingRef, calculators: CalculatorSet): string {
+export function refLabel(
+	document: WidgetDocument,
+	ref: ReadingRef,
+	calculators: CalculatorSet
+): string {
 	if ('control' in ref) {
 		return document.controls.find(({ id }) => id === ref.control)?.label ?? 'slider';
 	}
@@ -159,7 +176,9 @@ function usedReadings(
 	return [...used].flatMap((key) => {
 		const reading = result.outputs[key];
 		const label = calculator?.outputs[key]?.label ?? key;
-		return reading ? [{ label, value: readingWords(reading, OUTPUT_FIGURES), own: key === own }] : [];
+		return reading
+			? [{ label, value: readingWords(reading, OUTPUT_FIGURES), own: key === own }]
+			: [];
 	});
 }
 

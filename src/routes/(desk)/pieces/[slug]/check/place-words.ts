@@ -8,7 +8,17 @@ const KINDS: Record<TextBlock['kind'], string> = {
 	limits: 'what this can’t tell you',
 	caution: 'caution'
 };
-const ORDINALS = ['first', 'second', 'third', 'fourth', 'fifth', 'sixth', 'seventh', 'eighth', 'ninth'];
+const ORDINALS = [
+	'first',
+	'second',
+	'third',
+	'fourth',
+	'fifth',
+	'sixth',
+	'seventh',
+	'eighth',
+	'ninth'
+];
 
 export function placeWords(document: WidgetDocument, claimId: string): string {
 	const block = document.blocks.find(

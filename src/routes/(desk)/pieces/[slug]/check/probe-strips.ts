@@ -33,7 +33,9 @@ export function stripsOf(
 		.filter(({ id }) => controls.includes(id))
 		.map((control) => ({
 			label: control.label,
-			probes: settingsOf(control).map((value) => probeAt(document, claim, control, value, calculators))
+			probes: settingsOf(control).map((value) =>
+				probeAt(document, claim, control, value, calculators)
+			)
 		}));
 }
 

@@ -2,7 +2,12 @@ import { expect, test } from 'vitest';
 import { sentenceDiff } from './sentence-diff.ts';
 
 test('names the words that went and came', () => {
-	expect(sentenceDiff('It peaks at nearly twice the wavelength.', 'It peaks at more than twice the wavelength.')).toEqual([
+	expect(
+		sentenceDiff(
+			'It peaks at nearly twice the wavelength.',
+			'It peaks at more than twice the wavelength.'
+		)
+	).toEqual([
 		{ kind: 'same', text: 'It peaks at ' },
 		{ kind: 'gone', text: 'nearly ' },
 		{ kind: 'new', text: 'more than ' },
@@ -11,7 +16,9 @@ test('names the words that went and came', () => {
 });
 
 test('a sentence that stayed is one part', () => {
-	expect(sentenceDiff('Nothing moved.', 'Nothing moved.')).toEqual([{ kind: 'same', text: 'Nothing moved.' }]);
+	expect(sentenceDiff('Nothing moved.', 'Nothing moved.')).toEqual([
+		{ kind: 'same', text: 'Nothing moved.' }
+	]);
 });
 
 test.each([

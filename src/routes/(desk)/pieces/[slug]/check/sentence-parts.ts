@@ -1,6 +1,12 @@
 /** The sentence of a claim and its neighbours, cut where claims stand, so that each number can be underlined. */
 import { isTextBlock, type WidgetDocument } from '$lib/widget/document.ts';
-import { blockText, claimPlaces, sentenceSpans, type Span, type Words } from '$lib/widget/places.ts';
+import {
+	blockText,
+	claimPlaces,
+	sentenceSpans,
+	type Span,
+	type Words
+} from '$lib/widget/places.ts';
 
 export interface Part {
 	text: string;
@@ -14,7 +20,11 @@ export interface SentenceParts {
 	after: Part[];
 }
 
-export function sentenceParts(document: WidgetDocument, claimId: string, words: Words): SentenceParts | null {
+export function sentenceParts(
+	document: WidgetDocument,
+	claimId: string,
+	words: Words
+): SentenceParts | null {
 	const places = claimPlaces(document, words);
 	const place = places.find(({ claim }) => claim.id === claimId);
 	const block = document.blocks.find(({ id }) => id === place?.blockId);
@@ -31,7 +41,11 @@ export function sentenceParts(document: WidgetDocument, claimId: string, words: 
 			end: startInBlock + said.length
 		}));
 	const cut = (span: Span | undefined) => (span ? partsOf(text, span, inBlock) : []);
-	return { before: cut(spans[index - 1]), sentence: cut(spans[index]), after: cut(spans[index + 1]) };
+	return {
+		before: cut(spans[index - 1]),
+		sentence: cut(spans[index]),
+		after: cut(spans[index + 1])
+	};
 }
 
 function partsOf(text: string, span: Span, claims: (Span & { claim: string })[]): Part[] {

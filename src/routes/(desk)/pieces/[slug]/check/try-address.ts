@@ -15,7 +15,8 @@ export function tryAddress(
 		const outcome = readingAt(document, evaluation, { step: step.id, setting: key }, calculators);
 		if (outcome.ok) query.set(key, String(outcome.reading.value));
 		else if (source.from === 'fixed' && typeof source.value === 'object') {
-			for (const [part, value] of Object.entries(source.value)) query.set(`${key}.${part}`, String(value));
+			for (const [part, value] of Object.entries(source.value))
+				query.set(`${key}.${part}`, String(value));
 		} else if (source.from === 'fixed') query.set(key, String(source.value));
 	}
 	return `${routes.calculator(step.calculator)}?${query}`;

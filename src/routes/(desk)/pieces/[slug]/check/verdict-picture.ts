@@ -21,7 +21,13 @@ export function verdictPicture(
 	view: Pick<ClaimView, 'words' | 'verdict'>,
 	calculators: CalculatorSet
 ): VerdictPicture | null {
-	const weighing = weighingOf(document, evaluate(document, {}, calculators), claim, view.words, calculators);
+	const weighing = weighingOf(
+		document,
+		evaluate(document, {}, calculators),
+		claim,
+		view.words,
+		calculators
+	);
 	if (!weighing) return null;
 	const { stated, reading } = weighing;
 	return {

@@ -10,10 +10,12 @@ export function whyNotSigned(
 	if (refused === 'same-person-twice') {
 		return 'You wrote on this proof, so another scientist signs it. Writer, checker and editor are three people.';
 	}
-	if (refused === 'not-permitted') return 'Scientists sign claims. You can query them, and answer queries.';
+	if (refused === 'not-permitted')
+		return 'Scientists sign claims. You can query them, and answer queries.';
 	if (claim.form === 'exempt') return 'Nothing to sign: the writer has marked this as no claim.';
 	if (signedByViewer) return `You have signed ${claim.label}.`;
-	if (claim.state === 'queried') return 'This claim has an open query. It can be signed when that is settled.';
+	if (claim.state === 'queried')
+		return 'This claim has an open query. It can be signed when that is settled.';
 	if (claim.verdict.verdict === 'tips') {
 		return 'This claim tips, so it can’t be signed. Query it, and the writer can change the words or the reading.';
 	}

@@ -20,7 +20,12 @@ export function sidesOf(conditions: readonly Condition[]): Record<Condition['sid
 		const own = conditions.filter((condition) => condition.side === key);
 		return { key, title: TITLES[key], conditions: own, locked: own.every(({ met }) => met) };
 	};
-	return { claims: side('claims'), people: side('people'), galley: side('galley'), time: side('time') };
+	return {
+		claims: side('claims'),
+		people: side('people'),
+		galley: side('galley'),
+		time: side('time')
+	};
 }
 
 const NUMBERS = ['None', 'One', 'Two', 'Three', 'All four'];
