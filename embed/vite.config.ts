@@ -1,7 +1,7 @@
 /** Builds what a reader's frame loads, into build/press: one script, one chunk a calculator, one style, the fonts. */
 import { svelte } from '@sveltejs/vite-plugin-svelte';
 import { readdirSync } from 'node:fs';
-import { basename, join } from 'node:path';
+import { join, relative, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vite';
 import { compilerOptions, dynamicCompileOptions } from '../svelte.config.js';
@@ -40,7 +40,11 @@ export default defineConfig({
 		rolldownOptions: {
 			input: Object.fromEntries([
 				['frame', FRAME],
-				...calculators.map((file) => [basename(file, '.ts'), file])
+				// By field and name: two fields may hold a `drag`.
+				...calculators.map((file) => [
+					relative(CALCULATORS, file).replace(/\.ts$/, '').replaceAll(sep, '-'),
+					file
+				])
 			]),
 			preserveEntrySignatures: 'strict',
 			treeshake: {

@@ -27,7 +27,7 @@ export function missingForProof(
 		...[
 			...findings(document, calculators),
 			// Those in the copy follow below, each with its own place.
-			...undeclaredFindings(document).filter(({ code }) => code === 'number-in-headline')
+			...undeclaredFindings(document).filter(({ code }) => code === 'number-in-caption')
 		].map((finding, index) => missingOf(finding, index, numbers)),
 		...numbers.filter(isUndeclared).map((number): Missing => ({
 			key: `number ${number.key}`,

@@ -4,7 +4,7 @@ import type { Claim, WidgetDocument } from '../widget/document.ts';
 import { readingAt, type Evaluation } from '../widget/evaluate.ts';
 import { liveStated } from '../widget/places.ts';
 import type { Stated } from '../widget/stated.ts';
-import { quantityFor } from './judge.ts';
+import { detectQuantities } from './detect.ts';
 import type { WeighedReading } from './weighing.ts';
 
 /** Null where there is no number on one of the sides. `words` are the claim's own, as they stand in the copy. */
@@ -22,6 +22,6 @@ export function weighingOf(
 	const stated =
 		claim.form === 'live'
 			? liveStated(document, evaluation, claim.id, calculators)
-			: (quantityFor(words, reading.unit)?.stated ?? null);
+			: (detectQuantities(words, document.language)[0]?.stated ?? null);
 	return stated && { stated, reading };
 }

@@ -257,19 +257,8 @@ describe('any text', () => {
 		);
 	});
 
-	test('takes time that grows with the length and no faster', { timeout: 60_000 }, () => {
-		const paragraph = CORPUS.replace(/[⟦⟧]/g, '').replace(/\n/g, ' ').slice(0, 1000);
-		const timeOf = (text: string, runs: number) =>
-			Math.min(
-				...Array.from({ length: runs }, () => {
-					const start = performance.now();
-					detectQuantities(text, 'en');
-					return performance.now() - start;
-				})
-			);
-		// On a quiet machine 0.2 ms, 4 ms and under 0.1 s; time that grows as a square takes seconds.
-		expect(timeOf(paragraph, 20)).toBeLessThan(5);
-		expect(timeOf(paragraph.repeat(20), 5)).toBeLessThan(150);
+	// Time that grows as a square takes minutes here; figures belong to the bench.
+	test('long runs of what looks like numbers are got through', { timeout: 60_000 }, () => {
 		const parts = [
 			'1',
 			'1 ',
@@ -289,8 +278,10 @@ describe('any text', () => {
 			'1 000 '
 		];
 		for (const part of parts) {
-			const long = part.repeat(Math.ceil(30_000 / part.length));
-			expect(timeOf(`1${long}b`, 1), `“${part}” over and over`).toBeLessThan(1500);
+			const long = `1${part.repeat(Math.ceil(100_000 / part.length))}b`;
+			for (const { start, end, surface } of detectQuantities(long, 'en')) {
+				expect(long.slice(start, end)).toBe(surface);
+			}
 		}
 	});
 });

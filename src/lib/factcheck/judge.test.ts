@@ -6,7 +6,8 @@ import {
 	type CalculatorSet
 } from '../physics/calculator.ts';
 import type { Claim, Control, Inline, WidgetDocument } from '../widget/document.ts';
-import { judgeClaims, settingsOf } from './judge.ts';
+import { judgeClaims } from './judge.ts';
+import { settingsOf } from './trials.ts';
 
 /** Twice what it is given, so that the expected readings can be seen. Refuses past 90. */
 const doubler: Calculator = defineCalculator({
@@ -118,8 +119,7 @@ describe('stated claims', () => {
 			'level'
 		);
 	});
-	test('the number of the reading’s dimension is the one weighed', () => {
-		expect(judgeWords('in 3 seconds about 14 metres')?.verdict).toBe('level');
+	test('a number of another dimension tips', () => {
 		expect(judgeWords('about 14 seconds')?.verdict).toBe('tips');
 	});
 	test('what can’t be weighed says why', () => {
@@ -219,5 +219,49 @@ describe('stated words in a result sentence', () => {
 		expect(judgeClaims(inBlock('paragraph'), calculators).get('it')).toMatchObject({
 			verdict: 'level'
 		});
+	});
+});
+
+describe('what a reader sees is what is weighed', () => {
+	const stated: Claim = { id: 'it', form: 'stated', reading: output };
+	const told = (before: string, words: string, after = '') =>
+		judgeClaims(
+			documentOf(
+				[
+					...(before ? [{ kind: 'text', text: before } as const] : []),
+					{ kind: 'claim', claim: 'it', text: words },
+					...(after ? [{ kind: 'text', text: after } as const] : [])
+				],
+				[stated]
+			),
+			calculators
+		).get('it');
+	test.each([
+		['a hedge just before the claim', 'more than ', '14 metres', ''],
+		['a digit just before it', 'It is 1', '14 metres', ''],
+		['a scale word just after it', 'It is ', '14', ' million metres'],
+		['a second number inside it', 'It is ', '14 metres, that is 999 kilometres', '']
+	])('%s leaves it unweighed', (_, before, words, after) => {
+		expect(told(before, words, after)).toMatchObject({ verdict: 'unweighed' });
+	});
+	test('the whole number in the claim is weighed', () => {
+		expect(told('It is ', 'about 14 metres', ' long.')).toMatchObject({ verdict: 'level' });
+	});
+	test('words beside a live number are weighed at every setting', () => {
+		const live: Claim = {
+			id: 'live',
+			form: 'live',
+			reading: output,
+			unit: 'm',
+			figures: 2,
+			hedge: 'none'
+		};
+		const content: Inline[] = [
+			{ kind: 'live', claim: 'live' },
+			{ kind: 'text', text: ', that is ' },
+			{ kind: 'claim', claim: 'it', text: 'about 14 metres' }
+		];
+		const verdict = judgeClaims(documentOf(content, [live, stated]), calculators).get('it');
+		expect(verdict).toMatchObject({ verdict: 'tips' });
 	});
 });

@@ -1,25 +1,24 @@
 /** Weighs every claim of a document: stated words as they stand, live numbers at every setting that matters. */
 import type { CalculatorSet } from '../physics/calculator.ts';
 import { commensurable } from '../physics/units/units.ts';
-import type {
-	Claim,
-	Control,
-	ControlValues,
-	ReadingRef,
-	WidgetDocument
-} from '../widget/document.ts';
+import type { Claim, Control, ControlValues, WidgetDocument } from '../widget/document.ts';
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
-import { wiringOf } from '../widget/graph.ts';
-import { claimPlaces, liveStated, tokenWords, type ClaimPlace } from '../widget/places.ts';
-import { plainDecimal, printStated, type Stated } from '../widget/stated.ts';
+import { claimPlaces, liveStated, type ClaimPlace } from '../widget/places.ts';
+import type { Stated } from '../widget/stated.ts';
 import { decide, unweighed, type Decision } from './decide.ts';
-import { detectQuantities, type DetectedQuantity, type QuantityForm } from './detect.ts';
+import type { QuantityForm } from './detect.ts';
+import { ATOM, ownWords, quantityInPlace, type FoundQuantity } from './own-words.ts';
+import {
+	controlsReaching,
+	rank,
+	settingWords,
+	tryThroughout,
+	worstOf,
+	type Trial
+} from './trials.ts';
 import { suggestWordings } from './suggestions.ts';
-import type { Severity, Verdict } from './verdict.ts';
+import type { Verdict } from './verdict.ts';
 import type { WeighedReading } from './weighing.ts';
-
-/** Settings of each slider that a live number is weighed at; the one it starts at comes on top. */
-const SETTINGS = 11;
 
 type Evaluated = (values: ControlValues) => Evaluation;
 
@@ -32,7 +31,7 @@ export function judgeClaims(
 	calculators: CalculatorSet
 ): Map<string, Verdict> {
 	const evaluated = evaluateOnce(document, calculators);
-	const places = new Map(claimPlaces(document, tokenWords).map((place) => [place.claim.id, place]));
+	const places = new Map(claimPlaces(document, ownWords).map((place) => [place.claim.id, place]));
 	return new Map(
 		document.claims.map((claim) => [
 			claim.id,
@@ -98,22 +97,25 @@ const NO_RULE: Partial<Record<QuantityForm, string>> = {
 };
 
 /**
- * Words in a result sentence stand beside numbers that move, so a reader takes them as true at every setting: they are
- * weighed at all of them. Words elsewhere tell of the first settings.
+ * Words beside numbers that move are taken as true at every setting, so they are weighed at all of them: those in a
+ * result sentence, and those whose sentence holds a live number or a slider's value. Words elsewhere tell of the first
+ * settings.
  */
 function judgeStated(
 	document: WidgetDocument,
 	claim: Extract<Claim, { form: 'stated' }>,
-	{ words, blockId }: ClaimPlace,
+	place: ClaimPlace,
 	evaluated: Evaluated,
 	calculators: CalculatorSet
 ): Verdict {
+	const found = quantityInPlace(document, place);
 	const weighAt = (values: ControlValues) =>
-		weighWords(words, readingAt(document, evaluated(values), claim.reading, calculators));
+		weighWords(found, readingAt(document, evaluated(values), claim.reading, calculators));
 	const start = weighAt({});
 	const suggestions = start.stated ? suggestWordings(start.stated, start.reading) : [];
-	const moves = document.blocks.some(({ id, kind }) => id === blockId && kind === 'result');
-	const worst = moves ? worstOf(tryThroughout(document, claim.reading, weighAt)) : null;
+	const worst = moves(document, place)
+		? worstOf(tryThroughout(document, claim.reading, (values) => weighAt(values).decision))
+		: null;
 	if (!worst || rank(worst.decision) <= rank(start.decision)) {
 		return { ...start.decision, suggestions };
 	}
@@ -124,18 +126,24 @@ function judgeStated(
 	};
 }
 
+function moves(document: WidgetDocument, { blockId, sentence }: ClaimPlace): boolean {
+	return (
+		sentence.includes(ATOM) ||
+		document.blocks.some(({ id, kind }) => id === blockId && kind === 'result')
+	);
+}
+
 type WeighedWords =
 	| { decision: Decision; stated: Stated; reading: WeighedReading }
 	| { decision: Decision; stated: null };
 
-function weighWords(words: string, outcome: ReadingOutcome): WeighedWords {
+function weighWords(found: FoundQuantity, outcome: ReadingOutcome): WeighedWords {
 	const untold = (reason: string): WeighedWords => ({ decision: unweighed(reason), stated: null });
 	const read = numberOf(outcome);
 	if (!read.ok) return untold(read.reason);
-	const quantity = quantityFor(words, read.reading.unit);
-	if (!quantity?.stated) {
-		return untold((quantity && NO_RULE[quantity.kind]) ?? 'No number in these words.');
-	}
+	if (!found.ok) return untold(found.reason);
+	const { quantity } = found;
+	if (!quantity.stated) return untold(NO_RULE[quantity.kind] ?? 'No number in these words.');
 	const decision: Decision = quantity.doubleHedge
 		? {
 				...decide(quantity.stated, read.reading),
@@ -144,18 +152,6 @@ function weighWords(words: string, outcome: ReadingOutcome): WeighedWords {
 			}
 		: decide(quantity.stated, read.reading);
 	return { decision, stated: quantity.stated, reading: read.reading };
-}
-
-/** The first quantity of the reading's dimension; where none is, the first at all, so that the mismatch is told. */
-export function quantityFor(words: string, unit: string): DetectedQuantity | undefined {
-	const found = detectQuantities(words, 'en');
-	return found.find((quantity) => commensurable(quantity.unit, unit)) ?? found[0];
-}
-
-interface Trial {
-	decision: Decision;
-	/** “500 million years”, with the slider's label where there are several. */
-	setting: string;
 }
 
 function judgeLive(
@@ -177,9 +173,7 @@ function judgeLive(
 		return stated ? decide(stated, read.reading) : unweighed('No reading.');
 	};
 	const start = weighAt({});
-	const trials = tryThroughout(document, claim.reading, (values) => ({
-		decision: weighAt(values)
-	}));
+	const trials = tryThroughout(document, claim.reading, weighAt);
 	const worst = worstOf(trials);
 	const controls = controlsReaching(document, claim.reading);
 	if (!worst || rank(worst.decision) <= rank(start))
@@ -189,33 +183,6 @@ function judgeLive(
 		reason: `At ${worst.setting}: ${worst.decision.reason}`,
 		suggestions: []
 	};
-}
-
-function controlsReaching(document: WidgetDocument, reading: ReadingRef): Control[] {
-	const reached = wiringOf(document.steps, reading).controls;
-	return document.controls.filter(({ id }) => reached.includes(id));
-}
-
-/** Weighs from end to end of every slider that reaches the reading, the others at their first settings. */
-function tryThroughout(
-	document: WidgetDocument,
-	reading: ReadingRef,
-	weighAt: (values: ControlValues) => { decision: Decision }
-): Trial[] {
-	const controls = controlsReaching(document, reading);
-	return controls.flatMap((control) =>
-		settingsOf(control).map((value): Trial => ({
-			decision: weighAt(value === control.initial ? {} : { [control.id]: value }).decision,
-			setting: settingWords(control, value, controls.length > 1)
-		}))
-	);
-}
-
-function worstOf(trials: readonly Trial[]): Trial | null {
-	return trials.reduce<Trial | null>(
-		(worse, trial) => (worse && rank(worse.decision) >= rank(trial.decision) ? worse : trial),
-		null
-	);
 }
 
 /** The first settings are as bad as it gets: their own reason, and for level numbers how far that was tried. */
@@ -230,30 +197,4 @@ function told(start: Decision, trials: readonly Trial[], controls: readonly Cont
 		...start,
 		reason: `The number printed fits at all ${trials.length} settings tried, ${reach}.`
 	};
-}
-
-const VERDICT_RANK = { level: 0, leans: 10, unweighed: 20, tips: 30 };
-const SEVERITY_RANK: Record<Severity, number> = { none: 0, note: 1, ask: 11, block: 21 };
-
-/** Worst first: tips, block, unweighed, ask, leans, level. */
-function rank({ verdict, severity }: Decision): number {
-	return Math.max(VERDICT_RANK[verdict], SEVERITY_RANK[severity]);
-}
-
-/** From end to end on the slider's own steps, and where it starts. A slider of few steps is tried at each. */
-export function settingsOf(control: Control): number[] {
-	const { min, max, step, initial } = control;
-	const evenly = Array.from({ length: SETTINGS }, (_, index) => {
-		const steps = Math.round(((max - min) * index) / (SETTINGS - 1) / step);
-		return index === SETTINGS - 1
-			? max
-			: Math.min(max, Number((min + steps * step).toPrecision(12)));
-	});
-	return [...new Set([...evenly, initial])].sort((a, b) => a - b);
-}
-
-function settingWords({ label, unit }: Control, value: number, named: boolean): string {
-	const numeral = plainDecimal(Number(value.toPrecision(12)));
-	const printed = printStated({ hedge: 'bare', hedgeWord: '', numeral, scale: 1, unit });
-	return named ? `${printed} (${label})` : printed;
 }

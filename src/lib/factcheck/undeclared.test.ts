@@ -39,9 +39,24 @@ describe('numbers nobody answers for', () => {
 
 	test('are findings with a mend; one in the title says so', () => {
 		expect(undeclaredFindings(document).map(({ code, at }) => [code, at])).toEqual([
-			['number-in-headline', {}],
+			['number-in-caption', {}],
 			['number-unweighed', { block: 'text' }],
 			['number-unweighed', { block: 'text' }]
+		]);
+	});
+
+	test('are found in every caption of a chart and a slider', () => {
+		const captioned = structuredClone(firstLight);
+		captioned.controls[0]!.label = 'Signal at 999 MHz';
+		for (const block of captioned.blocks) {
+			if (block.kind !== 'chart') continue;
+			block.description = 'From 5 MHz up.';
+			block.bands = [{ from: 1, to: 2, label: 'TV at 300 GHz' }];
+		}
+		expect(undeclared(captioned).map(({ surface }) => surface)).toEqual([
+			'999 MHz',
+			'5 MHz',
+			'300 GHz'
 		]);
 	});
 

@@ -1,18 +1,15 @@
 /** Numbers that nobody answers for yet: neither tied to a reading nor named as no claim. They hold a proof back. */
 import { isTextBlock, type WidgetDocument } from '../widget/document.ts';
 import type { Finding } from '../widget/findings.ts';
-import { blockText, type Words } from '../widget/places.ts';
+import { blockText } from '../widget/places.ts';
 import { detectQuantities, type DetectedQuantity } from './detect.ts';
-
-/** Stands for a live number or a setting where only the writer's own words count. */
-const ATOM = '\ufffc';
-
-const ownWords: Words = (inline) =>
-	inline.kind === 'text' || inline.kind === 'claim' ? inline.text : ATOM;
+import { ownWords } from './own-words.ts';
 
 export interface UndeclaredNumber {
-	/** A block's id, or `title` or `point`. */
+	/** A block's id; `title` or `point`; a slider's id for its label. */
 	blockId: string;
+	/** Words that nothing can be tied in: “the title”, “the chart’s description”. */
+	caption?: string;
 	/** UTF-16 offsets in the block's text, where each live number or setting counts as one character. */
 	start: number;
 	end: number;
@@ -24,15 +21,14 @@ export function wantsWeighing({ kind, unit }: DetectedQuantity): boolean {
 	return unit !== '' || (kind !== 'small-word' && kind !== 'order-word');
 }
 
-/** In a title or point, where nothing can be tied, a number word without a unit (“Two holes”) is let be as well. */
+/** In captions, where nothing can be tied, a number word without a unit (“Two holes”) is let be as well. */
 function wantsRewording(quantity: DetectedQuantity): boolean {
 	return wantsWeighing(quantity) && (quantity.unit !== '' || /\d/.test(quantity.surface));
 }
 
 export function undeclared(document: WidgetDocument): UndeclaredNumber[] {
 	const lines = [
-		{ blockId: 'title', text: document.title, declared: [], wanted: wantsRewording },
-		{ blockId: 'point', text: document.point, declared: [], wanted: wantsRewording },
+		...captions(document).map((caption) => ({ ...caption, declared: [], wanted: wantsRewording })),
 		...document.blocks.filter(isTextBlock).map((block) => {
 			let offset = 0;
 			const declared = block.content.flatMap((inline) => {
@@ -48,27 +44,65 @@ export function undeclared(document: WidgetDocument): UndeclaredNumber[] {
 			};
 		})
 	];
-	return lines.flatMap(({ blockId, text, declared, wanted }) =>
+	return lines.flatMap(({ blockId, text, declared, wanted, caption }: Line) =>
 		detectQuantities(text, document.language)
 			.filter(wanted)
 			.filter(({ start, end }) => !declared.some((claim) => start < claim.end && end > claim.start))
-			.map(({ start, end, surface }) => ({ blockId, start, end, surface }))
+			.map(({ start, end, surface }) => ({
+				blockId,
+				start,
+				end,
+				surface,
+				...(caption === undefined ? {} : { caption })
+			}))
 	);
+}
+
+interface Line {
+	blockId: string;
+	caption?: string;
+	text: string;
+	declared: { start: number; end: number }[];
+	wanted: (quantity: DetectedQuantity) => boolean;
+}
+
+/** Everything readers can meet beside the copy. A chart's source is a citation, and full of numbers that are none of ours. */
+function captions(document: WidgetDocument): Pick<Line, 'blockId' | 'caption' | 'text'>[] {
+	return [
+		{ blockId: 'title', caption: 'the title', text: document.title },
+		{ blockId: 'point', caption: 'the point', text: document.point },
+		...document.controls.map(({ id, label }) => ({
+			blockId: id,
+			caption: 'a slider’s label',
+			text: label
+		})),
+		...document.blocks.flatMap((block) =>
+			block.kind === 'chart'
+				? [
+						{ blockId: block.id, caption: 'the chart’s title', text: block.title },
+						{ blockId: block.id, caption: 'the chart’s level axis', text: block.x.label },
+						{ blockId: block.id, caption: 'the chart’s upright axis', text: block.y.label },
+						{ blockId: block.id, caption: 'the chart’s description', text: block.description },
+						...block.bands.map(({ label }) => ({
+							blockId: block.id,
+							caption: 'the name of the chart’s band',
+							text: label
+						}))
+					]
+				: []
+		)
+	];
 }
 
 /** Undeclared numbers as findings, each with its mend. */
 export function undeclaredFindings(document: WidgetDocument): Finding[] {
-	return undeclared(document).map(({ blockId, surface }) =>
-		blockId === 'title' || blockId === 'point'
-			? {
-					code: 'number-in-headline',
-					says: `“${surface}” stands in the ${blockId}, where it can’t be tied to a reading yet. Say it in the copy instead.`,
-					at: {}
-				}
-			: {
-					code: 'number-unweighed',
-					says: `“${surface}” isn’t weighed. Tie it to a reading, or say that it is no claim.`,
-					at: { block: blockId }
-				}
-	);
+	const blocks = new Set(document.blocks.map(({ id }) => id));
+	return undeclared(document).map(({ blockId, surface, caption }) => ({
+		code: caption === undefined ? 'number-unweighed' : 'number-in-caption',
+		says:
+			caption === undefined
+				? `“${surface}” isn’t weighed. Tie it to a reading, or say that it is no claim.`
+				: `“${surface}” stands in ${caption}, where it can’t be tied to a reading yet. Say it in the copy instead.`,
+		at: blocks.has(blockId) ? { block: blockId } : {}
+	}));
 }

@@ -90,12 +90,12 @@ export class LiveWidget {
 	printClaim(claim: Extract<Claim, { form: 'live' }>): Printed {
 		const outcome = this.reading(claim.reading);
 		if (!outcome.ok) return outcome;
-		const { value, unit } = outcome.reading;
+		const { value, unit, quantity } = outcome.reading;
 		if (typeof value === 'string') return { ok: true, words: value };
 		if (!Number.isFinite(value)) return noNumber('There is no number to give at this setting.');
 		if (!commensurable(unit, claim.unit))
 			return noNumber(`This reading can’t be given in ${claim.unit || 'plain numbers'}.`);
-		return { ok: true, words: printStated(stateReading(value, unit, claim)) };
+		return { ok: true, words: printStated(stateReading(value, unit, claim, quantity)) };
 	}
 
 	/** A control's value in words: “180 million years”. */

@@ -50,6 +50,12 @@ describe('a signature lapses', () => {
 		expect(lapsed(firstLight, reworded(firstLight, 'about 21', 'nearly 21'))).toEqual(['stretch']);
 	});
 
+	test('when its paragraph becomes the sentence that moves', () => {
+		const moved = structuredClone(firstLight);
+		moved.blocks[0] = { ...moved.blocks[0]!, kind: 'result' } as (typeof moved.blocks)[0];
+		expect(lapsed(firstLight, moved)).toEqual(['rest-frequency', 'stretch']);
+	});
+
 	test('when the wiring behind it changes', () => {
 		const rewired = structuredClone(firstLight);
 		rewired.steps[0]!.settings.cosmology = { from: 'fixed', value: { set: 'Planck15' } };

@@ -9,7 +9,7 @@ import { wiringOf } from './graph.ts';
 import { claimPlaces, tokenWords } from './places.ts';
 
 /** Goes up when the number rules change what a signature vouches for. */
-export const RULES_EDITION = 1;
+export const RULES_EDITION = 2;
 
 export interface ClaimCover {
 	rules: number;
@@ -18,6 +18,8 @@ export interface ClaimCover {
 	/** The sentence with live numbers and settings as tokens. */
 	sentence: string;
 	words: string;
+	/** It stands in the sentence that moves with the sliders, and so is weighed at every setting. */
+	moves: boolean;
 	/** Where the words start in the sentence, in UTF-16 units: the same words may stand there twice. */
 	start: number;
 	claim: Claim;
@@ -39,6 +41,9 @@ export function claimCovers(
 	document: WidgetDocument,
 	calculators: CalculatorSet
 ): Map<string, ClaimCover> {
+	const moving = new Set(
+		document.blocks.filter(({ kind }) => kind === 'result').map(({ id }) => id)
+	);
 	return new Map(
 		claimPlaces(document, tokenWords).map((place) => [
 			place.claim.id,
@@ -48,6 +53,7 @@ export function claimCovers(
 				constants: document.constants,
 				sentence: place.sentence,
 				words: place.words,
+				moves: moving.has(place.blockId),
 				start: place.start,
 				claim: place.claim,
 				...upstream(document, place.claim, place.sentence, calculators)

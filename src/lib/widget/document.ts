@@ -6,6 +6,16 @@ import { z } from 'zod';
 
 export const DOCUMENT_VERSION = 1;
 
+/** Names every JavaScript object answers to: as a key they would find what nobody wrote. */
+const isOwnName = (name: string) => !(name in Object.prototype);
+const TAKEN = 'This name is taken by the language itself. Choose another.';
+
+/** The key of a setting or an output; `cosmology.H0` reaches into a parameter set. */
+const Key = z
+	.string()
+	.max(60)
+	.refine((key) => key.split('.').every(isOwnName), TAKEN);
+
 /** Ids are made by the builder, stay with their thing through every edit, and are never shown to readers. */
 export const Id = z
 	.string()
@@ -26,7 +36,7 @@ export const SettingSource = z.discriminatedUnion('from', [
 		value: z.union([finite, z.string().max(80), z.record(z.string(), z.unknown())])
 	}),
 	z.strictObject({ from: z.literal('control'), control: Id }),
-	z.strictObject({ from: z.literal('reading'), step: Id, output: z.string().max(60) }),
+	z.strictObject({ from: z.literal('reading'), step: Id, output: Key }),
 	z.strictObject({ from: z.literal('line'), line: z.string().max(60), value: finite })
 ]);
 export type SettingSource = z.infer<typeof SettingSource>;
@@ -36,8 +46,8 @@ export const Step = z.strictObject({
 	id: Id,
 	calculator: z.string().max(60),
 	revision: z.string().max(20),
-	/** Keys are the calculator's input keys; `cosmology.H0` reaches into a parameter set. */
-	settings: z.record(z.string().max(60), SettingSource)
+	/** By the calculator's input keys. */
+	settings: z.record(Key, SettingSource)
 });
 export type Step = z.infer<typeof Step>;
 
@@ -65,8 +75,8 @@ export type Control = z.infer<typeof Control>;
 
 /** What a number in the copy is weighed against: an output, a fixed setting, or where a control starts. */
 export const ReadingRef = z.union([
-	z.strictObject({ step: Id, output: z.string().max(60) }),
-	z.strictObject({ step: Id, setting: z.string().max(60) }),
+	z.strictObject({ step: Id, output: Key }),
+	z.strictObject({ step: Id, setting: Key }),
 	z.strictObject({ control: Id })
 ]);
 export type ReadingRef = z.infer<typeof ReadingRef>;

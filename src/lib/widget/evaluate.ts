@@ -16,7 +16,8 @@ import {
 	type Uncertainty
 } from '../physics/calculator.ts';
 import { runCalculator } from '../physics/calculators/run.ts';
-import { commensurable, convert } from '../physics/units/units.ts';
+import type { QuantityKind } from '../physics/units/quantities.ts';
+import { commensurable, convertQuantity } from '../physics/units/units.ts';
 import type {
 	ChartBlock,
 	Control,
@@ -124,9 +125,9 @@ function settingValue(
 		case 'reading': {
 			const outcome = outputOf(results[source.step], source.output);
 			if (!outcome.ok) return outcome;
-			const { value, unit, uncertainty } = outcome.reading;
+			const { value, unit, uncertainty, quantity } = outcome.reading;
 			if (typeof value !== 'number') return { ok: true, value };
-			const converted = toUnit(value, unit, unitIn(spec, inputs));
+			const converted = toUnit(value, unit, unitIn(spec, inputs), quantity);
 			return converted.ok && uncertainty !== 'exact'
 				? { ...converted, uncertainty: 'not-available' }
 				: converted;
@@ -139,7 +140,12 @@ function unitIn(spec: InputSpec | undefined, inputs: RawInputs): string | null {
 	return spec?.kind === 'number' ? resolveUnit((spec as NumberInput).unit, inputs) : null;
 }
 
-function toUnit(value: number, from: string, to: string | null): SettingOutcome {
+function toUnit(
+	value: number,
+	from: string,
+	to: string | null,
+	quantity: QuantityKind = 'number'
+): SettingOutcome {
 	if (to === null || from === to) return { ok: true, value };
 	if (!commensurable(from, to)) {
 		return refuse(
@@ -147,7 +153,7 @@ function toUnit(value: number, from: string, to: string | null): SettingOutcome 
 			`This setting is in ${to || 'plain numbers'} and can’t take ${from || 'a plain number'}.`
 		);
 	}
-	return { ok: true, value: convert(value, from, to) };
+	return { ok: true, value: convertQuantity(value, from, to, quantity) };
 }
 
 function assign(inputs: RawInputs, key: string, value: unknown): void {
@@ -216,7 +222,7 @@ function settingReading(
 			value: outcome.value,
 			unit: resolveUnit(spec.unit, choices),
 			quantity: spec.quantity,
-			uncertainty: 'exact'
+			uncertainty: outcome.uncertainty ?? 'exact'
 		}
 	};
 }
@@ -262,6 +268,6 @@ export function sampleChart(
 export function valueIn(outcome: ReadingOutcome, unit: string): number | null {
 	if (!outcome.ok || typeof outcome.reading.value !== 'number') return null;
 	return commensurable(outcome.reading.unit, unit)
-		? convert(outcome.reading.value, outcome.reading.unit, unit)
+		? convertQuantity(outcome.reading.value, outcome.reading.unit, unit, outcome.reading.quantity)
 		: null;
 }

@@ -83,6 +83,42 @@ describe('what is broken is named', () => {
 			}),
 			/can’t be printed in m/
 		],
+		[
+			'a made-up value under a line’s name',
+			(d) => {
+				d.steps[1]!.settings.restFrequency_Hz = { from: 'line', line: 'hi-21cm', value: 1e9 };
+				return d;
+			},
+			/another value in the catalogue/
+		],
+		[
+			'an unknown line',
+			(d) => {
+				d.steps[1]!.settings.restFrequency_Hz = { from: 'line', line: 'no-such', value: 1e9 };
+				return d;
+			},
+			/no line “no-such”/
+		],
+		[
+			'an output named after the language’s own',
+			(d) => ({
+				...d,
+				claims: d.claims.map((c) =>
+					c.form === 'live' ? { ...c, reading: { step: 'line', output: 'constructor' } } : c
+				)
+			}),
+			/./
+		],
+		[
+			'a setting named after the language’s own',
+			(d) => ({
+				...d,
+				claims: d.claims.map((c) =>
+					c.form === 'stated' ? { ...c, reading: { step: 'line', setting: 'toString' } } : c
+				)
+			}),
+			/./
+		],
 		['NaN', (d) => ({ ...d, controls: [{ ...d.controls[0], step: Number.NaN }] }), /./],
 		['a newer version', (d) => ({ ...d, version: 99 }), /version 99/],
 		['an unknown key', (d) => ({ ...d, colour: 'red' }), /colour/],

@@ -3,7 +3,13 @@
  * there, no ring on the bench, every setting one its calculator has and every tie between commensurable units.
  * Drafts may be incomplete (see findings.ts); they may not be broken.
  */
-import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
+import {
+	resolveUnit,
+	type Calculator,
+	type CalculatorSet,
+	type InputSpec
+} from '../physics/calculator.ts';
+import { lineById, restValue } from '../physics/lines/catalogue.ts';
 import { commensurable, unitOf } from '../physics/units/units.ts';
 import {
 	DOCUMENT_VERSION,
@@ -178,6 +184,7 @@ function settingIssue(
 	if (!spec || (part !== undefined && spec.kind !== 'cosmology')) {
 		return `${calculator.title} has no setting “${key}”.`;
 	}
+	if (source.from === 'line') return lineIssue(source, spec, step);
 	const unit = sourceUnit(source, document, calculators);
 	if (unit === 'missing-control') return `The control of “${spec.label}” isn’t in the piece.`;
 	if (unit === 'missing-output') return `The reading tied to “${spec.label}” doesn’t exist.`;
@@ -187,6 +194,28 @@ function settingIssue(
 		? null
 		: `“${spec.label}” is in ${wanted || 'plain numbers'} and can’t take a value in ${unit.unit || 'plain numbers'}.`;
 }
+
+/** A pinned line says whose number it is, so it must be that number. */
+function lineIssue(
+	source: Extract<SettingSource, { from: 'line' }>,
+	spec: InputSpec,
+	step: Step
+): string | null {
+	const line = lineById(source.line);
+	if (!line) return `The catalogue has no line “${source.line}”.`;
+	if (spec.kind !== 'number' || !LINE_QUANTITIES.has(spec.quantity)) {
+		return `“${spec.label}” can’t take a line of the catalogue.`;
+	}
+	const value = restValue(line, resolveUnit(spec.unit, fixedSettings(step)));
+	return Math.abs(value / source.value - 1) < ROUNDING
+		? null
+		: `${line.label} has another value in the catalogue now: choose the line anew.`;
+}
+
+/** Converting a line's own value to the setting's unit may cost the last bit. */
+const ROUNDING = 1e-14;
+
+const LINE_QUANTITIES: ReadonlySet<string> = new Set(['wavelength', 'frequency', 'photon-energy']);
 
 function sourceUnit(
 	source: SettingSource,

@@ -83,7 +83,7 @@ export function liveStated(
 
 function stateLive(reading: Reading, claim: Extract<Claim, { form: 'live' }>): Stated | null {
 	return typeof reading.value === 'number'
-		? stateReading(reading.value, reading.unit, claim)
+		? stateReading(reading.value, reading.unit, claim, reading.quantity)
 		: null;
 }
 

@@ -2,7 +2,8 @@
  * A stated quantity: the hedge, the numeral as written, the scale word and the unit. The fact-check weighs it and
  * the widget prints it, so what is printed is what is weighed. English; other languages join in their own file.
  */
-import { convert, unitOf } from '../physics/units/units.ts';
+import type { QuantityKind } from '../physics/units/quantities.ts';
+import { convertQuantity, unitOf } from '../physics/units/units.ts';
 
 /** Families are what the rules know; the word as written is kept beside it. */
 export type HedgeFamily =
@@ -59,11 +60,16 @@ export function statedValue(stated: Stated): number {
  * States a reading by a live format: converts first, rounds once, last. Rounds half to even on the shortest decimal
  * string that round-trips the double (ISO 80000-1:2009 annex B rule A), as the number rules ask.
  */
-export function stateReading(value: number, unit: string, format: LiveFormat): Stated {
+export function stateReading(
+	value: number,
+	unit: string,
+	format: LiveFormat,
+	quantity: QuantityKind = 'number'
+): Stated {
 	return {
 		hedge: format.hedge === 'about' ? 'around' : 'bare',
 		hedgeWord: format.hedge === 'about' ? 'about' : '',
-		numeral: roundToFigures(convert(value, unit, format.unit), format.figures),
+		numeral: roundToFigures(convertQuantity(value, unit, format.unit, quantity), format.figures),
 		scale: 1,
 		unit: format.unit
 	};

@@ -1,4 +1,5 @@
 /** Units: look-up, conversion, and a hint for a symbol that is nearly right. Symbols are case-sensitive: mHz is not MHz. */
+import type { QuantityKind } from './quantities.ts';
 import { UNIT_TABLE, type BaseDimension, type Dimension, type UnitRow } from './table.ts';
 
 export type { Dimension } from './table.ts';
@@ -160,4 +161,14 @@ function isOneEditAway(a: string, b: string): boolean {
 	const restB = b.slice(start, b.length - end);
 	if (restA.length <= 1 && restB.length <= 1) return true;
 	return restA.length === 2 && restB.length === 2 && restA[0] === restB[1] && restA[1] === restB[0];
+}
+
+/** Converts a value of a kind: a temperature difference has no zero point to shift. Throws as `convert` does. */
+export function convertQuantity(
+	value: number,
+	from: string,
+	to: string,
+	quantity: QuantityKind
+): number {
+	return (quantity === 'temperature-difference' ? convertDifference : convert)(value, from, to);
 }

@@ -80,7 +80,7 @@ export const firstLight: WidgetDocument = {
 				unit: 'MHz',
 				label: 'frequency'
 			},
-			bands: [{ from: 87.5, to: 108, label: 'FM radio, 87.5–108' }],
+			bands: [{ from: 87.5, to: 108, label: 'FM radio' }],
 			source:
 				'Growth of space from Planck Collaboration 2018 VI; the line from Hellwig and others 1970',
 			description:

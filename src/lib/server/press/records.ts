@@ -1,16 +1,16 @@
 /** How each number of a release is known, told for readers: the weighing, the people, the sources, the working. */
 import { beamPicture } from '../../factcheck/beam.ts';
-import { judgeClaims, quantityFor } from '../../factcheck/judge.ts';
+import { weighingOf } from '../../factcheck/claim-weighing.ts';
+import { judgeClaims } from '../../factcheck/judge.ts';
 import { readsOnBeam, verdictSentence } from '../../factcheck/words.ts';
 import type { CalculatorSet, Source } from '../../physics/calculator.ts';
 import { cosmologySets } from '../../physics/constants/cosmologies.ts';
 import { lineById } from '../../physics/lines/catalogue.ts';
 import type { ClaimRecord, ClaimRecords } from '../../renderer/records.ts';
 import type { Claim, SettingSource, WidgetDocument } from '../../widget/document.ts';
-import { evaluate, readingAt } from '../../widget/evaluate.ts';
+import { evaluate } from '../../widget/evaluate.ts';
 import { wiringOf } from '../../widget/graph.ts';
-import { claimPlaces, liveStated, wordsAt } from '../../widget/places.ts';
-import type { Stated } from '../../widget/stated.ts';
+import { claimPlaces, wordsAt } from '../../widget/places.ts';
 
 /** One signature in force. */
 export interface Signing {
@@ -35,25 +35,19 @@ export function recordsOf(
 	const records = places.flatMap(({ claim, words }): [string, ClaimRecord][] => {
 		const verdict = verdicts.get(claim.id);
 		if (claim.form === 'exempt' || !verdict) return [];
-		const outcome = readingAt(document, evaluation, claim.reading, calculators);
-		const reading =
-			outcome.ok && typeof outcome.reading.value === 'number'
-				? { ...outcome.reading, value: outcome.reading.value }
-				: null;
-		const stated: Stated | null =
-			claim.form === 'live'
-				? liveStated(document, evaluation, claim.id, calculators)
-				: ((reading && quantityFor(words, reading.unit)?.stated) ?? null);
-		const picture = stated && reading && beamPicture(stated, reading);
+		const weighing = weighingOf(document, evaluation, claim, words, calculators);
+		const picture = weighing && beamPicture(weighing.stated, weighing.reading);
 		return [
 			[
 				claim.id,
 				{
-					beam: picture ? { picture, words, reads: readsOnBeam(stated, reading) } : null,
-					says:
-						stated && reading
-							? verdictSentence(stated, reading, verdict, 'reader', words)
-							: verdict.reason,
+					beam:
+						weighing && picture
+							? { picture, words, reads: readsOnBeam(weighing.stated, weighing.reading) }
+							: null,
+					says: weighing
+						? verdictSentence(weighing.stated, weighing.reading, verdict, 'reader', words)
+						: verdict.reason,
 					checkedBy: checkersOf(claim.id, signings),
 					...groundsOf(document, claim, calculators)
 				}
