@@ -2,6 +2,7 @@
 import { resolveUnit, type Calculator, type InputSpec } from '../physics/calculator.ts';
 import { convert } from '../physics/units/units.ts';
 import type { Control, SettingSource, Step } from '../widget/document.ts';
+import { largestOnGrid, snapToGrid } from '../widget/grid.ts';
 import { plainDecimal, roundToFigures } from '../widget/stated.ts';
 import { fixedSettings } from '../widget/tie-units.ts';
 import { newId } from './ids.ts';
@@ -124,14 +125,13 @@ export function suggestControl(
 	const from = wide ? Math.max(low, roundDown(first / 2)) : low;
 	const to = wide ? Math.min(high, roundUp(first * 3)) : high;
 	const step = roundDown((to - from) / 40) || (to - from) / 40;
-	const stepped = Math.round((first - from) / step) * step + from;
+	const grid = { min: tidy(from), max: tidy(to), step: tidy(step) };
 	return {
 		label,
 		unit,
-		min: tidy(from),
-		max: tidy(to),
-		step: tidy(step),
-		initial: tidy(Math.min(to, Math.max(from, stepped)))
+		...grid,
+		max: largestOnGrid(grid),
+		initial: snapToGrid(first, grid)
 	};
 }
 

@@ -101,10 +101,12 @@ const ALLOWANCES: Record<
 	bare: (_word, _percent, isFraction) =>
 		isFraction
 			? `A fraction without a hedge allows up to ${bands.bare.level} per cent.`
-			: `A number without a hedge allows its own rounding, and up to ${bands.bare.level} per cent.`,
+			: `A number without a hedge allows its own rounding, and never more than ${bands.bare.level} per cent.`,
 	exactly: (word) => `${word} allows the very number and nothing else.`,
 	around: (word, _percent, isFraction) =>
-		`${word} allows ${isFraction ? '' : 'its own rounding, and '}up to ${bands.around.leans} per cent.`,
+		isFraction
+			? `${word} allows up to ${bands.around.leans} per cent.`
+			: `${word} allows its own rounding; past it, up to ${bands.around.leans} per cent is a stretch.`,
 	below: (word, percent) => short(word, bands.below, percent),
 	'just-below': (word, percent) => short(word, bands.justBelow, percent),
 	'just-above': (word) => `${word} allows up to ${bands.justAbove.level} per cent above.`,

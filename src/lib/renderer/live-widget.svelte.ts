@@ -10,7 +10,7 @@ import type { Claim, Control, ReadingRef, WidgetDocument } from '../widget/docum
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
 import { settingStated } from '../widget/places.ts';
 import { printStated, stateReading } from '../widget/stated.ts';
-import { snapToGrid } from './controls/grid.ts';
+import { snapToGrid } from '../widget/grid.ts';
 import type { ClaimRecord } from './records.ts';
 import type { Released } from './release.ts';
 
@@ -100,7 +100,16 @@ export class LiveWidget {
 
 	/** A control's value in words: “180 million years”. */
 	printSetting(controlId: string): string {
-		const stated = settingStated(this.document, this.evaluation, controlId);
+		return this.#printValue(controlId, this.evaluation);
+	}
+
+	/** The value a control starts at, in words. */
+	printFirstSetting(controlId: string): string {
+		return this.#printValue(controlId, { values: {}, steps: {} });
+	}
+
+	#printValue(controlId: string, evaluation: Evaluation): string {
+		const stated = settingStated(this.document, evaluation, controlId);
 		return stated ? printStated(stated) : '';
 	}
 }

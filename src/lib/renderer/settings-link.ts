@@ -2,7 +2,7 @@
 import { unitOf } from '../physics/units/units.ts';
 import type { Control } from '../widget/document.ts';
 import { plainDecimal, printStated } from '../widget/stated.ts';
-import { snapToGrid } from './controls/grid.ts';
+import { snapToGrid } from '../widget/grid.ts';
 
 export interface LinkSettings {
 	/** By control id; each inside its control's range. */

@@ -2,6 +2,7 @@
 import type { CalculatorSet } from '../physics/calculator.ts';
 import { isTextBlock, type ChartBlock, type WidgetDocument } from './document.ts';
 import { evaluate, readingAt } from './evaluate.ts';
+import { gridProblem } from './grid.ts';
 import { blockText, tokenWords } from './places.ts';
 
 export interface Finding {
@@ -61,7 +62,8 @@ function controlFindings(document: WidgetDocument): Finding[] {
 	const shown = new Set(
 		document.blocks.flatMap((block) => (block.kind === 'control' ? [block.control] : []))
 	);
-	return document.controls.flatMap(({ id, label }) => {
+	return document.controls.flatMap((control) => {
+		const { id, label, initial } = control;
 		const block = document.blocks.find(
 			(candidate) => candidate.kind === 'control' && candidate.control === id
 		);
@@ -75,9 +77,15 @@ function controlFindings(document: WidgetDocument): Finding[] {
 				}
 			];
 		}
-		return label.trim()
-			? []
-			: [{ code: 'no-control-label', says: 'Say what the slider moves, with its unit.', at }];
+		const offGrid = gridProblem(control, initial);
+		return [
+			...(label.trim()
+				? []
+				: [{ code: 'no-control-label', says: 'Say what the slider moves, with its unit.', at }]),
+			...(offGrid
+				? [{ code: 'off-grid', says: `The slider “${label}” can’t be set right: ${offGrid}`, at }]
+				: [])
+		];
 	});
 }
 

@@ -71,6 +71,11 @@ export function tableRows(points: readonly CurvePoint[], rows = 9): { x: string;
 	});
 }
 
+/** A band by its name and its ends: “FM radio, 87.5–108”. */
+export function bandWords({ label, from, to }: Span & { label: string }): string {
+	return `${label}, ${tickWords(from)}–${tickWords(to)}`;
+}
+
 export function tickWords(value: number): string {
 	return printNumeral(plainDecimal(value));
 }

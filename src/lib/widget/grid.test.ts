@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { largestOnGrid, snapToGrid } from './grid.ts';
+import { gridProblem, largestOnGrid, snapToGrid } from './grid.ts';
 
 const ages = { min: 100, max: 500, step: 10 };
 
@@ -20,4 +20,13 @@ test.each([
 test('the end is the last whole step inside the range', () => {
 	expect(largestOnGrid({ min: 1, max: 10, step: 4 })).toBe(9);
 	expect(largestOnGrid({ min: 0.1, max: 1, step: 0.1 })).toBe(1);
+});
+
+test.each([
+	[{ min: 0, max: 90, step: 7 }, 0, 'Steps of 7 from 0 lead to 84, not to 90.'],
+	[{ min: 0, max: 91, step: 7 }, 45, 'No whole step from 0 leads to 45; the nearest is 42.'],
+	[{ min: 0.1, max: 1, step: 0.1 }, 0.3, ''],
+	[{ min: 100, max: 500, step: 10 }, 180, '']
+])('%j from %d', (grid, initial, problem) => {
+	expect(gridProblem(grid, initial)).toBe(problem);
 });

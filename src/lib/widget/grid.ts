@@ -19,6 +19,18 @@ export function largestOnGrid(grid: Grid): number {
 	return onGrid(stepsToEnd(grid), grid);
 }
 
+/** What is amiss with a slider whose ends or start no whole step leads to; '' when a reader can reach them all. */
+export function gridProblem(grid: Grid, initial: number): string {
+	const last = largestOnGrid(grid);
+	if (last !== grid.max) {
+		return `Steps of ${grid.step} from ${grid.min} lead to ${last}, not to ${grid.max}.`;
+	}
+	const near = snapToGrid(initial, grid);
+	return near === initial
+		? ''
+		: `No whole step from ${grid.min} leads to ${initial}; the nearest is ${near}.`;
+}
+
 /** Decimal places that write every value of the grid in full. */
 function gridDecimals({ min, step }: Grid): number {
 	return Math.max(decimals(min), decimals(step));
