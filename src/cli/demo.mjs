@@ -191,10 +191,16 @@ function print(demo) {
 	);
 }
 
+function readFlags() {
+	try {
+		return parseArgs({ options: { fresh: { type: 'boolean' }, json: { type: 'boolean' } } }).values;
+	} catch (error) {
+		throw new Plain(`${error.message}. It takes --fresh, which starts over, and --json.`);
+	}
+}
+
 async function run() {
-	const { values: flags } = parseArgs({
-		options: { fresh: { type: 'boolean' }, json: { type: 'boolean' } }
-	});
+	const flags = readFlags();
 	if (flags.json) speakOnStandardError();
 	requireNode();
 

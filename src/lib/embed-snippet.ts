@@ -11,13 +11,25 @@ export function embedSnippet(release: {
 	slug: string;
 	document: WidgetDocument;
 }): string {
-	const { origin, slug, document } = release;
-	const title = escapeAttribute(document.title);
+	const { document, ...place } = release;
+	return frameSnippet({ ...place, title: document.title, height: reservedHeight(document) });
+}
+
+/** The same for a release whose height was worked out before. */
+export function frameSnippet(release: {
+	origin: string;
+	slug: string;
+	title: string;
+	/** From `reservedHeight`. */
+	height: string;
+}): string {
+	const { origin, slug, height } = release;
+	const title = escapeAttribute(release.title);
 	return `<iframe src="${escapeAttribute(origin + routes.frame(slug))}"
   title="${title} – interactive explainer" loading="lazy"
   sandbox="allow-scripts allow-popups allow-popups-to-escape-sandbox"
   allow="" referrerpolicy="strict-origin-when-cross-origin"
-  style="display:block;width:100%;border:0;height:${reservedHeight(document)}"></iframe>
+  style="display:block;width:100%;border:0;height:${height}"></iframe>
 <p><a href="${escapeAttribute(origin + routes.publicPage(slug))}">${title}: text version and who checked it</a></p>`;
 }
 

@@ -15,6 +15,16 @@ export const explanations = {
 		message: 'Too many tries in a short time.',
 		help: 'Wait a quarter of an hour, or ask for a sign-in link instead.'
 	},
+	'links-slowed': {
+		status: 429,
+		message: 'Too many sign-in links were asked for.',
+		help: 'Wait an hour, or sign in with your passphrase.'
+	},
+	'calculations-slowed': {
+		status: 429,
+		message: 'This network address has asked for 60 calculations within a minute.',
+		help: 'Wait a minute. For many at once, run npm run calc from a checkout.'
+	},
 	'link-spent': {
 		status: 400,
 		message: 'This sign-in link has been used, or is older than ten minutes.',
@@ -24,6 +34,12 @@ export const explanations = {
 		status: 403,
 		message: 'A signature needs your passphrase, given within the last quarter of an hour.',
 		help: 'Give it once more. What you were about to do is kept.'
+	},
+	'confirm-by-link': {
+		status: 403,
+		message:
+			'A signature needs a sign-in from the last quarter of an hour, and you have no passphrase.',
+		help: 'Sign out, sign in again by link, and come back. Nothing was signed or passed.'
 	},
 	'not-permitted': {
 		status: 403,
@@ -48,7 +64,7 @@ export const explanations = {
 	'document-broken': {
 		status: 422,
 		message: 'This document doesn’t hang together.',
-		help: 'The draft before this change is kept. Undo the last step.'
+		help: 'What was kept before is untouched. If you have just changed something, undo it; if not, tell the house’s admin.'
 	},
 	'slug-taken': {
 		status: 409,
@@ -89,6 +105,11 @@ export const explanations = {
 		status: 409,
 		message: 'The proof can’t be passed yet.',
 		help: 'Each open condition says how to clear it.'
+	},
+	'check-moved': {
+		status: 409,
+		message: 'A signature or the pass has changed while this was being released.',
+		help: 'Nothing was released. Look it over, then release it again.'
 	},
 	'already-released': {
 		status: 409,

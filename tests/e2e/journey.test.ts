@@ -163,8 +163,7 @@ describe('first light on the dial', { timeout: 120_000 }, () => {
 		await page.reload();
 		await walkTo(page, '1a');
 		await page.getByRole('button', { name: 'Accept the answer' }).click();
-		await page.getByText('Settled').first().waitFor();
-		await page.waitForLoadState('networkidle');
+		await page.getByText(/^Settled,/).waitFor();
 		proofId = await page.locator('input[name="proofId"]').first().inputValue();
 		for (const label of ['1a', '1b', '2a', '2b']) {
 			await onClaim(page, label);

@@ -1,6 +1,7 @@
 /** What the demo runs on: its folder, its ports, its secrets. Plain Node, no packages. */
 import { randomBytes } from 'node:crypto';
 import { existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { hostname } from 'node:os';
 import { join, resolve } from 'node:path';
 import { FolderHeld, holdFolder } from './folder-lock.mjs';
 import { isFree } from './ports.mjs';
@@ -58,7 +59,7 @@ const RECORD = 'steelyard-demo.json';
 const LOCK_NOTE = '.in-use';
 
 const contents = (folder) =>
-	existsSync(folder) ? readdirSync(folder).filter((name) => name !== LOCK_NOTE) : [];
+	existsSync(folder) ? readdirSync(folder).filter((name) => !name.startsWith(LOCK_NOTE)) : [];
 
 export const demoFolder = (env) => resolve(ROOT, env.DEMO_DATA_DIR?.trim() || 'data/demo');
 
@@ -72,8 +73,19 @@ function requireDemoFolder(folder) {
 	);
 }
 
-const holderOf = (error) =>
-	error.holder ? `process ${error.holder.pid}, since ${error.holder.since}` : 'another process';
+const isHere = (holder) => holder.host === hostname();
+const holderOf = ({ holder }) => {
+	if (!holder) return 'another process';
+	const where = isHere(holder) ? '' : ` on ${holder.host}`;
+	return `process ${holder.pid}${where}, since ${holder.since}`;
+};
+/** How to stop the holder; one on another host may have ended long ago, which can't be seen from here. */
+const stopFor = (error, folder) => {
+	if (!error.holder) return 'Ctrl+C where it runs';
+	return isHere(error.holder)
+		? `Ctrl+C where it runs, or kill ${error.holder.pid}`
+		: `Ctrl+C where it runs; if it has long ended, delete ${join(folder, LOCK_NOTE)}`;
+};
 
 /** Takes the demo's folder; throws a sentence when another process has it. Returns the way to let go. */
 export async function holdDemoFolder(folder) {
@@ -82,11 +94,8 @@ export async function holdDemoFolder(folder) {
 		return await holdFolder(folder);
 	} catch (error) {
 		if (!(error instanceof FolderHeld)) throw error;
-		const stop = error.holder
-			? `Ctrl+C where it runs, or kill ${error.holder.pid}`
-			: 'Ctrl+C where it runs';
 		throw new Plain(
-			`A demo already runs on ${folder} (${holderOf(error)}). Use that one, or stop it first: ${stop}. ` +
+			`A demo already runs on ${folder} (${holderOf(error)}). Use that one, or stop it first: ${stopFor(error, folder)}. ` +
 				'Nothing was changed.'
 		);
 	}
@@ -104,8 +113,8 @@ export async function requireIdleHouse(folder) {
 	} catch (error) {
 		if (!(error instanceof FolderHeld)) throw error;
 		throw new Plain(
-			`A server runs on the demo’s data in ${houseFolder(folder)} (${holderOf(error)}). Stop it first` +
-				`${error.holder ? `: kill ${error.holder.pid}` : ''}. Nothing was changed.`
+			`A server runs on the demo’s data in ${houseFolder(folder)} (${holderOf(error)}). Stop it first: ` +
+				`${stopFor(error, houseFolder(folder))}. Nothing was changed.`
 		);
 	}
 }

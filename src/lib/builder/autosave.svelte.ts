@@ -3,7 +3,9 @@
  * Nothing here is thrown away until the server has said that it keeps it.
  */
 import type { WidgetDocument } from '../widget/document.ts';
-import type { Journal, JournalEntry } from './journal.ts';
+import { digestOf } from '../widget/freeze.ts';
+import type { JournalEntry } from './journal.ts';
+import type { PatientJournal } from './patient-journal.svelte.ts';
 
 /** How long typing rests before the server is asked to keep it. */
 const REST_MS = 400;
@@ -12,6 +14,8 @@ const LONGEST_WAIT_MS = 2_000;
 const JOURNAL_MS = 200;
 const FIRST_RETRY_MS = 1_000;
 const LONGEST_RETRY_MS = 15_000;
+/** A server that takes longer than this to answer counts as away. */
+const LONGEST_ANSWER_MS = 15_000;
 
 export type KeepState =
 	| { name: 'kept' }
@@ -21,7 +25,13 @@ export type KeepState =
 	| { name: 'away'; tries: number }
 	| { name: 'signed-out' }
 	| { name: 'conflict'; theirs: TheirVersion }
-	| { name: 'refused'; issues: string[] };
+	| { name: 'refused'; issues: RefusedIssue[] };
+
+export interface RefusedIssue {
+	/** Where in the document: `blocks.3.content.0.text`; '' for the whole of it. */
+	path: string;
+	message: string;
+}
 
 export interface TheirVersion {
 	version: number;
@@ -38,7 +48,7 @@ export interface Kept {
 
 export interface AutosaveParts {
 	address: string;
-	journal: Journal;
+	journal: PatientJournal;
 	fetch: typeof fetch;
 	now: () => Date;
 	/** The draft as it stands; called when it is about to be kept. */
@@ -56,7 +66,9 @@ export class Autosave {
 	#journalTimer: ReturnType<typeof setTimeout> | undefined;
 	#waitingSince: number | null = null;
 	#changesMade = 0;
-	#sending = false;
+	#underWay: Promise<void> | null = null;
+	/** Digests of drafts sent whose answer never came: the server may have kept one of them all the same. */
+	#unanswered = new Set<string>();
 
 	constructor(parts: AutosaveParts, kept: Kept) {
 		this.#parts = parts;
@@ -92,10 +104,11 @@ export class Autosave {
 		clearTimeout(this.#journalTimer);
 		this.#journalTimer = undefined;
 		if (this.isSynced) return;
-		await this.#parts.journal.write(this.#entry());
+		await this.#parts.journal.write(this.entry());
 	}
 
-	#entry(): JournalEntry {
+	/** The draft as it stands, for the journal. */
+	entry(): JournalEntry {
 		// The journal outlives this page, so it takes plain data, not the editor's own objects.
 		const document: unknown = JSON.parse(JSON.stringify(this.#parts.draft()));
 		return { baseVersion: this.version, document, at: this.#parts.now().toISOString() };
@@ -104,65 +117,95 @@ export class Autosave {
 	/** Asks the server to keep the draft as it stands; tries again by itself while the server is away. */
 	async keep(): Promise<void> {
 		clearTimeout(this.#keepTimer);
-		if (this.#sending) return this.#keepSoon();
-		this.#sending = true;
+		if (this.#underWay) return this.#keepSoon();
+		const sending = this.#send();
+		this.#underWay = sending;
+		try {
+			await sending;
+		} finally {
+			this.#underWay = null;
+		}
+	}
+
+	/** Waits for the save under way, then keeps what was typed since. True when the server has every word. */
+	async keepAll(): Promise<boolean> {
+		await this.#underWay;
+		if (!this.isSynced) await this.tryNow();
+		return this.isSynced;
+	}
+
+	async #send(): Promise<void> {
 		this.#waitingSince = null;
 		const sentChanges = this.#changesMade;
 		const tries = this.state.name === 'away' ? this.state.tries : 0;
 		if (tries === 0) this.state = { name: 'keeping' };
+		const body = JSON.stringify({ baseVersion: this.version, document: this.#parts.draft() });
+		this.#unanswered.add(digestIn(body));
 		try {
 			const response = await this.#parts.fetch(this.#parts.address, {
 				method: 'PUT',
 				headers: { 'content-type': 'application/json' },
-				body: JSON.stringify({ baseVersion: this.version, document: this.#parts.draft() })
+				body,
+				signal: AbortSignal.timeout(LONGEST_ANSWER_MS)
 			});
 			await this.#settle(response, sentChanges, tries);
-		} catch (error) {
-			// Only the network fails here: the answer's own troubles are states.
-			if (!(error instanceof TypeError) && !(error instanceof SyntaxError)) throw error;
+		} catch {
+			// No answer, half an answer, or one that isn't the house's own: to the writer, the server is away.
 			this.#tryLater(tries);
-		} finally {
-			this.#sending = false;
 		}
 	}
 
 	async #settle(response: Response, sentChanges: number, tries: number): Promise<void> {
-		if (response.ok) {
-			const kept = (await response.json()) as Kept;
-			this.version = kept.version;
-			this.keptAt = kept.savedAt;
-			if (this.#changesMade === sentChanges) {
-				this.state = { name: 'kept' };
-				clearTimeout(this.#journalTimer);
-				this.#journalTimer = undefined;
-				await this.#parts.journal.clear();
-				return;
-			}
-			this.state = { name: 'unsynced' };
-			this.#keepSoon();
-			return;
-		}
-		await this.flushJournal();
+		if (response.ok) return this.#settleKept((await response.json()) as Kept, sentChanges);
 		switch (response.status) {
 			case 401:
 				this.state = { name: 'signed-out' };
-				return;
+				break;
 			case 409:
-				this.state = { name: 'conflict', theirs: theirVersion(await response.json()) };
-				return;
+				this.#settleConflict(theirVersion(await response.json()));
+				break;
 			case 422:
 			case 413:
 			case 403:
 				this.state = { name: 'refused', issues: issuesOf(await response.json()) };
-				return;
+				break;
 			default:
 				this.#tryLater(tries);
 		}
+		void this.flushJournal();
+	}
+
+	#settleKept({ version, savedAt }: Kept, sentChanges: number): void {
+		this.version = version;
+		this.keptAt = savedAt;
+		this.#unanswered.clear();
+		if (this.#changesMade === sentChanges) {
+			this.state = { name: 'kept' };
+			clearTimeout(this.#journalTimer);
+			this.#journalTimer = undefined;
+			void this.#parts.journal.clear();
+			return;
+		}
+		this.state = { name: 'unsynced' };
+		this.#keepSoon();
+	}
+
+	/** The newer version may be one of our own, whose answer was lost on the way. */
+	#settleConflict(theirs: TheirVersion): void {
+		if (!this.#unanswered.has(digestOf(theirs.document))) {
+			this.state = { name: 'conflict', theirs };
+			return;
+		}
+		this.version = theirs.version;
+		this.keptAt = theirs.savedAt;
+		this.state = { name: 'unsynced' };
+		this.#keepSoon();
 	}
 
 	#tryLater(tries: number): void {
 		this.state = { name: 'away', tries: tries + 1 };
 		const wait = Math.min(LONGEST_RETRY_MS, FIRST_RETRY_MS * 2 ** tries);
+		clearTimeout(this.#keepTimer);
 		this.#keepTimer = setTimeout(() => void this.keep(), wait);
 	}
 
@@ -174,25 +217,31 @@ export class Autosave {
 	}
 
 	/** Keeps this browser's words as the newest version, on top of theirs, which are set aside here. */
-	async keepMine(): Promise<void> {
-		if (this.state.name !== 'conflict') return;
+	keepMine(): Promise<void> {
+		if (this.state.name !== 'conflict') return Promise.resolve();
 		const { version, savedAt, document } = this.state.theirs;
-		await this.#parts.journal.setAside({ baseVersion: version, at: savedAt, document });
+		void this.#parts.journal.setAside({ baseVersion: version, at: savedAt, document });
 		this.version = version;
 		this.state = { name: 'unsynced' };
 		return this.keep();
 	}
 
 	/** Sets this browser's words aside and goes on from theirs; the caller puts their words into the editor. */
-	async takeTheirs(): Promise<TheirVersion | null> {
+	takeTheirs(): TheirVersion | null {
 		if (this.state.name !== 'conflict') return null;
 		const { theirs } = this.state;
-		await this.#parts.journal.setAside(this.#entry());
-		await this.#parts.journal.clear();
+		void this.#moveAside(this.entry());
 		this.version = theirs.version;
 		this.keptAt = theirs.savedAt;
 		this.state = { name: 'kept' };
 		return theirs;
+	}
+
+	/** The journal lets go of its newest entry only when that one is safe beside it. */
+	async #moveAside(entry: JournalEntry): Promise<void> {
+		const { journal } = this.#parts;
+		await journal.setAside(entry);
+		if (journal.works && this.isSynced) await journal.clear();
 	}
 
 	/** Words in the journal grew from an older version than the server's: the writer decides. */
@@ -220,13 +269,17 @@ function theirVersion(body: unknown): TheirVersion {
 	return { version, savedAt, savedBy: savedBy.name, document };
 }
 
-function issuesOf(body: unknown): string[] {
+function issuesOf(body: unknown): RefusedIssue[] {
 	const { error } = body as {
-		error?: { message?: string; help?: string; details?: { issues?: { message: string }[] } };
+		error?: { message?: string; help?: string; details?: { issues?: RefusedIssue[] } };
 	};
-	const issues = error?.details?.issues?.map(({ message }) => message) ?? [];
+	const issues = error?.details?.issues ?? [];
 	if (issues.length > 0) return issues;
-	return [
-		[error?.message, error?.help].filter(Boolean).join(' ') || 'The server can’t keep this draft.'
-	];
+	const message = [error?.message, error?.help].filter(Boolean).join(' ');
+	return [{ path: '', message: message || 'The server can’t keep this draft.' }];
+}
+
+/** The digest of a body's document as the server reads it: what JSON doesn't carry is gone. */
+function digestIn(body: string): string {
+	return digestOf((JSON.parse(body) as { document: unknown }).document);
 }

@@ -2,6 +2,7 @@ import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest';
 import type { WidgetDocument } from '../widget/document.ts';
 import { Autosave } from './autosave.svelte.ts';
 import type { Journal, JournalEntry } from './journal.ts';
+import { PatientJournal } from './patient-journal.svelte.ts';
 
 const EMPTY: WidgetDocument = {
 	version: 1,
@@ -31,6 +32,11 @@ class MemoryJournal implements Journal {
 		this.aside.push(entry);
 		return Promise.resolve();
 	};
+	listAside = () => Promise.resolve([...this.aside]);
+	dropAside = (at: string) => {
+		this.aside = this.aside.filter((entry) => entry.at !== at);
+		return Promise.resolve();
+	};
 }
 
 /** A server that keeps versions as the real one does, and can be taken away. */
@@ -39,6 +45,8 @@ class Server {
 	document: WidgetDocument = EMPTY;
 	away = false;
 	answer: Response | null = null;
+	/** It keeps what it gets and goes down before it can say so. */
+	dropsAnswers = false;
 	requests: { baseVersion: number; document: WidgetDocument }[] = [];
 
 	fetch = (_address: unknown, init?: RequestInit): Promise<Response> => {
@@ -66,6 +74,7 @@ class Server {
 		}
 		this.version += 1;
 		this.document = body.document;
+		if (this.dropsAnswers) return Promise.reject(new TypeError('fetch failed'));
 		return Promise.resolve(
 			Response.json({ version: this.version, savedAt: new Date().toISOString() })
 		);
@@ -78,6 +87,18 @@ describe('autosave', () => {
 	let title: string;
 	let autosave: Autosave;
 
+	const autosaveWith = (fetch: typeof globalThis.fetch, kept: Journal | PatientJournal) =>
+		new Autosave(
+			{
+				address: '/api/pieces/first-light/draft',
+				journal: kept instanceof PatientJournal ? kept : new PatientJournal(kept),
+				fetch,
+				now: () => new Date(),
+				draft: () => ({ ...EMPTY, title })
+			},
+			{ version: 1, savedAt: '2026-12-08T08:59:00.000Z' }
+		);
+
 	const type = (text: string) => {
 		title += text;
 		autosave.changed();
@@ -89,16 +110,7 @@ describe('autosave', () => {
 		server = new Server();
 		journal = new MemoryJournal();
 		title = '';
-		autosave = new Autosave(
-			{
-				address: '/api/pieces/first-light/draft',
-				journal,
-				fetch: server.fetch,
-				now: () => new Date(),
-				draft: () => ({ ...EMPTY, title })
-			},
-			{ version: 1, savedAt: '2026-12-08T08:59:00.000Z' }
-		);
+		autosave = autosaveWith(server.fetch, journal);
 	});
 
 	afterEach(() => {
@@ -171,16 +183,7 @@ describe('autosave', () => {
 		const fetchOnce = vi
 			.fn(server.fetch)
 			.mockImplementationOnce(() => new Promise((resolve) => (answer = resolve)));
-		autosave = new Autosave(
-			{
-				address: '/x',
-				journal,
-				fetch: fetchOnce,
-				now: () => new Date(),
-				draft: () => ({ ...EMPTY, title })
-			},
-			{ version: 1, savedAt: '' }
-		);
+		autosave = autosaveWith(fetchOnce, journal);
 		type('a');
 		await pass(400);
 		type('b');
@@ -211,18 +214,88 @@ describe('autosave', () => {
 			{
 				error: {
 					message: 'This document doesn’t hang together.',
-					details: { issues: [{ message: 'Cut one tie.' }] }
+					details: { issues: [{ path: 'steps', message: 'Cut one tie.' }] }
 				}
 			},
 			{ status: 422 }
 		);
 		type('x');
 		await pass(400);
-		expect(autosave.state).toEqual({ name: 'refused', issues: ['Cut one tie.'] });
+		expect(autosave.state).toEqual({
+			name: 'refused',
+			issues: [{ path: 'steps', message: 'Cut one tie.' }]
+		});
 		server.answer = null;
 		type('y');
 		await pass(400);
 		expect(autosave.state.name).toBe('kept');
+	});
+
+	test('a save whose answer was lost is no conflict with oneself', async () => {
+		server.dropsAnswers = true;
+		type('First');
+		await pass(400);
+		expect(autosave.state.name).toBe('away');
+		server.dropsAnswers = false;
+		type(' light');
+		server.away = true;
+		await pass(3_000);
+		server.away = false;
+		await pass(15_000);
+		expect(autosave.state.name).toBe('kept');
+		expect(server.document.title).toBe('First light');
+		expect(server.version).toBe(3);
+	});
+
+	test('a server that never answers is given up on and counts as away', async () => {
+		const signals: (AbortSignal | null | undefined)[] = [];
+		const never = vi.fn<typeof fetch>((_address, init) => {
+			signals.push(init?.signal);
+			return Promise.reject(new DOMException('The operation timed out.', 'TimeoutError'));
+		});
+		autosave = autosaveWith(never, journal);
+		type('x');
+		await pass(400);
+		expect(signals[0]).toBeInstanceOf(AbortSignal);
+		expect(autosave.state).toEqual({ name: 'away', tries: 1 });
+	});
+
+	test('keeping everything waits for the save under way', async () => {
+		let answer: (response: Response) => void = () => undefined;
+		const slowOnce = vi
+			.fn(server.fetch)
+			.mockImplementationOnce(() => new Promise((resolve) => (answer = resolve)));
+		autosave = autosaveWith(slowOnce, journal);
+		type('a');
+		await pass(400);
+		type('b');
+		const all = autosave.keepAll();
+		answer(Response.json({ version: 1, savedAt: '2026-12-08T09:00:01.000Z' }));
+		expect(await all).toBe(true);
+		expect(server.document.title).toBe('ab');
+	});
+
+	describe('when this browser keeps no copy', () => {
+		const full = () => Promise.reject(new DOMException('No room.', 'QuotaExceededError'));
+		const silent = () => new Promise<never>(() => undefined);
+		test.each([
+			['it is full', full],
+			['it never answers', silent]
+		])('because %s, the server does all the same', async (_, fails) => {
+			Object.assign(journal, { write: fails, clear: fails, setAside: fails });
+			const patient = new PatientJournal(journal);
+			autosave = autosaveWith(server.fetch, patient);
+			server.answer = Response.json({ error: { code: 'not-signed-in' } }, { status: 401 });
+			type('x');
+			await pass(400);
+			expect(autosave.state.name).toBe('signed-out');
+			await pass(2_000);
+			expect(patient.works).toBe(false);
+			server.answer = null;
+			await autosave.tryNow();
+			expect(autosave.state.name).toBe('kept');
+			expect(server.document.title).toBe('x');
+		});
 	});
 
 	describe('when someone else saved in between', () => {
@@ -253,7 +326,8 @@ describe('autosave', () => {
 		});
 
 		test('load theirs sets mine aside in the journal', async () => {
-			const theirs = await autosave.takeTheirs();
+			const theirs = autosave.takeTheirs();
+			await pass(0);
 			expect(theirs?.document).toMatchObject({ title: 'Theirs' });
 			expect(journal.aside).toMatchObject([{ document: { title: 'Mine' } }]);
 			expect(autosave.version).toBe(4);

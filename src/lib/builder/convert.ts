@@ -1,5 +1,6 @@
 /** Widget document ⇄ manuscript. Loss-free both ways for every claim that still stands in the copy. */
 import type { Fragment, Mark, Node } from 'prosemirror-model';
+import { z } from 'zod';
 import {
 	DOCUMENT_VERSION,
 	isTextBlock,
@@ -21,6 +22,36 @@ export function toManuscript(document: WidgetDocument): Node {
 		schema.node('point', null, words(document.point)),
 		...(blocks.length > 0 ? blocks : [schema.node('paragraph', { id: newId('block') })])
 	]);
+}
+
+const Identified = z.looseObject({ id: z.string() });
+/** What the bench and the editor can't do without; all the rest is the server's to judge. */
+const Shape = z.looseObject({
+	constants: z.string(),
+	title: z.string(),
+	point: z.string(),
+	steps: z.array(
+		Identified.extend({
+			calculator: z.string(),
+			settings: z.record(z.string(), z.looseObject({ from: z.string() }))
+		})
+	),
+	controls: z.array(Identified),
+	blocks: z.array(Identified),
+	claims: z.array(Identified.extend({ form: z.string() }))
+});
+
+/** A stored document that can stand in the editor, whether or not it hangs together; null where it hasn't the shape. */
+export function readableDocument(stored: unknown): WidgetDocument | null {
+	if (!Shape.safeParse(stored).success) return null;
+	const document = stored as WidgetDocument;
+	try {
+		toManuscript(document).check();
+		return document;
+	} catch {
+		// A block that the schema doesn't know: its words are for taking along, not for the sheet.
+		return null;
+	}
 }
 
 function words(text: string): Node[] {

@@ -2,17 +2,27 @@
 import { history } from 'prosemirror-history';
 import type { Node } from 'prosemirror-model';
 import { EditorState, TextSelection } from 'prosemirror-state';
+import { headLimits, type HeadLine } from './head-limits.ts';
 import { manuscriptKeys, type KeyTargets } from './keys.ts';
 import { mend, upkeep } from './upkeep.ts';
 import { weighingPlugin, type MarkTargets } from './weighing.ts';
 
-export function createState(doc: Node, targets: KeyTargets & MarkTargets): EditorState {
+/** Told of a title or a point that would have grown too long. */
+export interface HeadTargets {
+	heldBack: HeadLine | null;
+}
+
+export function createState(
+	doc: Node,
+	targets: KeyTargets & MarkTargets & HeadTargets
+): EditorState {
 	const state = EditorState.create({
 		doc,
 		plugins: [
 			...manuscriptKeys(targets),
 			history({ depth: 1000 }),
 			upkeep(),
+			headLimits((line) => (targets.heldBack = line)),
 			weighingPlugin(targets)
 		]
 	});

@@ -22,6 +22,7 @@ import type { QueryView } from '../workflow/piece.ts';
 import { benchReadings, sameRef, type BenchReading } from './bench-readings.ts';
 import { toDocument, toManuscript } from './convert.ts';
 import { createState } from './editor-state.ts';
+import { bringsWholeDocument, type HeadLine } from './head-limits.ts';
 import { changeChart, insertChart, insertControl } from './insert.ts';
 import { looseEnds, remove, type PrintedWords, type Removed } from './loosen.ts';
 import { BlockView, InlineView } from './node-views.svelte.ts';
@@ -64,6 +65,8 @@ export class Manuscript {
 	/** Goes up whenever the copy has been laid out anew, for what is placed beside it. */
 	laidOut = $state(0);
 
+	/** The line that would have grown too long by the last change, which wasn't made. */
+	heldBack = $state.raw<HeadLine | null>(null);
 	bench = $state<BenchHeight>('closed');
 	/** Key of the number whose list of readings is open. */
 	tying = $state<string | null>(null);
@@ -211,6 +214,7 @@ export class Manuscript {
 		this.#view?.updateState(next);
 		this.state = next;
 		if (next.doc === before) return;
+		this.heldBack = null;
 		this.#changed();
 		clearTimeout(this.#settleTimer);
 		this.#settleTimer = setTimeout(() => this.settle(), REST_MS);
@@ -319,6 +323,7 @@ export class Manuscript {
 	replaceDocument(document: WidgetDocument): void {
 		const next = toManuscript(document);
 		this.change((transaction) => {
+			bringsWholeDocument(transaction);
 			transaction.replaceWith(0, transaction.doc.content.size, next.content);
 			for (const [name, value] of Object.entries(next.attrs))
 				transaction.setDocAttribute(name, value);

@@ -1,9 +1,9 @@
 /** What a peg can be fed from: readings and sliders in units that convert, and never a ring. */
-import { resolveUnit, type Calculator } from '../physics/calculator.ts';
+import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
 import { commensurable, units, type Unit } from '../physics/units/units.ts';
 import type { Control, SettingSource, Step } from '../widget/document.ts';
 import { wiringOf } from '../widget/graph.ts';
-import { fixedSettings } from '../widget/tie-units.ts';
+import { fixedSettings, unitOfRef } from '../widget/tie-units.ts';
 import type { BenchReading } from './bench-readings.ts';
 
 /** The unit a numeric setting has, given the step's choices; null for choices and parameter sets. */
@@ -18,16 +18,19 @@ export function unitsLike(symbol: string): readonly Unit[] {
 	return units.filter((unit) => unit.symbol !== '' && commensurable(unit.symbol, symbol));
 }
 
+/** By the units the wiring has: a reading that is refused at this moment can be tied, or its calculator couldn't be mended. */
 export function readingsForPeg(
 	steps: readonly Step[],
 	step: Step,
 	unit: string,
-	readings: readonly BenchReading[]
+	readings: readonly BenchReading[],
+	calculators: CalculatorSet
 ): BenchReading[] {
-	return readings.filter(({ ref, outcome, tag }) => {
+	return readings.filter(({ ref, tag }) => {
 		if (tag === '' || 'control' in ref || !('output' in ref)) return false;
 		if (wiringOf(steps, ref).steps.some(({ id }) => id === step.id)) return false;
-		return outcome.ok && commensurable(outcome.reading.unit, unit);
+		const own = unitOfRef({ steps: [...steps], controls: [] }, ref, calculators);
+		return own !== null && commensurable(own, unit);
 	});
 }
 

@@ -135,7 +135,7 @@ export function compile(lexicon: Lexicon): Patterns {
 		),
 		slashFraction: sticky('(?<over>\\d{1,2})\\/(?<under>\\d{1,3})(?![\\d\\/.])'),
 		timesPower: sticky(
-			'[\\s\\u00a0\\u202f\\u2009]*[×x·][\\s\\u00a0\\u202f\\u2009]*10(?:\\^(?<caret>[-−]?\\d{1,3})|(?<raised>⁻?[⁰¹²³⁴-⁹]{1,3}))'
+			'[\\s\\u00a0\\u202f\\u2009]*(?:[×x·]|times(?=[\\s\\u00a0]))[\\s\\u00a0\\u202f\\u2009]*10(?:\\^(?<caret>[-−]?\\d{1,3})|(?<raised>⁻?[⁰¹²³⁴-⁹]{1,3}))'
 		),
 		barePower: sticky('10(?:\\^(?<caret>[-−]?\\d{1,3})|(?<raised>⁻?[⁰¹²³⁴-⁹]{1,3}))'),
 		uncertainty: sticky(

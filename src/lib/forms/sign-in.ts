@@ -22,6 +22,3 @@ export type SendSignInLink = z.infer<typeof SendSignInLink>;
 
 export const SignInByLink = z.object({ token: z.string().min(20).max(100) });
 export type SignInByLink = z.infer<typeof SignInByLink>;
-
-export const ConfirmPassphrase = z.object({ passphrase });
-export type ConfirmPassphrase = z.infer<typeof ConfirmPassphrase>;

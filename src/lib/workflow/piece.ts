@@ -75,6 +75,8 @@ export interface ProofView {
 	writers: PersonName[];
 	checkers: PersonName[];
 	claims: ClaimView[];
+	/** Open queries on claims that this proof no longer holds. */
+	looseQueries: QueryView[];
 	passedBy: PersonName | null;
 	passedAt: string | null;
 }
@@ -133,13 +135,15 @@ export function workingState(piece: {
 		passed: boolean;
 		released: boolean;
 		claimStates: readonly ClaimState[];
+		/** How many queries are open on claims that the proof no longer holds. */
+		looseQueries: number;
 	} | null;
 }): WorkingState {
 	const { proof, draftDigest } = piece;
 	if (!proof || proof.digest !== draftDigest) return 'draft';
 	if (proof.released) return 'at-rest';
 	if (proof.passed) return 'passed';
-	if (proof.claimStates.includes('queried')) return 'queried';
+	if (proof.claimStates.includes('queried') || proof.looseQueries > 0) return 'queried';
 	if (proof.claimStates.every((state) => state === 'signed' || state === 'exempt'))
 		return 'checked';
 	return 'in-check';

@@ -54,7 +54,10 @@ export function keysOf(room: Room['key'] | null, rooms: Room[]): KeyGroup[] {
 				{ press: ['Ctrl .'], does: 'next number that isn’t weighed' },
 				{ press: ['Ctrl B'], does: 'the bench' },
 				{ press: ['/'], does: 'in an empty line: put something in' },
-				{ press: ['Ctrl Z'], does: 'undo' }
+				{ press: ['Ctrl I'], does: 'emphasis' },
+				{ press: ['Ctrl Shift B'], does: 'strong' },
+				{ press: ['Ctrl Z'], does: 'undo' },
+				{ press: ['Ctrl Y'], does: 'redo' }
 			]
 		},
 		check: {

@@ -1,6 +1,6 @@
-import { count } from 'drizzle-orm';
+import { count, sql } from 'drizzle-orm';
 import { spawn, spawnSync, type ChildProcess } from 'node:child_process';
-import { cp, mkdtemp, readFile, readdir, rm } from 'node:fs/promises';
+import { cp, mkdtemp, readFile, readdir, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -8,7 +8,7 @@ import { afterEach, beforeEach, expect, test } from 'vitest';
 import { MIGRATIONS } from '../../../../tests/support/database.ts';
 import { openDatabase } from './client.ts';
 import { DataFolderInUse } from './lock.ts';
-import { daybook } from './schema/index.ts';
+import { daybook, pieceWriters, proofs } from './schema/index.ts';
 
 let folder: string;
 let child: ChildProcess | null = null;
@@ -104,6 +104,36 @@ test('the committed migrations make exactly the schema of the code', async () =>
 	expect(run.stdout + run.stderr).toContain('No schema changes');
 	expect(await readdir(copy)).toEqual(before);
 }, 60_000);
+
+test('rows from before versions were kept are read as what they safely are', async () => {
+	const older = join(folder, 'older');
+	await cp(MIGRATIONS, older, { recursive: true });
+	const journalFile = join(older, 'meta/_journal.json');
+	const journal = JSON.parse(await readFile(journalFile, 'utf8'));
+	const entries = journal.entries.slice(0, 2);
+	await writeFile(journalFile, JSON.stringify({ ...journal, entries }));
+	const before = await openDatabase({ dataDir: join(folder, 'data'), migrations: older });
+	for (const statement of [
+		`INSERT INTO people (id, email, name, created_at) VALUES ('t', 't@varrowmere.example', 'T', now())`,
+		`INSERT INTO pieces (id, slug, document, version, created_by, created_at, saved_by, saved_at)
+			VALUES ('p', 'p', '{"title": "new"}', 7, 't', now(), 't', now())`,
+		`INSERT INTO piece_writers (piece_id, person_id, changed_at) VALUES ('p', 't', now())`,
+		`INSERT INTO proofs (id, piece_id, number, document, digest, pulled_by, pulled_at, writers) VALUES
+			('1', 'p', 1, '{"title": "old"}', 'a', 't', now(), '["t"]'),
+			('2', 'p', 2, '{"title": "new"}', 'b', 't', now(), '["t"]')`
+	])
+		await before.db.execute(sql.raw(statement));
+	await before.close();
+
+	const after = await openDatabase({ dataDir: join(folder, 'data'), migrations: MIGRATIONS });
+	expect(await after.db.select({ version: pieceWriters.version }).from(pieceWriters)).toEqual([
+		{ version: 7 }
+	]);
+	expect(
+		await after.db.select({ version: proofs.version }).from(proofs).orderBy(proofs.number)
+	).toEqual([{ version: 0 }, { version: 7 }]);
+	await after.close();
+}, 120_000);
 
 test('each migration is in the journal, in order', async () => {
 	const journal: { entries: { idx: number; tag: string; when: number }[] } = JSON.parse(

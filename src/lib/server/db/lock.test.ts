@@ -1,11 +1,26 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { once } from 'node:events';
-import { mkdtemp, readFile, rm, writeFile } from 'node:fs/promises';
+import { mkdtemp, readdir, readFile, rm, writeFile } from 'node:fs/promises';
+import type * as Fs from 'node:fs/promises';
 import { hostname, tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
-import { afterEach, beforeEach, expect, test } from 'vitest';
+import { afterEach, beforeEach, expect, test, vi } from 'vitest';
 import { DataFolderInUse, lockDataFolder } from './lock.ts';
+
+/** What another process does in the moment between our look at the file and our taking it away. */
+const meanwhile = vi.hoisted(() => ({ act: null as (() => Promise<void>) | null }));
+vi.mock('node:fs/promises', async (original) => {
+	const fs = await original<typeof Fs>();
+	return {
+		...fs,
+		async rename(...names: Parameters<typeof Fs.rename>) {
+			await meanwhile.act?.();
+			meanwhile.act = null;
+			await fs.rename(...names);
+		}
+	};
+});
 
 let folder: string;
 const children: ChildProcess[] = [];
@@ -112,6 +127,14 @@ test('a number given to a new process since isn’t the old holder', async () =>
 	await leftBehind({ startedTicks: '1' });
 	const lock = await lockDataFolder(folder);
 	await lock.release();
+});
+
+test('of two that find a dead holder’s file, the slower one leaves the quicker one’s in place', async () => {
+	await leftBehind({ startedTicks: '1' });
+	meanwhile.act = () => leftBehind({ command: 'node the-quicker-one' });
+	await expect(lockDataFolder(folder)).rejects.toThrow(/node the-quicker-one/);
+	expect(await readFile(join(folder, '.in-use'), 'utf8')).toContain('the-quicker-one');
+	expect(await readdir(folder)).toEqual(['.in-use']);
 });
 
 test('a file from before the last boot, or cut short by a crash, holds nobody', async () => {

@@ -6,13 +6,14 @@
  * it back at once however that process ends. Abstract sockets don't reach across containers and don't exist on other
  * systems, so a file with pid, start time and host stands beside it.
  */
-import { createHash } from 'node:crypto';
-import { mkdir, readFile, realpath, rm, writeFile } from 'node:fs/promises';
+import { randomUUID } from 'node:crypto';
+import { link, mkdir, readFile, realpath, rename, rm, writeFile } from 'node:fs/promises';
 import { createServer, type Server } from 'node:net';
 import { hostname } from 'node:os';
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { z } from 'zod';
+import { sha256 } from '../auth/hashes.ts';
 
 const Holder = z.object({
 	pid: z.number().int().positive(),
@@ -71,7 +72,7 @@ export async function lockDataFolder(path: string): Promise<FolderLock> {
 }
 
 function takeSocket(folder: string): Promise<Server | 'taken'> {
-	const name = `\0steelyard-${createHash('sha256').update(folder).digest('hex')}`;
+	const name = `\0steelyard-${sha256(folder)}`;
 	return new Promise((resolve, reject) => {
 		const server = createServer((connection) => connection.destroy());
 		server.once('error', (error: NodeJS.ErrnoException) =>
@@ -89,9 +90,12 @@ function closeSocket(socket: Server | null): Promise<void> {
 }
 
 async function takeFile(folder: string, file: string): Promise<void> {
-	const earlier = await readHolder(file);
-	if (earlier && (await isAlive(earlier))) throw new DataFolderInUse(folder, earlier);
-	await rm(file, { force: true });
+	const earlier = await readText(file);
+	if (earlier !== null) {
+		const holder = holderIn(earlier);
+		if (holder && (await isAlive(holder))) throw new DataFolderInUse(folder, holder);
+		await setAside(folder, file, earlier);
+	}
 	const holder: Holder = {
 		pid: process.pid,
 		startedTicks: (await startedTicks(process.pid)) ?? '',
@@ -107,6 +111,30 @@ async function takeFile(folder: string, file: string): Promise<void> {
 		if (!isCode(error, 'EEXIST')) throw error;
 		throw new DataFolderInUse(folder, await readHolder(file));
 	}
+}
+
+/**
+ * Takes a dead holder's file away by renaming it, which one process alone can do, and looks at what came away: someone
+ * quicker may have taken the folder since it was read, and then theirs is put back.
+ */
+async function setAside(folder: string, file: string, read: string): Promise<void> {
+	const aside = `${file}.${randomUUID()}`;
+	try {
+		await rename(file, aside);
+	} catch (error) {
+		if (isCode(error, 'ENOENT')) return; // someone else set it aside; `wx` decides
+		throw error;
+	}
+	const taken = await readText(aside);
+	if (taken !== read) {
+		// `link` takes no one's place, and a third one's file says just as well that the folder is in use.
+		await link(aside, file).catch((error: unknown) => {
+			if (!isCode(error, 'EEXIST')) throw error;
+		});
+		await rm(aside, { force: true });
+		throw new DataFolderInUse(folder, holderIn(taken ?? ''));
+	}
+	await rm(aside, { force: true });
 }
 
 /** A holder on another host can't be looked at, so it counts as living. */
@@ -145,12 +173,26 @@ async function bootId(): Promise<string> {
 }
 
 async function readHolder(file: string): Promise<Holder | null> {
+	const text = await readText(file);
+	return text === null ? null : holderIn(text);
+}
+
+/** Null when there is no file. */
+async function readText(file: string): Promise<string | null> {
 	try {
-		return Holder.parse(JSON.parse(await readFile(file, 'utf8')));
+		return await readFile(file, 'utf8');
 	} catch (error) {
-		// No file, or one cut short by a crash: nobody to ask.
-		if (isCode(error, 'ENOENT') || error instanceof SyntaxError || error instanceof z.ZodError)
-			return null;
+		if (isCode(error, 'ENOENT')) return null;
+		throw error;
+	}
+}
+
+/** Null for a file cut short by a crash: nobody to ask. */
+function holderIn(text: string): Holder | null {
+	try {
+		return Holder.parse(JSON.parse(text));
+	} catch (error) {
+		if (error instanceof SyntaxError || error instanceof z.ZodError) return null;
 		throw error;
 	}
 }

@@ -5,6 +5,7 @@
  */
 import { eq } from 'drizzle-orm';
 import type { WidgetDocument } from '../../widget/document.ts';
+import { canonicalJson } from '../../widget/freeze.ts';
 import { hashPassphrase } from '../auth/passphrase.ts';
 import type { Context, Fixtures } from '../context.ts';
 import { firstLight } from '../demo/first-light.ts';
@@ -12,8 +13,8 @@ import { DEMO_PASSPHRASE, DEMO_PEOPLE } from '../demo/people.ts';
 import { sameDrop } from '../demo/same-drop.ts';
 import { signClaim } from '../services/claims.ts';
 import { addPerson, readActor } from '../services/people.ts';
-import { createPiece, getPiece, listPieces, saveDraft } from '../services/pieces.ts';
-import { passProof, pullProof } from '../services/proofs.ts';
+import { createPiece, emptyDocument, getPiece, listPieces, saveDraft } from '../services/pieces.ts';
+import { passConditions, passProof, pullProof } from '../services/proofs.ts';
 import { releaseProof } from '../services/releases.ts';
 import { people } from './schema/index.ts';
 
@@ -80,16 +81,24 @@ async function seedPiece(
 	const writer = await as(fixtures, ids[piece.writer]);
 	const made = (await listPieces(writer)).some((summary) => summary.slug === slug);
 	if (!made) await createPiece(writer, { title: document.title, slug });
-	const { version, releases } = await getPiece(writer, slug);
+	const { version, releases, document: draft } = await getPiece(writer, slug);
 	if (releases.length > 0) return;
+	// Someone has made the piece their own, or writes another one under this slug: it stays as they left it.
+	const untouched = [emptyDocument(document.title), document].some(
+		(left) => canonicalJson(left) === canonicalJson(draft)
+	);
+	if (!untouched) return;
 
 	await saveDraft(writer, slug, { baseVersion: version, document });
 	const { proofId } = await pullProof(writer, slug);
 	const scientist = await as(fixtures, ids[piece.scientist]);
 	for (const { id, state } of (await getPiece(scientist, slug)).proof?.claims ?? []) {
-		if (state === 'unsigned') await signClaim(scientist, slug, { proofId, claim: id });
+		if (state === 'unsigned' || state === 'lapsed')
+			await signClaim(scientist, slug, { proofId, claim: id });
 	}
 	const editor = await as(fixtures, ids[piece.editor]);
+	// A query that someone has asked meanwhile is theirs to settle.
+	if ((await passConditions(editor, slug)).some(({ met }) => !met)) return;
 	await passProof(editor, slug, { proofId });
 	await releaseProof(editor, slug, { proofId });
 }

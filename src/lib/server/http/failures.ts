@@ -7,12 +7,23 @@ export interface Failure {
 	code: ErrorCode;
 	message: string;
 	help: string;
-	details: Record<string, unknown>;
 }
 
-export function failureOf({ code, details }: SteelyardError): Failure {
+export function failureOf({ code }: SteelyardError): Failure {
 	const { message, help } = explanations[code];
-	return { code, message, help, details };
+	return { code, message, help };
+}
+
+/** Details are for the services. What of them a client needs is listed here, and nothing else leaves the house. */
+const TOLD: Partial<Record<ErrorCode, readonly string[]>> = {
+	'version-conflict': ['version', 'savedAt', 'savedBy', 'document'],
+	'document-broken': ['issues'],
+	'input-broken': ['issues']
+};
+
+function toldOf({ code, details }: SteelyardError): Record<string, unknown> {
+	const told = TOLD[code] ?? [];
+	return Object.fromEntries(Object.entries(details).filter(([name]) => told.includes(name)));
 }
 
 /** For loads: `await getPiece(…).catch(pageFailure)`. */
@@ -38,7 +49,7 @@ export function apiFailure(thrown: unknown): Response {
 	const { retryAfterSeconds } = thrown.details;
 	if (typeof retryAfterSeconds === 'number') headers.set('Retry-After', String(retryAfterSeconds));
 	return Response.json(
-		{ error: failureOf(thrown) },
+		{ error: { ...failureOf(thrown), details: toldOf(thrown) } },
 		{ status: explanations[thrown.code].status, headers }
 	);
 }

@@ -2,31 +2,10 @@
  * Security headers of everything SvelteKit answers. Pages get their policy, with its nonce, from svelte.config.js; what
  * is not a page may load nothing at all. Frames for partner pages never come through here: embed/serve.ts.
  */
+import { PERMISSIONS_POLICY } from './permissions-policy.ts';
+
 const NOT_A_PAGE =
 	"default-src 'none'; frame-ancestors 'none'; base-uri 'none'; form-action 'none'";
-
-const OFF = [
-	'accelerometer',
-	'attribution-reporting',
-	'bluetooth',
-	'browsing-topics',
-	'camera',
-	'display-capture',
-	'geolocation',
-	'gyroscope',
-	'hid',
-	'idle-detection',
-	'magnetometer',
-	'microphone',
-	'midi',
-	'payment',
-	'screen-wake-lock',
-	'serial',
-	'usb'
-];
-const PERMISSIONS_POLICY = [...OFF.map((feature) => `${feature}=()`), 'fullscreen=(self)'].join(
-	', '
-);
 
 export interface Answer {
 	secure: boolean;

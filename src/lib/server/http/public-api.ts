@@ -27,10 +27,15 @@ export function preflight(methods: string): Response {
 export function publicRefusal(thrown: unknown): Response {
 	if (!(thrown instanceof SteelyardError)) throw thrown;
 	const { status, message, help } = explanations[thrown.code];
+	const { retryAfterSeconds } = thrown.details;
 	const issues = Array.isArray(thrown.details.issues) ? thrown.details.issues : [];
 	const told = issues.map((issue: { message: string }) => issue.message).join(' ');
 	return publicJson(
 		{ refused: { code: thrown.code, message: told || `${message} ${help}` } },
-		{ status }
+		{
+			status,
+			headers:
+				typeof retryAfterSeconds === 'number' ? { 'retry-after': String(retryAfterSeconds) } : {}
+		}
 	);
 }

@@ -131,6 +131,23 @@ test('the link in the mail holds the token, which is nowhere in the row', async 
 	expect(JSON.stringify(await rows())).not.toContain(token);
 });
 
+test('a letter that is of no use any more isn’t sent', async () => {
+	const goodUntil = new Date(now.getTime() + 600_000);
+	const before = tray.letters().length;
+	await queueMail(
+		database.db,
+		now,
+		TAMSIN,
+		{ event: 'sign-in-link', input: { linkId: 'a-link' } },
+		goodUntil
+	);
+	await drain({ transport: refusing });
+	later(600);
+	await drain();
+	expect(tray.letters()).toHaveLength(before);
+	expect((await rows())[0]).toMatchObject({ sentAt: null, parkedAt: now });
+});
+
 describe('when the mail server refuses', () => {
 	test('the row waits, longer each time, and goes out when the server is back', async () => {
 		await queue();
@@ -175,6 +192,33 @@ test('a row whose sender was killed is sent when its lease runs out, and not bef
 	later(60);
 	await drain();
 	expect((await rows())[0]!.sentAt).toEqual(now);
+});
+
+test('told to stop, it finishes the letter in hand and leaves the others for the next start', async () => {
+	for (const first of ['kofi', 'ama', 'mateus'])
+		await queue(QUERY, { name: first, email: `${first}@varrowmere.example` });
+	let stopping: Promise<void> | undefined;
+	const sender = startSender(
+		parts({
+			transport: {
+				async send(...letter) {
+					stopping = sender.stop();
+					await transport.send(...letter);
+				},
+				close: () => undefined
+			}
+		})
+	);
+	sender.wake();
+	await expect.poll(() => stopping !== undefined).toBe(true);
+	await stopping;
+	const left = (await rows()).filter(({ sentAt }) => sentAt === null);
+	expect(left).toMatchObject([
+		{ attempts: 0, leaseUntil: null },
+		{ attempts: 0, leaseUntil: null }
+	]);
+	await drain();
+	expect((await rows()).every(({ sentAt }) => sentAt !== null)).toBe(true);
 });
 
 test('a running sender wakes for new mail and stops when told', async () => {

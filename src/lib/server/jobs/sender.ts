@@ -37,7 +37,7 @@ export function startSender(parts: SenderParts): Sender {
 
 	const drain = () => {
 		if (stopped) return;
-		draining ??= drainOutbox(parts)
+		draining ??= drainOutbox(parts, () => stopped)
 			.catch((error: unknown) => parts.report(`The outbox could not be read: ${reason(error)}`))
 			.finally(() => (draining = null));
 	};
@@ -54,12 +54,18 @@ export function startSender(parts: SenderParts): Sender {
 	};
 }
 
-/** Sends all that is due. */
-export async function drainOutbox(parts: SenderParts): Promise<void> {
-	for (;;) {
+/** Sends all that is due, or what it has in hand once `stopped`: the rest is left for the next start, untried. */
+export async function drainOutbox(
+	parts: SenderParts,
+	stopped: () => boolean = () => false
+): Promise<void> {
+	while (!stopped()) {
 		const rows = await lease(parts.db, parts.clock());
 		if (rows.length === 0) return;
-		for (const row of rows) await deliver(parts, row);
+		for (const [index, row] of rows.entries()) {
+			if (stopped()) return giveBack(parts.db, rows.slice(index));
+			await deliver(parts, row);
+		}
 	}
 }
 
@@ -88,11 +94,31 @@ async function lease(db: Db, now: Date): Promise<OutboxRow[]> {
 		.returning();
 }
 
+/** Ends the lease on rows that nobody tried to send. */
+async function giveBack(db: Db, rows: readonly OutboxRow[]): Promise<void> {
+	await db
+		.update(outbox)
+		.set({ leaseUntil: null, attempts: sql`${outbox.attempts} - 1` })
+		.where(
+			inArray(
+				outbox.id,
+				rows.map(({ id }) => id)
+			)
+		);
+}
+
 async function deliver(
 	{ db, house, transport, clock, report }: SenderParts,
 	row: OutboxRow
 ): Promise<void> {
 	const mine = eq(outbox.id, row.id);
+	if (row.goodUntil && row.goodUntil <= clock()) {
+		await db
+			.update(outbox)
+			.set({ leaseUntil: null, parkedAt: clock(), lastError: 'Too late to be of use.' })
+			.where(mine);
+		return;
+	}
 	try {
 		const letter = renderMail(house, row);
 		await transport.send(

@@ -13,13 +13,21 @@ export interface Addressee {
 	email: string;
 }
 
-export async function queueMail(tx: Db, now: Date, to: Addressee, mail: Mail): Promise<void> {
+/** `goodUntil`: when the letter is of no use any more, and isn't sent. */
+export async function queueMail(
+	tx: Db,
+	now: Date,
+	to: Addressee,
+	mail: Mail,
+	goodUntil: Date | null = null
+): Promise<void> {
 	await tx.insert(outbox).values({
 		event: mail.event,
 		toName: to.name,
 		toAddress: to.email,
 		input: mail.input,
 		createdAt: now,
-		dueAt: now
+		dueAt: now,
+		goodUntil
 	});
 }

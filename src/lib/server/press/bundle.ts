@@ -1,4 +1,5 @@
 /** What a release is made of: files under content-addressed keys, and the list that says which is which. */
+import { z } from 'zod';
 
 export interface BundleFile {
 	/** `frames/<sha256>.html`, `releases/<sha256>.json`, or `press/<name>` where the name carries a hash. */
@@ -9,21 +10,24 @@ export interface BundleFile {
 	sha256: string;
 }
 
+const Sha256 = z.string().regex(/^[0-9a-f]{64}$/);
+
 /** Plain JSON: kept with the release's row and beside the bytes on the shelf. */
-export interface BundleManifest {
-	version: 1;
-	slug: string;
-	release: number;
+export const BundleManifest = z.strictObject({
+	version: z.literal(1),
+	slug: z.string(),
+	release: z.number().int().positive(),
 	/** ISO 8601, UTC. */
-	releasedAt: string;
+	releasedAt: z.iso.datetime(),
 	/** SHA-256 of the frame's document, in hex. */
-	digest: string;
+	digest: Sha256,
 	/** The frame's document. */
-	page: string;
+	page: z.string(),
 	/** Hashes of the styles that stand in the document, as content policies write them. */
-	styles: string[];
-	files: { key: string; contentType: string; sha256: string }[];
-}
+	styles: z.array(z.string()),
+	files: z.array(z.strictObject({ key: z.string(), contentType: z.string(), sha256: Sha256 }))
+});
+export type BundleManifest = z.infer<typeof BundleManifest>;
 
 export interface Bundle {
 	digest: string;

@@ -1,5 +1,4 @@
 /** Prints a release: the frame drawn with the reader's own components, and every file it will ever ask for. */
-import { createHash } from 'node:crypto';
 import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { render } from 'svelte/server';
@@ -11,18 +10,13 @@ import type { FrameRelease } from '../../renderer/release.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
 import { sampleChart, type ChartPoint } from '../../widget/evaluate.ts';
 import { canonicalJson, type Frozen } from '../../widget/freeze.ts';
+import { policyHash, sha256 } from '../auth/hashes.ts';
+import type { Makers } from './account.ts';
 import type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
 import { readManifest, type PressManifest } from './manifest.ts';
 import { framePage } from './page.ts';
 
 export type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
-
-/** People by name, as the public page shows them. */
-export interface Makers {
-	writers: string[];
-	checkers: string[];
-	editor: string;
-}
 
 export interface BundleInput {
 	frozen: Frozen;
@@ -119,7 +113,7 @@ function manifestOf(
 		releasedAt: release.releasedAt,
 		digest: page.sha256,
 		page: page.key,
-		styles: [`sha256-${createHash('sha256').update(css).digest('base64')}`],
+		styles: [policyHash(css)],
 		files: files.map(({ key, contentType, sha256 }) => ({ key, contentType, sha256 }))
 	};
 }
@@ -151,7 +145,7 @@ async function pressFile(pressFolder: string, name: string): Promise<BundleFile>
 	const contentType = TYPES[name.split('.').at(-1) ?? ''];
 	if (!contentType) throw new Error(`The frame’s build has a file of an unknown kind: ${name}`);
 	const bytes = await readFile(join(pressFolder, name));
-	return { key: `press/${name}`, contentType, bytes, sha256: sha256Hex(bytes) };
+	return { key: `press/${name}`, contentType, bytes, sha256: sha256(bytes) };
 }
 
 function contentFile(
@@ -161,10 +155,6 @@ function contentFile(
 	text: string
 ): BundleFile {
 	const bytes = Buffer.from(text, 'utf8');
-	const sha256 = sha256Hex(bytes);
-	return { key: `${folder}/${sha256}.${ending}`, contentType, bytes, sha256 };
-}
-
-function sha256Hex(bytes: Uint8Array): string {
-	return createHash('sha256').update(bytes).digest('hex');
+	const hash = sha256(bytes);
+	return { key: `${folder}/${hash}.${ending}`, contentType, bytes, sha256: hash };
 }

@@ -3,8 +3,9 @@ import { openTestDatabase, type TestDatabase } from '../../../../tests/support/d
 import { contentOf, Desk, reword, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
 import { firstLight } from '../demo/first-light.ts';
-import { daybook, outbox } from '../db/schema/index.ts';
+import { daybook, outbox, signatures } from '../db/schema/index.ts';
 import { signClaim, takeBackSignature } from './claims.ts';
+import { examine } from './examination.ts';
 import { passConditions, passProof, pullProof } from './proofs.ts';
 import { answerQuery, closeQuery, raiseQuery } from './queries.ts';
 
@@ -200,7 +201,7 @@ describe('signing', () => {
 		office.wait(16);
 		const later = { ...ctx, now: office.now };
 		await expect(signClaim(later, SLUG, { proofId, claim: 'stretch' })).rejects.toEqual(
-			code('confirm-needed')
+			code('confirm-by-link')
 		);
 	});
 
@@ -365,6 +366,66 @@ describe('passing', () => {
 		});
 	});
 
+	test.each([
+		['about 42 times', 'These tip: 1b.'],
+		['some 26 times', 'These tip: 1b.'],
+		['ever so much', 'These aren’t weighed: 1b.']
+	])(
+		'a claim that tips or isn’t weighed stands in the way, even signed: %s',
+		async (words, says) => {
+			const changed = structuredClone(firstLight);
+			for (const inline of contentOf(changed, 'opening')) {
+				if (inline.kind === 'claim' && inline.claim === 'stretch') inline.text = words;
+			}
+			const proofId = await desk.toProof(changed);
+			const { id: pieceId } = await desk.piece();
+			const { claims } = examine(changed);
+			await office.db.insert(signatures).values(
+				claims.map(({ claim, cover, coverHash, sentence }) => ({
+					pieceId,
+					proofId,
+					claim: claim.id,
+					cover,
+					coverHash,
+					sentence,
+					personId: desk.scientist,
+					signedAt: office.now
+				}))
+			);
+			expect(await open()).toMatchObject([{ side: 'claims', says }]);
+			await expect(desk.pass(proofId)).rejects.toEqual(code('conditions-open'));
+		}
+	);
+
+	test('an open query stands in the way, also when its words are tied anew', async () => {
+		const asked = await desk.toProof();
+		const { queryId } = await raiseQuery(await office.as(desk.scientist), SLUG, {
+			proofId: asked,
+			claim: 'stretch',
+			question: 'Since when?'
+		});
+		await desk.edit((document) => {
+			const again = (id: string) => (id === 'stretch' ? 'stretch-again' : id);
+			for (const claim of document.claims) claim.id = again(claim.id);
+			for (const inline of contentOf(document, 'opening'))
+				if (inline.kind === 'claim') inline.claim = again(inline.claim);
+		});
+		const proofId = await desk.pull();
+		await desk.signAll();
+		expect(await open()).toMatchObject([
+			{ side: 'claims', says: 'A query is open on a claim that is no longer in the copy.' }
+		]);
+		await expect(desk.pass(proofId)).rejects.toEqual(code('conditions-open'));
+		expect(await desk.piece()).toMatchObject({
+			working: 'queried',
+			missing: '1 query',
+			proof: { looseQueries: [{ id: queryId, question: 'Since when?' }] }
+		});
+		await closeQuery(await office.as(desk.scientist), SLUG, { queryId });
+		expect((await desk.piece()).proof!.looseQueries).toEqual([]);
+		await desk.pass(proofId);
+	});
+
 	test('an open query stands in the way', async () => {
 		const proofId = await desk.toChecked();
 		await raiseQuery(await office.as(desk.writer), SLUG, {
@@ -381,7 +442,7 @@ describe('passing', () => {
 		const ctx = await office.as(desk.editor);
 		office.wait(16);
 		await expect(passProof({ ...ctx, now: office.now }, SLUG, { proofId })).rejects.toEqual(
-			code('confirm-needed')
+			code('confirm-by-link')
 		);
 	});
 

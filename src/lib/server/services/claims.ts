@@ -21,7 +21,7 @@ export async function signClaim(
 	return ctx.db.transaction(async (tx) => {
 		const { proof, standing } = await lockNewestProof(tx, slug, input.proofId);
 		requirePermission(actor, 'sign-claim', { proof: standing.people });
-		requireFresh(ctx);
+		await requireFresh(ctx, tx);
 
 		const standingClaim = standing.claims.find(({ examined }) => examined.claim.id === input.claim);
 		if (!standingClaim) throw new SteelyardError('not-found');

@@ -1,13 +1,15 @@
 /** All rows about a piece, read together; the views are worked out from them. */
 import { desc, eq, inArray } from 'drizzle-orm';
+import { SteelyardError } from '../../errors.ts';
 import type { Db } from '../db/client.ts';
 import { pieces, pieceWriters, proofs, queries, releases, signatures } from '../db/schema/index.ts';
+import { readStored } from './stored-document.ts';
 
 export type PieceRow = typeof pieces.$inferSelect;
 export type ProofRow = typeof proofs.$inferSelect;
 export type SignatureRow = typeof signatures.$inferSelect & { proofNumber: number };
 export type QueryRow = typeof queries.$inferSelect & { proofNumber: number };
-export type ReleaseRow = Omit<typeof releases.$inferSelect, 'document' | 'manifest'> & {
+export type ReleaseRow = Omit<typeof releases.$inferSelect, 'document' | 'manifest' | 'account'> & {
 	proofNumber: number;
 };
 
@@ -23,7 +25,10 @@ export interface Dossier {
 	releases: ReleaseRow[];
 }
 
-/** The dossier of one piece, null when there is none; reads by `slug` or by a row already locked. */
+/**
+ * The dossier of one piece, null when there is none; reads by `slug` or by a row already locked. Throws
+ * `document-broken` when a stored document can't be read any more.
+ */
 export async function readDossier(
 	db: Db,
 	which: { slug: string } | { piece: PieceRow }
@@ -32,12 +37,35 @@ export async function readDossier(
 		'piece' in which
 			? [which.piece]
 			: await db.select().from(pieces).where(eq(pieces.slug, which.slug));
-	return (await gather(db, rows))[0] ?? null;
+	const [gathered] = await gather(db, rows);
+	return gathered ? readable(gathered) : null;
 }
 
-/** Every piece, the one saved last first. */
-export async function readDossiers(db: Db): Promise<Dossier[]> {
-	return gather(db, await db.select().from(pieces).orderBy(desc(pieces.savedAt), desc(pieces.id)));
+/** Every piece, the one saved last first; apart from them those whose documents can't be read any more. */
+export async function readDossiers(
+	db: Db
+): Promise<{ dossiers: Dossier[]; unreadable: PieceRow[] }> {
+	const rows = await db.select().from(pieces).orderBy(desc(pieces.savedAt), desc(pieces.id));
+	const dossiers: Dossier[] = [];
+	const unreadable: PieceRow[] = [];
+	for (const gathered of await gather(db, rows)) {
+		try {
+			dossiers.push(readable(gathered));
+		} catch (error) {
+			if (!(error instanceof SteelyardError)) throw error;
+			unreadable.push(gathered.piece);
+		}
+	}
+	return { dossiers, unreadable };
+}
+
+/** The documents in today's shape. Digests stay those of what is stored. Throws `document-broken`. */
+function readable({ piece, proof, ...rest }: Dossier): Dossier {
+	return {
+		...rest,
+		piece: { ...piece, document: readStored(piece.document) },
+		proof: proof && { ...proof, document: readStored(proof.document) }
+	};
 }
 
 async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {

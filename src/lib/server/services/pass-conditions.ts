@@ -32,27 +32,37 @@ const RULES: Rule[] = [
 		};
 	},
 	({ standing, slug }) => {
-		const tipping = standing.claims.filter(
-			({ examined: { claim, verdict } }) => claim.form !== 'exempt' && verdict.severity === 'block'
+		const weighed = standing.claims.filter(({ examined: { claim } }) => claim.form !== 'exempt');
+		const unweighed = weighed.filter(({ examined }) => examined.verdict.verdict === 'unweighed');
+		const tipping = weighed.filter(
+			({ examined: { verdict } }) =>
+				verdict.verdict === 'tips' ||
+				(verdict.severity === 'block' && verdict.verdict !== 'unweighed')
 		);
+		const met = tipping.length + unweighed.length === 0;
+		const told = [
+			tipping.length > 0 ? `These tip: ${labels(tipping)}.` : '',
+			unweighed.length > 0 ? `These aren’t weighed: ${labels(unweighed)}.` : ''
+		];
 		return {
 			side: 'claims',
-			met: tipping.length === 0,
-			says: tipping.length === 0 ? 'No claim tips.' : `These tip: ${labels(tipping)}.`,
-			mend:
-				tipping.length === 0
-					? ''
-					: 'The writer changes the words or the reading, and pulls a new proof.',
+			met,
+			says: met ? 'No claim tips, and none is unweighed.' : told.filter(Boolean).join(' '),
+			mend: met ? '' : 'The writer changes the words or the reading, and pulls a new proof.',
 			href: routes.manuscript(slug)
 		};
 	},
 	({ standing, slug }) => {
 		const queried = standing.claims.filter(({ queries }) => queries.some(isOpen));
+		const on = [
+			queried.length > 0 ? labels(queried) : '',
+			standing.looseQueries.length > 0 ? 'a claim that is no longer in the copy' : ''
+		].filter(Boolean);
 		return {
 			side: 'claims',
-			met: queried.length === 0,
-			says: queried.length === 0 ? 'No query is open.' : `A query is open on ${labels(queried)}.`,
-			mend: queried.length === 0 ? '' : 'The writer answers it; who asked closes it.',
+			met: on.length === 0,
+			says: on.length === 0 ? 'No query is open.' : `A query is open on ${on.join(' and on ')}.`,
+			mend: on.length === 0 ? '' : 'The writer answers it; who asked closes it.',
 			href: routes.check(slug)
 		};
 	},
@@ -65,7 +75,7 @@ const RULES: Rule[] = [
 			side: 'people',
 			met,
 			says: met
-				? `Written by ${named(writers)}; checked by ${named(checkers)}.`
+				? `${writers.length > 0 ? `Written by ${named(writers)}` : 'No words changed since the last release'}; checked by ${named(checkers)}.`
 				: 'Nobody besides the writers has checked this proof.',
 			mend: met ? '' : 'A scientist who didn’t write this signs the claims.'
 		};
@@ -99,7 +109,7 @@ const RULES: Rule[] = [
 			met,
 			says: met
 				? 'The calculators are the ones it was checked with.'
-				: 'A calculator has changed since this proof was pulled.',
+				: 'A calculator, or the form in which pieces are kept, has changed since this proof was pulled.',
 			mend: met ? '' : 'The writer pulls a new proof; what has moved is checked again.',
 			href: routes.manuscript(slug)
 		};

@@ -6,6 +6,7 @@ import type { Context } from '../context.ts';
 import type { Db } from '../db/client.ts';
 import { people, personRoles } from '../db/schema/index.ts';
 import { record } from './daybook.ts';
+import { revokeSessions } from './session-end.ts';
 
 /** One spelling for one mailbox. */
 export function normalEmail(email: string): string {
@@ -60,13 +61,14 @@ async function setRolesIn(tx: Db, personId: string, roles: readonly Role[]): Pro
 		await tx.insert(personRoles).values(roles.map((role) => ({ personId, role })));
 }
 
-/** Closes a person's account; acts at their next request. Their signatures stay. */
+/** Closes a person's account and ends their sessions, for good. Their signatures stay. */
 export async function disablePerson(
 	ctx: Pick<Context, 'db' | 'actor' | 'now'>,
 	personId: string
 ): Promise<void> {
 	await ctx.db.transaction(async (tx) => {
 		await tx.update(people).set({ disabledAt: ctx.now }).where(eq(people.id, personId));
+		await revokeSessions(tx, ctx.now, personId);
 		await record(tx, ctx, 'person-disabled', { disabledId: personId });
 	});
 }

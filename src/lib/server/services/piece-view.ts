@@ -12,9 +12,15 @@ import {
 	type SignatureView,
 	type WorkingState
 } from '../../workflow/piece.ts';
-import type { Dossier, ProofRow, QueryRow, ReleaseRow } from './dossier.ts';
+import type { Dossier, PieceRow, ProofRow, QueryRow, ReleaseRow } from './dossier.ts';
 import { examine } from './examination.ts';
-import { isOpen, isReleased, standingOf, type Standing, type StandingClaim } from './standing.ts';
+import {
+	isReleased,
+	openQueries,
+	standingOf,
+	type Standing,
+	type StandingClaim
+} from './standing.ts';
 
 type Names = (personId: string) => PersonName;
 
@@ -38,6 +44,23 @@ export function summarise(dossier: Dossier, names: Names): PieceSummary {
 	};
 }
 
+/** A line for a piece whose document can't be read: it is there, and someone must see to it. */
+export function summariseUnreadable(piece: PieceRow, names: Names): PieceSummary {
+	return {
+		id: piece.id,
+		slug: piece.slug,
+		title: piece.slug,
+		point: '',
+		version: piece.version,
+		proofNumber: null,
+		working: 'draft',
+		liveRelease: null,
+		heldBy: names(piece.savedBy),
+		since: piece.savedAt.toISOString(),
+		missing: 'a document that can be read'
+	};
+}
+
 export function viewPiece(dossier: Dossier, names: Names): PieceView {
 	const { piece, proof, writers, releases } = dossier;
 	return {
@@ -51,7 +74,11 @@ export function viewPiece(dossier: Dossier, names: Names): PieceView {
 	};
 }
 
-function viewProof(proof: ProofRow, { claims, people }: Standing, names: Names): ProofView {
+function viewProof(
+	proof: ProofRow,
+	{ claims, looseQueries, people }: Standing,
+	names: Names
+): ProofView {
 	return {
 		id: proof.id,
 		number: proof.number,
@@ -62,6 +89,7 @@ function viewProof(proof: ProofRow, { claims, people }: Standing, names: Names):
 		writers: people.writers.map(names),
 		checkers: people.checkers.map(names),
 		claims: claims.map((claim) => viewClaim(claim, names)),
+		looseQueries: looseQueries.map((row) => viewQuery(row, names)),
 		passedBy: proof.passedBy === null ? null : names(proof.passedBy),
 		passedAt: proof.passedAt?.toISOString() ?? null
 	};
@@ -132,7 +160,8 @@ function stateOf(dossier: Dossier, standing: Standing | null): WorkingState {
 			digest: proof.digest,
 			passed: proof.passedAt !== null,
 			released: isReleased(dossier, proof),
-			claimStates: standing.claims.map(({ state }) => state)
+			claimStates: standing.claims.map(({ state }) => state),
+			looseQueries: standing.looseQueries.length
 		}
 	});
 }
@@ -148,7 +177,7 @@ function holder(
 	if (working === 'at-rest') return { by: null, since: releases[0]?.releasedAt ?? proof.pulledAt };
 	if (working === 'passed') return { by: proof.passedBy, since: proof.passedAt ?? proof.pulledAt };
 	if (working === 'queried') {
-		const [oldest] = standing.claims.flatMap(({ queries }) => queries.filter(isOpen));
+		const [oldest] = openQueries(standing);
 		if (!oldest) return { by: null, since: proof.pulledAt };
 		return oldest.answeredAt
 			? { by: oldest.askedBy, since: oldest.answeredAt }
@@ -173,7 +202,7 @@ function missing(dossier: Dossier, standing: Standing | null, working: WorkingSt
 		weighed.filter(({ verdict }) => verdict.verdict === name).length;
 	const states = (name: string) =>
 		standing?.claims.filter(({ state }) => state === name).length ?? 0;
-	const open = standing?.claims.flatMap(({ queries }) => queries.filter(isOpen)).length ?? 0;
+	const open = standing ? openQueries(standing).length : 0;
 	return [
 		counted(verdicts('tips'), 'tips', 'tip'),
 		counted(verdicts('unweighed'), 'not weighed'),

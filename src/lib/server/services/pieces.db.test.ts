@@ -1,9 +1,11 @@
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
+import { eq } from 'drizzle-orm';
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, test } from 'vitest';
 import { openTestDatabase, type TestDatabase } from '../../../../tests/support/database.ts';
 import { Desk, reword, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
+import { upgrades, type WidgetDocument } from '../../widget/document.ts';
 import { firstLight } from '../demo/first-light.ts';
-import { pieceWriters } from '../db/schema/index.ts';
+import { pieces, pieceWriters, proofs } from '../db/schema/index.ts';
 import { createPiece, getPiece, listPieces, saveDraft } from './pieces.ts';
 
 let database: TestDatabase;
@@ -87,6 +89,13 @@ describe('saving a draft', () => {
 		expect((await desk.piece()).document).toEqual(firstLight);
 	});
 
+	test('a save whose answer was lost is answered when it is sent again, on its old version', async () => {
+		const first = await save(1, firstLight);
+		office.wait(1);
+		expect(await save(1, firstLight)).toEqual(first);
+		expect((await desk.piece()).version).toBe(2);
+	});
+
 	test('of many saves on one version at once, one wins and the others are told', async () => {
 		const saves = await Promise.allSettled(
 			Array.from({ length: 8 }, (_, index) =>
@@ -143,6 +152,65 @@ describe('saving a draft', () => {
 		await expect(getPiece(await office.as(desk.writer), 'nowhere')).rejects.toEqual(
 			code('not-found')
 		);
+	});
+});
+
+describe('a document stored by an older house', () => {
+	/** As if version 1 had followed a version 0 that called the point something else. */
+	const older = ({ point, ...document }: WidgetDocument) => ({
+		...document,
+		version: 0,
+		gist: point
+	});
+	const store = (document: unknown) =>
+		office.db.update(pieces).set({ document: document as WidgetDocument });
+
+	beforeEach(async () => {
+		await desk.create();
+		await desk.save(firstLight);
+		upgrades[0] = ({ gist, ...document }) => ({ ...document, version: 1, point: gist });
+	});
+	afterEach(() => {
+		delete upgrades[0];
+	});
+
+	test('reads in today’s shape, everywhere', async () => {
+		await store(older(firstLight));
+		expect((await desk.piece()).document).toEqual(firstLight);
+		expect((await listPieces(await office.as(desk.editor)))[0]).toMatchObject({
+			point: firstLight.point
+		});
+		await desk.pull();
+		expect((await desk.piece()).proof?.document).toEqual(firstLight);
+		await expect(save(1, { ...firstLight, title: 'Another' })).rejects.toEqual(
+			code('version-conflict', { document: firstLight })
+		);
+	});
+
+	test('a proof of it keeps its digest, and is pulled anew before it can be passed', async () => {
+		const first = await desk.pull();
+		const { digest } = (await desk.piece()).proof!;
+		await office.db.update(proofs).set({ document: older(firstLight) as never, digest: 'of old' });
+		expect((await desk.piece()).proof).toMatchObject({ digest: 'of old', document: firstLight });
+		expect(await desk.pull()).not.toBe(first);
+		expect((await desk.piece()).proof).toMatchObject({ digest });
+	});
+
+	test('one that can’t be read any more is a sentence, and leaves the rest of the desk open', async () => {
+		await createPiece(await office.as(desk.writer), { title: 'Tides' });
+		await office.db
+			.update(pieces)
+			.set({ document: { ...firstLight, version: 999 } as never })
+			.where(eq(pieces.slug, SLUG));
+		await expect(desk.piece()).rejects.toEqual(code('document-broken'));
+		await expect(desk.pull()).rejects.toEqual(code('document-broken'));
+		const lines = await listPieces(await office.as(desk.editor));
+		expect(lines.map(({ slug, missing }) => ({ slug, missing }))).toEqual([
+			{ slug: SLUG, missing: 'a document that can be read' },
+			{ slug: 'tides', missing: expect.any(String) }
+		]);
+		// It can be written again.
+		await expect(save(2, firstLight)).resolves.toMatchObject({ version: 3 });
 	});
 });
 

@@ -16,15 +16,23 @@ import { pieces, pieceWriters } from '../db/schema/index.ts';
 import { record } from './daybook.ts';
 import { namedIn, readDossier, readDossiers, type PieceRow } from './dossier.ts';
 import { nameBook } from './people.ts';
-import { summarise, viewPiece } from './piece-view.ts';
+import { summarise, summariseUnreadable, viewPiece } from './piece-view.ts';
 import { refuseUnstorable, unstorableText } from './storable.ts';
+import { readStored } from './stored-document.ts';
 
 /** The desk: one line a piece, the one saved last first. */
 export async function listPieces(ctx: Context): Promise<PieceSummary[]> {
 	requirePermission(ctx.actor, 'read-desk');
-	const dossiers = await readDossiers(ctx.db);
-	const names = await nameBook(ctx.db, namedIn(dossiers));
-	return dossiers.map((dossier) => summarise(dossier, names));
+	const { dossiers, unreadable } = await readDossiers(ctx.db);
+	const names = await nameBook(ctx.db, [
+		...namedIn(dossiers),
+		...unreadable.map(({ savedBy }) => savedBy)
+	]);
+	// One piece that can't be read must not close the desk for the others.
+	return [
+		...unreadable.map((piece) => summariseUnreadable(piece, names)),
+		...dossiers.map((dossier) => summarise(dossier, names))
+	];
 }
 
 export async function getPiece(ctx: Context, slug: string): Promise<PieceView> {
@@ -57,7 +65,7 @@ export async function createPiece(
 			.onConflictDoNothing({ target: pieces.slug })
 			.returning({ id: pieces.id, slug: pieces.slug });
 		if (!piece) throw new SteelyardError('slug-taken', { slug });
-		await addWriter(tx, piece.id, actor.personId, now);
+		await addWriter(tx, { pieceId: piece.id, personId: actor.personId, now, version: 1 });
 		await record(tx, ctx, 'piece-created', { pieceId: piece.id, slug });
 		return piece;
 	});
@@ -78,7 +86,7 @@ export interface Conflict extends Saved {
 /**
  * Saves the draft on top of `baseVersion`. Incomplete drafts are fine; one that doesn't hang together is refused with
  * `document-broken` and its issues named, and one made on an older version with `version-conflict`. Saving what is
- * there already changes nothing.
+ * there already changes nothing, on whatever version: the answer to a save may get lost on its way, and is asked for again.
  */
 export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): Promise<Saved> {
 	const { actor, now } = ctx;
@@ -89,8 +97,8 @@ export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): P
 
 	return ctx.db.transaction(async (tx) => {
 		const piece = await lockPiece(tx, slug);
-		if (piece.version !== input.baseVersion) throw await conflict(tx, piece);
 		if (canonicalJson(piece.document) === canonicalJson(parsed.document)) return saved(piece);
+		if (piece.version !== input.baseVersion) throw await conflict(tx, piece);
 
 		const [row] = await tx
 			.update(pieces)
@@ -103,7 +111,12 @@ export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): P
 			.where(and(eq(pieces.id, piece.id), eq(pieces.version, input.baseVersion)))
 			.returning();
 		if (!row) throw await conflict(tx, piece);
-		const first = await addWriter(tx, piece.id, actor.personId, now);
+		const first = await addWriter(tx, {
+			pieceId: piece.id,
+			personId: actor.personId,
+			now,
+			version: row.version
+		});
 		if (first)
 			await record(tx, ctx, 'draft-first-changed', { pieceId: piece.id, version: row.version });
 		return saved(row);
@@ -119,7 +132,7 @@ async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
 	const current: Conflict = {
 		...saved(piece),
 		savedBy: names(piece.savedBy),
-		document: piece.document
+		document: readStored(piece.document)
 	};
 	return new SteelyardError('version-conflict', { ...current });
 }
@@ -131,19 +144,28 @@ export async function lockPiece(tx: Db, slug: string): Promise<PieceRow> {
 	return piece;
 }
 
+interface Change {
+	pieceId: string;
+	personId: string;
+	now: Date;
+	/** The version that the change made. */
+	version: number;
+}
+
 /** Marks a person as one who changed the draft; true when they weren't one since the last release. */
-async function addWriter(tx: Db, pieceId: string, personId: string, now: Date): Promise<boolean> {
+async function addWriter(tx: Db, { pieceId, personId, now, version }: Change): Promise<boolean> {
 	const [changed] = await tx
 		.update(pieceWriters)
-		.set({ changedAt: now })
+		.set({ changedAt: now, version })
 		.where(and(eq(pieceWriters.pieceId, pieceId), eq(pieceWriters.personId, personId)))
 		.returning();
 	if (changed) return false;
-	await tx.insert(pieceWriters).values({ pieceId, personId, changedAt: now });
+	await tx.insert(pieceWriters).values({ pieceId, personId, changedAt: now, version });
 	return true;
 }
 
-function emptyDocument(title: string): WidgetDocument {
+/** What `createPiece` starts with. */
+export function emptyDocument(title: string): WidgetDocument {
 	return {
 		version: DOCUMENT_VERSION,
 		language: 'en',

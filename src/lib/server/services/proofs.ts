@@ -23,11 +23,10 @@ export async function pullProof(
 	const { actor, now } = ctx;
 	requirePermission(actor, 'pull-proof');
 	return ctx.db.transaction(async (tx) => {
-		const piece = await lockPiece(tx, slug);
+		const { piece, proof: newest, writers } = await dossierOf(tx, await lockPiece(tx, slug));
 		const { findings: lacking, digest } = examine(piece.document);
 		if (lacking.length > 0) throw new SteelyardError('proof-not-ready', { findings: lacking });
 
-		const { proof: newest, writers } = await dossierOf(tx, piece);
 		if (newest?.digest === digest) return { proofId: newest.id, number: newest.number };
 
 		const number = (newest?.number ?? 0) + 1;
@@ -36,6 +35,7 @@ export async function pullProof(
 			.values({
 				pieceId: piece.id,
 				number,
+				version: piece.version,
 				document: piece.document,
 				digest,
 				pulledBy: actor.personId,
@@ -73,7 +73,7 @@ export async function passProof(
 	await ctx.db.transaction(async (tx) => {
 		const { proof, standing, dossier } = await lockNewestProof(tx, slug, input.proofId);
 		requirePermission(actor, 'pass-proof', { proof: standing.people });
-		requireFresh(ctx);
+		await requireFresh(ctx, tx);
 		const open = (await conditionsFor(tx, actor, dossier)).filter(({ met }) => !met);
 		if (open.length > 0) throw new SteelyardError('conditions-open', { conditions: open });
 		if (proof.passedAt) return;

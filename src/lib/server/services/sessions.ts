@@ -4,9 +4,10 @@ import { SteelyardError } from '../../errors.ts';
 import type { Actor } from '../../workflow/permissions.ts';
 import type { Context, SessionInfo } from '../context.ts';
 import type { Db } from '../db/client.ts';
-import { sessions } from '../db/schema/index.ts';
+import { people, sessions } from '../db/schema/index.ts';
 import { record } from './daybook.ts';
 import { readActor } from './people.ts';
+import { revokeSession } from './session-end.ts';
 
 const MINUTE = 60_000;
 const HOUR = 60 * MINUTE;
@@ -60,24 +61,29 @@ export async function signOut(ctx: Context): Promise<void> {
 	const { session } = ctx;
 	if (!session) return;
 	await ctx.db.transaction(async (tx) => {
-		await tx.update(sessions).set({ revokedAt: ctx.now }).where(eq(sessions.id, session.id));
+		await revokeSession(tx, ctx.now, session.id);
 		await record(tx, ctx, 'signed-out', {});
 	});
-}
-
-/** Ends every session of a person. */
-export async function revokeSessions(tx: Db, now: Date, personId: string): Promise<void> {
-	await tx
-		.update(sessions)
-		.set({ revokedAt: now })
-		.where(and(eq(sessions.personId, personId), isNull(sessions.revokedAt)));
 }
 
 export function isFresh({ session, now }: Pick<Context, 'session' | 'now'>): boolean {
 	return session !== null && now.getTime() - session.freshAt.getTime() <= FRESH_MS;
 }
 
-/** A signature means something only when the person has just shown that it's them. Throws `confirm-needed`. */
-export function requireFresh(ctx: Pick<Context, 'session' | 'now'>): void {
-	if (!isFresh(ctx)) throw new SteelyardError('confirm-needed');
+/**
+ * A signature means something only when the person has just shown that it's them. Throws `confirm-needed`, or
+ * `confirm-by-link` for someone who has no passphrase to give.
+ */
+export async function requireFresh(
+	ctx: Pick<Context, 'actor' | 'session' | 'now'>,
+	tx: Db
+): Promise<void> {
+	if (isFresh(ctx)) return;
+	const [person] = ctx.actor
+		? await tx
+				.select({ passphraseHash: people.passphraseHash })
+				.from(people)
+				.where(eq(people.id, ctx.actor.personId))
+		: [];
+	throw new SteelyardError(person?.passphraseHash ? 'confirm-needed' : 'confirm-by-link');
 }

@@ -52,7 +52,12 @@ export async function markRight(tx: Db, attemptId: string, device: string): Prom
 		.where(eq(signInAttempts.id, attemptId));
 }
 
-/** Counts a wish for a link; throws `sign-in-slowed` past 5 an hour for one address or 100 an hour in all. */
+/** Takes a try back that nobody looked at. */
+export async function forgetTry(tx: Db, attemptId: string): Promise<void> {
+	await tx.delete(signInAttempts).where(eq(signInAttempts.id, attemptId));
+}
+
+/** Counts a wish for a link; throws `links-slowed` past 5 an hour for one address or 100 an hour in all. */
 export async function countLinkWish(tx: Db, now: Date, attempt: Try): Promise<void> {
 	const recent = and(
 		eq(signInAttempts.kind, 'link'),
@@ -64,7 +69,7 @@ export async function countLinkWish(tx: Db, now: Date, attempt: Try): Promise<vo
 		(await howMany(tx, recent, account)) >= LINKS_PER_ACCOUNT ||
 		(await howMany(tx, recent)) >= LINKS_IN_ALL;
 	if (slowed)
-		throw new SteelyardError('sign-in-slowed', { retryAfterSeconds: LINK_WINDOW_MS / 1000 });
+		throw new SteelyardError('links-slowed', { retryAfterSeconds: LINK_WINDOW_MS / 1000 });
 	await insertTry(tx, now, 'link', attempt, false);
 }
 

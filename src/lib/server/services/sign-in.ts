@@ -10,10 +10,12 @@ import { people, sessions, signInLinks } from '../db/schema/index.ts';
 import { queueMail } from '../mail/outbox.ts';
 import { record } from './daybook.ts';
 import { normalEmail } from './people.ts';
+import { revokeSession } from './session-end.ts';
 import { openSession } from './sessions.ts';
 import {
 	countLinkWish,
 	countPassphraseTry,
+	forgetTry,
 	markRight,
 	recordLinkSignIn
 } from './sign-in-limits.ts';
@@ -33,13 +35,9 @@ export async function signInByPassphrase(
 	{ passphrase, ...given }: { email: string; passphrase: string }
 ): Promise<SignedIn> {
 	const email = normalEmail(given.email);
-	const tryId = await ctx.db.transaction((tx) =>
-		countPassphraseTry(tx, ctx.now, { ...ctx.client, email })
-	);
 	const person = await findPerson(ctx.db, email);
-	// Outside any transaction: it takes tens of milliseconds.
-	const fits = await passphraseFits(person?.passphraseHash ?? null, passphrase);
-	if (!fits || !person) throw new SteelyardError('sign-in-failed');
+	const tryId = await tryPassphrase(ctx, email, person?.passphraseHash ?? null, passphrase);
+	if (!person) throw new SteelyardError('sign-in-failed');
 
 	const device = ctx.client.device ?? newId();
 	return ctx.db.transaction(async (tx) => {
@@ -48,17 +46,35 @@ export async function signInByPassphrase(
 	});
 }
 
-/** Renews the session's proof of who it is. Throws like `signInByPassphrase`. */
+/** Counts a try and weighs it; the id of the counted try when it was right. Throws like `signInByPassphrase`. */
+async function tryPassphrase(
+	ctx: Context,
+	email: string,
+	passphraseHash: string | null,
+	passphrase: string
+): Promise<string> {
+	const tryId = await ctx.db.transaction((tx) =>
+		countPassphraseTry(tx, ctx.now, { ...ctx.client, email })
+	);
+	try {
+		// Outside any transaction: it takes tens of milliseconds.
+		if (await passphraseFits(passphraseHash, passphrase)) return tryId;
+	} catch (error) {
+		// Nobody looked at it, so it was not a wrong one.
+		if (error instanceof SteelyardError) await forgetTry(ctx.db, tryId);
+		throw error;
+	}
+	throw new SteelyardError('sign-in-failed');
+}
+
+/** Renews the session's proof of who it is. Throws like `signInByPassphrase`, and `confirm-by-link` without a passphrase. */
 export async function confirmPassphrase(ctx: Context, passphrase: string): Promise<void> {
 	const { actor, session } = ctx;
 	if (!actor || !session) throw new SteelyardError('not-signed-in');
 	const [person] = await ctx.db.select().from(people).where(eq(people.id, actor.personId));
 	if (!person) throw new SteelyardError('not-signed-in');
-	const tryId = await ctx.db.transaction((tx) =>
-		countPassphraseTry(tx, ctx.now, { ...ctx.client, email: person.email })
-	);
-	if (!(await passphraseFits(person.passphraseHash, passphrase)))
-		throw new SteelyardError('sign-in-failed');
+	if (person.passphraseHash === null) throw new SteelyardError('confirm-by-link');
+	const tryId = await tryPassphrase(ctx, person.email, person.passphraseHash, passphrase);
 	await ctx.db.transaction(async (tx) => {
 		await markRight(tx, tryId, ctx.client.device ?? newId());
 		await tx.update(sessions).set({ freshAt: ctx.now }).where(eq(sessions.id, session.id));
@@ -85,15 +101,22 @@ export async function sendSignInLink(
 			.set({ usedAt: ctx.now })
 			.where(and(eq(signInLinks.personId, person.id), isNull(signInLinks.usedAt)));
 		const id = newId();
+		const expiresAt = new Date(ctx.now.getTime() + LINK_LIFE_MS);
 		await tx.insert(signInLinks).values({
 			id,
 			personId: person.id,
 			tokenHash: sha256(linkToken(ctx.secret, id)),
 			nonceHash: sha256(wish.nonce),
 			createdAt: ctx.now,
-			expiresAt: new Date(ctx.now.getTime() + LINK_LIFE_MS)
+			expiresAt
 		});
-		await queueMail(tx, ctx.now, person, { event: 'sign-in-link', input: { linkId: id } });
+		await queueMail(
+			tx,
+			ctx.now,
+			person,
+			{ event: 'sign-in-link', input: { linkId: id } },
+			expiresAt
+		);
 	});
 }
 
@@ -134,6 +157,8 @@ async function enter(
 	personId: string,
 	by: 'passphrase' | 'link'
 ): Promise<SessionInfo> {
+	// The browser's earlier session ends here: nobody who has kept its cookie stays in by it.
+	if (ctx.session) await revokeSession(tx, ctx.now, ctx.session.id);
 	const session = await openSession(tx, ctx.now, personId);
 	await record(tx, ctx, 'signed-in', { personId, by });
 	return session;

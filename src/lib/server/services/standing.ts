@@ -13,6 +13,8 @@ export interface StandingClaim {
 
 export interface Standing {
 	claims: StandingClaim[];
+	/** Open queries on claims that this proof doesn't hold: tying the words anew doesn't settle what was asked. */
+	looseQueries: QueryRow[];
 	people: ProofPeople;
 }
 
@@ -37,7 +39,13 @@ export function standingOf(dossier: Dossier, proof: ProofRow, at?: Date): Standi
 	const checkers = claims.flatMap(({ signatures }) =>
 		signatures.filter(({ inForce }) => inForce).map(({ personId }) => personId)
 	);
-	return { claims, people: { writers: proof.writers, checkers: [...new Set(checkers)] } };
+	const held = new Set(claims.map(({ examined }) => examined.claim.id));
+	const looseQueries = dossier.queries.filter((query) => isOpen(query) && !held.has(query.claim));
+	return {
+		claims,
+		looseQueries,
+		people: { writers: proof.writers, checkers: [...new Set(checkers)] }
+	};
 }
 
 function stoodAt({ signedAt, takenBackAt }: SignatureRow, at: Date | undefined): boolean {
@@ -58,6 +66,13 @@ function claimState(
 
 export function isOpen(query: Pick<QueryRow, 'closedAt'>): boolean {
 	return query.closedAt === null;
+}
+
+/** On any claim of the piece. */
+export function openQueries({ claims, looseQueries }: Standing): QueryRow[] {
+	return [...claims.flatMap(({ queries }) => queries.filter(isOpen)), ...looseQueries].sort(
+		(a, b) => a.askedAt.getTime() - b.askedAt.getTime()
+	);
 }
 
 export function isReleased(dossier: Dossier, proof: ProofRow): boolean {

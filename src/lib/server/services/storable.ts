@@ -19,7 +19,7 @@ export function unstorableText(value: unknown, path = ''): TextIssue[] {
 	]);
 }
 
-export function isStorable(text: string): boolean {
+function isStorable(text: string): boolean {
 	return !text.includes('\0') && !/\p{Surrogate}/u.test(text);
 }
 

@@ -1,28 +1,5 @@
 /** The headers of every answer that readers get on other people's pages. */
-
-/** Features no frame uses; the list is closed so that a partner's page can't lend them. */
-const NO_FEATURES = [
-	'accelerometer',
-	'attribution-reporting',
-	'bluetooth',
-	'browsing-topics',
-	'camera',
-	'display-capture',
-	'geolocation',
-	'gyroscope',
-	'hid',
-	'idle-detection',
-	'magnetometer',
-	'microphone',
-	'midi',
-	'payment',
-	'screen-wake-lock',
-	'serial',
-	'usb'
-]
-	.map((feature) => `${feature}=()`)
-	.concat('fullscreen=(self)')
-	.join(', ');
+import { PERMISSIONS_POLICY } from '../http/permissions-policy.ts';
 
 /**
  * `sandbox` gives the document an opaque origin even when the page around it forgets the attribute: no cookies, no
@@ -52,7 +29,7 @@ export function frameHeaders(styles: readonly string[]): Headers {
 		'Content-Security-Policy': contentPolicy(styles),
 		'Cross-Origin-Embedder-Policy': 'require-corp',
 		'Cross-Origin-Resource-Policy': 'cross-origin',
-		'Permissions-Policy': NO_FEATURES,
+		'Permissions-Policy': PERMISSIONS_POLICY,
 		'Referrer-Policy': 'no-referrer',
 		'X-Content-Type-Options': 'nosniff'
 	};

@@ -2,10 +2,12 @@
  * The shelf's copy on disk: bytes under their own hash, and one list a release. Every file is written beside its place,
  * brought to the disk, and renamed into it, so that a crash leaves either the old file, the new one, or none.
  */
-import { createHash, randomUUID } from 'node:crypto';
+import { randomUUID } from 'node:crypto';
 import { mkdir, open, readdir, readFile, rename, rm } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
-import type { BundleManifest } from '../press/bundle.ts';
+import { z } from 'zod';
+import { sha256 } from '../auth/hashes.ts';
+import { BundleManifest } from '../press/bundle.ts';
 import { ENCODINGS, pack, unpacksTo, type Encoding, type Packed } from './encodings.ts';
 
 export interface StoredFile {
@@ -19,27 +21,27 @@ export class ShelfMirror {
 	constructor(readonly folder: string) {}
 
 	/** Keeps the bytes with their packed forms; a file that is there already is left as it is. */
-	async keepFile(sha256: string, bytes: Uint8Array, contentType: string): Promise<StoredFile> {
-		const kept = await this.readFile(sha256, contentType);
+	async keepFile(hash: string, bytes: Uint8Array, contentType: string): Promise<StoredFile> {
+		const kept = await this.readFile(hash, contentType);
 		if (kept) return kept;
 		const packed = await pack(bytes, contentType);
 		await Promise.all(
 			ENCODINGS.map(async (encoding) => {
 				const form = packed[encoding];
-				if (form) await write(this.#file(sha256) + ENDINGS[encoding], form);
+				if (form) await write(this.#file(hash) + ENDINGS[encoding], form);
 			})
 		);
-		await write(this.#file(sha256), bytes);
+		await write(this.#file(hash), bytes);
 		return { bytes: Buffer.from(bytes), packed };
 	}
 
 	/** Null when the file isn't there, or isn't what its name says. Packed forms that don't fit are made again. */
-	async readFile(sha256: string, contentType: string): Promise<StoredFile | null> {
-		const bytes = await readIfThere(this.#file(sha256));
-		if (!bytes || createHash('sha256').update(bytes).digest('hex') !== sha256) return null;
+	async readFile(hash: string, contentType: string): Promise<StoredFile | null> {
+		const bytes = await readIfThere(this.#file(hash));
+		if (!bytes || sha256(bytes) !== hash) return null;
 		const [br, gzip] = await Promise.all(
 			ENCODINGS.map(async (encoding) => {
-				const form = await readIfThere(this.#file(sha256) + ENDINGS[encoding]);
+				const form = await readIfThere(this.#file(hash) + ENDINGS[encoding]);
 				return form && (await unpacksTo(form, encoding, bytes)) ? form : null;
 			})
 		);
@@ -59,17 +61,19 @@ export class ShelfMirror {
 		for (const name of await namesIn(folder)) {
 			if (!name.endsWith('.json')) continue;
 			try {
-				manifests.push(JSON.parse(await readFile(join(folder, name), 'utf8')));
+				manifests.push(
+					BundleManifest.parse(JSON.parse(await readFile(join(folder, name), 'utf8')))
+				);
 			} catch (error) {
-				if (!(error instanceof SyntaxError)) throw error;
+				if (!(error instanceof SyntaxError || error instanceof z.ZodError)) throw error;
 				damaged.push(name.replace(/\.json$/, ''));
 			}
 		}
 		return { manifests, damaged };
 	}
 
-	#file(sha256: string): string {
-		return join(this.folder, 'files', sha256.slice(0, 2), sha256);
+	#file(hash: string): string {
+		return join(this.folder, 'files', hash.slice(0, 2), hash);
 	}
 
 	#list(slug: string, release: number): string {

@@ -1,5 +1,5 @@
 /** What stands in a frame when there is nothing to show: a card in the house's look, and no blame. */
-import { createHash } from 'node:crypto';
+import { policyHash } from '../auth/hashes.ts';
 
 const STYLE = [
 	':root{color-scheme:light dark}',
@@ -26,4 +26,4 @@ export const MISSING_CARD = card(
 
 export const METHOD_CARD = card('This can only be read', 'Ask for it with GET or HEAD.');
 
-export const CARD_STYLES = [`sha256-${createHash('sha256').update(STYLE).digest('base64')}`];
+export const CARD_STYLES = [policyHash(STYLE)];

@@ -107,6 +107,22 @@ test('a broken list or packed form never reaches a reader', async () => {
 	expect(page?.packed.br && brotliDecompressSync(page.packed.br)).toEqual(page?.plain);
 });
 
+test.each([
+	'null',
+	'[]',
+	'{"version":1}',
+	'{"version":1,"slug":"same-drop","release":1,"files":[null]}'
+])('a list of another shape is damaged, and closes nothing else: %s', async (list) => {
+	await new ReleaseShelf(folder).place(bundle('first-light', 1, 'one'));
+	await new ReleaseShelf(folder).place(bundle('same-drop', 1, 'drop'));
+	for (const name of await everyFile(folder))
+		if (name.endsWith('same-drop.1.json')) await writeFile(name, list);
+	expect(await new ReleaseShelf(folder).load()).toEqual({
+		placed: 1,
+		damaged: ['same-drop.1']
+	});
+});
+
 test('what is out can’t be placed again with other words', async () => {
 	const shelf = new ReleaseShelf(folder);
 	await shelf.place(bundle('first-light', 1, 'one'));

@@ -52,6 +52,7 @@ function piece(working: PieceView['working'], claims: ClaimView[] = [], missing 
 		writers: [name(tamsin)],
 		checkers: claims.some(({ state }) => state === 'signed') ? [name(ama)] : [],
 		claims,
+		looseQueries: [],
 		passedBy: null,
 		passedAt: null
 	};

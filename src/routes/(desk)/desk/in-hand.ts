@@ -29,8 +29,10 @@ export function inHand(actor: Actor, pieces: readonly PieceView[]): InHand[] {
 		.sort((a, b) => a.rank - b.rank || a.piece.since.localeCompare(b.piece.since));
 }
 
-const openQueries = (proof: ProofView) =>
-	proof.claims.flatMap(({ queries }) => queries.filter(({ closedAt }) => closedAt === null));
+const openQueries = ({ claims, looseQueries }: ProofView) => [
+	...claims.flatMap(({ queries }) => queries.filter(({ closedAt }) => closedAt === null)),
+	...looseQueries
+];
 
 function answersWanted(actor: Actor, piece: PieceView): InHand[] {
 	if (!piece.proof || !piece.writers.some(({ personId }) => personId === actor.personId)) return [];

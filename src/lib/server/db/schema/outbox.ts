@@ -14,6 +14,8 @@ export const outbox = pgTable(
 		createdAt: moment().notNull(),
 		/** Not to be tried before this; moves back after a failure. */
 		dueAt: moment().notNull(),
+		/** Of no use to anyone after this; null when it never grows old. */
+		goodUntil: moment(),
 		/** While this lies ahead, one sender has the row. */
 		leaseUntil: moment(),
 		attempts: integer().notNull().default(0),

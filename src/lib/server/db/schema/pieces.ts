@@ -28,7 +28,7 @@ export const pieces = pgTable(
 	]
 );
 
-/** Who has changed the draft since the last release, and when last: they can neither check nor pass it. */
+/** Who has changed the draft since the last release, and at which version last: they can neither check nor pass it. */
 export const pieceWriters = pgTable(
 	'piece_writers',
 	{
@@ -36,7 +36,9 @@ export const pieceWriters = pgTable(
 			.notNull()
 			.references(() => pieces.id),
 		personId: person(),
-		changedAt: moment().notNull()
+		changedAt: moment().notNull(),
+		/** The draft's version after their last change: versions are counted under the piece's lock, clocks aren't. */
+		version: integer().notNull()
 	},
 	(table) => [primaryKey({ columns: [table.pieceId, table.personId] })]
 );

@@ -21,6 +21,8 @@ export const proofs = pgTable(
 		id: id(),
 		pieceId: piece(),
 		number: integer().notNull(),
+		/** The draft's version that it is a copy of; 0 for proofs from before this was kept. */
+		version: integer().notNull(),
 		document: jsonb().$type<WidgetDocument>().notNull(),
 		digest: text().notNull(),
 		pulledBy: person(),

@@ -1,5 +1,6 @@
 import { integer, jsonb, pgTable, text, unique } from 'drizzle-orm/pg-core';
 import type { WidgetDocument } from '../../../widget/document.ts';
+import type { PublicAccount } from '../../press/account.ts';
 import type { BundleManifest } from '../../press/bundle.ts';
 import { id, moment } from './columns.ts';
 import { people } from './people.ts';
@@ -21,6 +22,8 @@ export const releases = pgTable(
 			.references(() => proofs.id),
 		document: jsonb().$type<WidgetDocument>().notNull(),
 		manifest: jsonb().$type<BundleManifest>().notNull(),
+		/** What the public page says of it; null for releases from before this was kept. */
+		account: jsonb().$type<PublicAccount>(),
 		releasedBy: text()
 			.notNull()
 			.references(() => people.id),

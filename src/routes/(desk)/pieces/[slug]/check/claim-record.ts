@@ -14,6 +14,7 @@ import { lineById } from '$lib/physics/lines/catalogue.ts';
 import { commensurable, convert, convertDifference } from '$lib/physics/units/units.ts';
 import type {
 	Claim,
+	ControlValues,
 	ReadingRef,
 	SettingSource,
 	Step,
@@ -77,11 +78,13 @@ export function claimRecord(
 	claim: Claim,
 	/** The claim's own words, for the unit it is read in. */
 	words: string,
-	calculators: CalculatorSet
+	calculators: CalculatorSet,
+	/** Where the sliders stand; their first settings when left out. */
+	values: ControlValues = {}
 ): ClaimRecord | null {
 	if (claim.form === 'exempt') return null;
 	const ref = claim.reading;
-	const evaluation = evaluate(document, {}, calculators);
+	const evaluation = evaluate(document, values, calculators);
 	const outcome = readingAt(document, evaluation, ref, calculators);
 	const wiring = wiringOf(document.steps, ref);
 	const stated = weighingOf(document, evaluation, claim, words, calculators)?.stated ?? null;
@@ -155,7 +158,7 @@ function workingStep(
 		settings: Object.entries(step.settings).map(([key, source]) => ({
 			label: settingLabel(calculator, key),
 			value: settingWords(document, evaluation, step, key, source, calculators),
-			origin: originWords(document, source, calculators),
+			origin: originWords(document, evaluation, source, calculators),
 			from: source.from
 		})),
 		readings:
@@ -229,6 +232,7 @@ function settingWords(
 
 function originWords(
 	document: WidgetDocument,
+	evaluation: Evaluation,
 	source: SettingSource,
 	calculators: CalculatorSet
 ): string {
@@ -237,7 +241,9 @@ function originWords(
 			return 'the writer’s choice';
 		case 'control': {
 			const control = document.controls.find(({ id }) => id === source.control);
-			return `where the slider “${control?.label ?? ''}” starts`;
+			return control && evaluation.values[control.id] !== control.initial
+				? `the slider “${control.label}”, here at this setting`
+				: `where the slider “${control?.label ?? ''}” starts`;
 		}
 		case 'line':
 			return lineById(source.line)?.label ?? 'line catalogue';

@@ -1,6 +1,6 @@
 /** How the sentence of a number that moves fares along each slider that reaches it. */
 import { weighingOf } from '$lib/factcheck/claim-weighing.ts';
-import { settingsOf } from '$lib/factcheck/judge.ts';
+import { settingsOf } from '$lib/factcheck/trials.ts';
 import type { VerdictName } from '$lib/factcheck/verdict.ts';
 import { weigh } from '$lib/factcheck/weigh.ts';
 import type { CalculatorSet } from '$lib/physics/calculator.ts';

@@ -1,10 +1,14 @@
 import { z } from 'zod';
 import { calculate, describeCalculators, type CalculationAnswer } from '$lib/api/calculation.ts';
+import { brake } from '$lib/server/http/brake.ts';
 import { readJson, shaped } from '$lib/server/http/json-body.ts';
 import { preflight, publicJson, publicRefusal } from '$lib/server/http/public-api.ts';
 import type { RequestHandler } from './$types';
 
 const Body = z.record(z.string(), z.unknown(), { error: 'Send an object: {"inputs": {…}}.' });
+
+/** A calculator may take a while; strangers get one a second. */
+const strangers = brake(60);
 
 /** One calculator, as it describes itself. */
 export const GET: RequestHandler = ({ params }) => {
@@ -13,8 +17,9 @@ export const GET: RequestHandler = ({ params }) => {
 };
 
 /** `{"inputs": {…}}` in; what `npm run calc` writes for a line out. */
-export const POST: RequestHandler = async ({ params, request }) => {
+export const POST: RequestHandler = async ({ locals: { context }, params, request }) => {
 	try {
+		if (!context.actor) strangers.count(context.client.address, context.now);
 		const body = shaped(Body, await readJson(request));
 		return answer(calculate({ ...body, calculator: params.id }));
 	} catch (error) {
