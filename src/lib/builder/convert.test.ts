@@ -8,7 +8,7 @@ import {
 	type Inline,
 	type Step
 } from '../widget/document.ts';
-import { toDocument, toManuscript } from './convert.ts';
+import { readableDocument, toDocument, toManuscript } from './convert.ts';
 
 const id = (prefix: string) => fc.nat(999).map((n) => `${prefix}-${n}`);
 const words = fc.string({ minLength: 1, maxLength: 30, unit: 'grapheme' });
@@ -181,6 +181,35 @@ describe('widget document and manuscript', () => {
 			claims: []
 		});
 		expect(toDocument(manuscript).blocks).toMatchObject([{ kind: 'paragraph', content: [] }]);
+	});
+
+	describe('words found in a browser', () => {
+		const found = {
+			version: 1,
+			language: 'en',
+			constants: '2026.1',
+			title: 'x'.repeat(130),
+			point: '',
+			steps: [{ id: 'step-1', calculator: 'gone.since', revision: '1', settings: {} }],
+			controls: [],
+			blocks: [{ id: 'block-1', kind: 'paragraph', content: [{ kind: 'text', text: 'Words.' }] }],
+			claims: []
+		};
+
+		test('can stand in the sheet though the server would refuse them', () => {
+			expect(WidgetDocument.safeParse(found).success).toBe(false);
+			expect(readableDocument(found)).toBe(found);
+		});
+
+		test.each([
+			['nothing', null],
+			['no title', { ...found, title: null }],
+			['no list of blocks', { ...found, blocks: undefined }],
+			['a block of no kind', { ...found, blocks: [{ id: 'block-1', kind: 'ballad' }] }],
+			['a calculator without settings', { ...found, steps: [{ id: 'a', calculator: 'b' }] }]
+		])('%s is no sheet', (_, stored) => {
+			expect(readableDocument(stored)).toBeNull();
+		});
 	});
 
 	test('a claim whose words are gone is left out of the document', () => {

@@ -1,6 +1,5 @@
 /** Widget document ⇄ manuscript. Loss-free both ways for every claim that still stands in the copy. */
 import type { Fragment, Mark, Node } from 'prosemirror-model';
-import { z } from 'zod';
 import {
 	DOCUMENT_VERSION,
 	isTextBlock,
@@ -24,34 +23,49 @@ export function toManuscript(document: WidgetDocument): Node {
 	]);
 }
 
-const Identified = z.looseObject({ id: z.string() });
-/** What the bench and the editor can't do without; all the rest is the server's to judge. */
-const Shape = z.looseObject({
-	constants: z.string(),
-	title: z.string(),
-	point: z.string(),
-	steps: z.array(
-		Identified.extend({
-			calculator: z.string(),
-			settings: z.record(z.string(), z.looseObject({ from: z.string() }))
-		})
-	),
-	controls: z.array(Identified),
-	blocks: z.array(Identified),
-	claims: z.array(Identified.extend({ form: z.string() }))
-});
-
 /** A stored document that can stand in the editor, whether or not it hangs together; null where it hasn't the shape. */
 export function readableDocument(stored: unknown): WidgetDocument | null {
-	if (!Shape.safeParse(stored).success) return null;
-	const document = stored as WidgetDocument;
+	if (!hasShape(stored)) return null;
 	try {
-		toManuscript(document).check();
-		return document;
+		toManuscript(stored).check();
+		return stored;
 	} catch {
 		// A block that the schema doesn't know: its words are for taking along, not for the sheet.
 		return null;
 	}
+}
+
+/** What the bench and the editor can't do without; all the rest is the server's to judge. */
+function hasShape(stored: unknown): stored is WidgetDocument {
+	if (!isRecord(stored)) return false;
+	const { constants, title, point } = stored;
+	if ([constants, title, point].some((words) => typeof words !== 'string')) return false;
+	return (
+		areIdentified(stored.blocks) &&
+		areIdentified(stored.controls) &&
+		areIdentified(stored.claims, (claim) => typeof claim.form === 'string') &&
+		areIdentified(
+			stored.steps,
+			({ calculator, settings }) =>
+				typeof calculator === 'string' &&
+				isRecord(settings) &&
+				Object.values(settings).every(isRecord)
+		)
+	);
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+	return typeof value === 'object' && value !== null;
+}
+
+function areIdentified(
+	list: unknown,
+	isWhole: (member: Record<string, unknown>) => boolean = () => true
+): boolean {
+	return (
+		Array.isArray(list) &&
+		list.every((member) => isRecord(member) && typeof member.id === 'string' && isWhole(member))
+	);
 }
 
 function words(text: string): Node[] {
