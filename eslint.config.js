@@ -16,6 +16,7 @@ const OWN = [
 	'workflow',
 	'renderer',
 	'builder',
+	'vetting',
 	'ui',
 	'forms',
 	'api',
@@ -48,7 +49,7 @@ const TABLE = {
 		why: 'permissions and states are decided from plain facts, so that services and pages can ask the same function'
 	},
 	forms: {
-		own: ['widget', 'workflow', 'errors'],
+		own: ['widget', 'workflow', 'errors', 'physics'],
 		packages: ['zod'],
 		why: 'a form is a schema that the page and the service share'
 	},
@@ -68,6 +69,11 @@ const TABLE = {
 		only: ['renderer/marks', 'renderer/tokens'],
 		packages: ['svelte', 'katex/dist/katex\\.min\\.css', '\\$app/(state|navigation|forms|paths)'],
 		why: 'the plain parts of a page know no noun of the house'
+	},
+	vetting: {
+		own: ['ui', 'forms', 'workflow', 'physics', 'errors', 'routes'],
+		packages: ['svelte', 'sveltekit-superforms', 'idb-keyval', '\\$app/(state|navigation|forms)'],
+		why: 'writing and vetting a calculator happens in a browser: it reaches the server over HTTP'
 	},
 	builder: {
 		own: [
@@ -95,8 +101,19 @@ const NO_ENV = {
 	message: 'Settings are read and checked in one place: src/lib/server/env.ts.'
 };
 
-/** @param {keyof typeof TABLE} folder */
-function mayImport(folder) {
+/** What parses formulas carries a parser from a package; trees are all that anything in a browser needs. */
+const NO_PARSER = {
+	regex: '(?:^|/)(?:formula/parse|house/settle)\\.ts$',
+	allowTypeImports: true,
+	message:
+		'Formulas are parsed on the server alone, when they are saved: call the service, or work with the tree.'
+};
+
+/**
+ * @param {keyof typeof TABLE} folder
+ * @param {{ files: string[], packages: string[] }} [parsing] Files of the folder that parse formulas.
+ */
+function mayImport(folder, parsing) {
 	const {
 		own: allowed,
 		types = [],
@@ -114,7 +131,7 @@ function mayImport(folder) {
 	const except = only.map((path) => `(?!(?:(?:\\.\\./)+|\\$lib/)${escape(path)})`).join('');
 	const patterns = [
 		{
-			regex: `^(?!\\.{1,2}/|\\$lib/|(?:${[...packages, 'node:never'].join('|')})(?:/|$))`,
+			regex: `^(?!\\.{1,2}/|\\$lib/|(?:${[...packages, ...(parsing?.packages ?? []), 'node:never'].join('|')})(?:/|$))`,
 			message: `src/lib/${folder} may not import this package: ${why}.`
 		},
 		{
@@ -122,6 +139,7 @@ function mayImport(folder) {
 			message: `src/lib/${folder} may not import this folder: ${why}.`
 		}
 	];
+	if (!parsing) patterns.push(NO_PARSER);
 	if (types.length > 0) {
 		patterns.push({
 			regex: own(types),
@@ -143,7 +161,7 @@ function mayImport(folder) {
 		});
 	}
 	return {
-		files: [`src/lib/${folder}/**/*.{ts,svelte}`],
+		files: parsing?.files ?? [`src/lib/${folder}/**/*.{ts,svelte}`],
 		ignores: ['**/*.test.ts'],
 		rules: { '@typescript-eslint/no-restricted-imports': ['error', { patterns }] }
 	};
@@ -160,7 +178,7 @@ const SERVER = [
 		message: 'This belongs to a page in a browser.'
 	},
 	{
-		regex: own(['builder', 'ui']),
+		regex: own(['builder', 'vetting', 'ui']),
 		message: 'The server knows no screens: src/lib/server gives data, src/routes shows it.'
 	},
 	{
@@ -256,6 +274,11 @@ export default ts.config(
 	},
 
 	...Object.keys(TABLE).map((folder) => mayImport(/** @type {keyof typeof TABLE} */ (folder))),
+	mayImport('physics', {
+		files: ['src/lib/physics/formula/parse.ts'],
+		packages: ['mathjs/number$']
+	}),
+	mayImport('physics', { files: ['src/lib/physics/house/settle.ts'], packages: [] }),
 	{
 		files: PURE.map((folder) => `src/lib/${folder}/**/*.ts`),
 		ignores: ['**/*.test.ts'],
@@ -302,6 +325,7 @@ export default ts.config(
 				{
 					patterns: [
 						NO_ENV,
+						NO_PARSER,
 						{
 							regex: '^\\.\\./(?!.*\\.css$)',
 							message:
@@ -325,6 +349,7 @@ export default ts.config(
 				'error',
 				{
 					patterns: [
+						NO_PARSER,
 						{
 							regex: '^\\$(?:app|env)/',
 							message: 'The reader’s frame is built outside SvelteKit.'

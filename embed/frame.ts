@@ -5,6 +5,7 @@
 import './document.css';
 import { hydrate } from 'svelte';
 import type { Calculator, CalculatorSet } from '../src/lib/physics/calculator.ts';
+import type { HouseDefinition } from '../src/lib/physics/house/definition.ts';
 import Frame from '../src/lib/renderer/Frame.svelte';
 import type { FrameRelease } from '../src/lib/renderer/release.ts';
 import { heightMessage } from './messages.ts';
@@ -19,9 +20,11 @@ async function wake(target: HTMLElement, { release, calculators }: Inlined): Pro
 	const loaded = await Promise.all(
 		Object.entries(calculators).map(([id, address]) => loadCalculator(id, address))
 	);
+	// A release from before the house had calculators of its own carries none.
+	const own = await buildAll(release.houseCalculators ?? []);
 	hydrate(Frame, {
 		target,
-		props: { release, calculators: new Map(loaded) satisfies CalculatorSet }
+		props: { release, calculators: new Map([...loaded, ...own]) satisfies CalculatorSet }
 	});
 	document.documentElement.dataset.awake = '';
 	tellHeight();
@@ -32,6 +35,13 @@ async function loadCalculator(id: string, address: string): Promise<[string, Cal
 	const calculator = Object.values(module).find((exported) => exported.id === id);
 	if (!calculator) throw new Error(`${address} has no calculator ${id}`);
 	return [id, calculator];
+}
+
+/** What builds them is loaded only by frames that have some. */
+async function buildAll(definitions: readonly HouseDefinition[]): Promise<[string, Calculator][]> {
+	if (definitions.length === 0) return [];
+	const { buildHouseCalculator } = await import('../src/lib/physics/house/build.ts');
+	return definitions.map((definition) => [definition.id, buildHouseCalculator(definition)]);
 }
 
 function tellHeight(): void {

@@ -25,7 +25,8 @@ const CUTS: Cut[] = [
 			'caution',
 			'sources',
 			'checks',
-			'history'
+			'history',
+			'restsOnCosmology'
 		])
 	},
 	{ files: /src\/lib\/physics\/units\/table\.ts$/, members: new Set(['also', 'spoken', 'source']) },

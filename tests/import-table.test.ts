@@ -44,6 +44,12 @@ describe('refused', () => {
 		['src/lib/physics/lines/a.ts', uses('$lib/physics/units/units.ts'), 'import by relative path'],
 		['src/lib/physics/a.ts', usesType('../widget/document.ts'), 'physics says what is true'],
 		['src/lib/physics/a.ts', 'export const a = Math.random();', 'The same inputs'],
+		['src/lib/physics/formula/scan.ts', uses('mathjs/number'), 'physics says what is true'],
+		['src/lib/physics/formula/parse.ts', uses('mathjs'), 'physics says what is true'],
+		['src/lib/physics/house/build.ts', uses('../formula/parse.ts'), 'on the server alone'],
+		['src/lib/widget/a.ts', uses('../physics/house/settle.ts'), 'on the server alone'],
+		['src/lib/builder/a.ts', uses('$lib/physics/formula/parse.ts'), 'on the server alone'],
+		['embed/frame.ts', uses('../src/lib/physics/house/settle.ts'), 'on the server alone'],
 		['src/lib/widget/a.ts', 'export const a = window.innerWidth;', 'take it as an argument'],
 		['src/lib/widget/a.ts', uses('svelte'), 'the builder, the frame and the fact-check'],
 		[
@@ -77,6 +83,9 @@ describe('refused', () => {
 describe('allowed', () => {
 	test.each([
 		['src/lib/physics/lines/a.ts', uses('../units/units.ts')],
+		['src/lib/physics/formula/parse.ts', uses('mathjs/number') + uses('./scan.ts')],
+		['src/lib/physics/house/settle.ts', uses('../formula/parse.ts')],
+		['src/lib/server/services/a.ts', uses('../../physics/house/settle.ts')],
 		['src/lib/widget/a.ts', uses('zod') + usesType('../physics/calculator.ts')],
 		['src/lib/widget/a.ts', uses('@noble/hashes/sha2.js') + uses('../errors.ts')],
 		['src/lib/factcheck/a.ts', uses('../physics/units/units.ts') + usesType('../widget/stated.ts')],

@@ -51,6 +51,11 @@ export const explanations = {
 		message: 'Writer, checker and editor of one proof are three people.',
 		help: 'Someone who hasn’t written or checked this proof must do this.'
 	},
+	'own-proposal': {
+		status: 403,
+		message: 'You proposed this revision yourself.',
+		help: 'A second scientist signs it.'
+	},
 	'not-found': {
 		status: 404,
 		message: 'There is nothing at this address.',
@@ -115,6 +120,31 @@ export const explanations = {
 		status: 409,
 		message: 'This proof is already released.',
 		help: 'Pull a new proof to release a new version.'
+	},
+	'calculator-broken': {
+		status: 422,
+		message: 'This calculator doesn’t hold yet.',
+		help: 'Each problem is named beside its field. What you wrote is kept.'
+	},
+	'calculator-id-taken': {
+		status: 409,
+		message: 'Another calculator has this short name.',
+		help: 'Choose another, or revise the one that has it.'
+	},
+	'revision-too-small': {
+		status: 409,
+		message: 'This change is larger than it is labelled.',
+		help: 'Label it as what it is; widgets that use the calculator are checked again.'
+	},
+	'revision-superseded': {
+		status: 409,
+		message: 'Someone else has proposed a newer revision meanwhile.',
+		help: 'Open the newest one, and make your change on it.'
+	},
+	'vetting-out-of-order': {
+		status: 409,
+		message: 'This revision doesn’t stand where it could take this step.',
+		help: 'Reload the card to see where it stands.'
 	},
 	'store-away': {
 		status: 503,

@@ -17,6 +17,8 @@ export async function releaseOf(
 	const signedAt = new Date('2026-12-12T09:00:00Z');
 	return makeBundle({
 		frozen: freeze(document, catalogue),
+		calculators: catalogue,
+		houseCalculators: [],
 		slug,
 		releaseNumber,
 		releasedAt: new Date('2026-12-15T10:00:00Z'),

@@ -32,6 +32,59 @@ describe('calculate', () => {
 	});
 });
 
+describe('uncertainties, where they are asked for', () => {
+	const drop = { calculator: 'energy.drop', inputs: { mass_kg: 10, height_m: 5 } };
+
+	test('are told beside each value', () => {
+		// u(E) = m g u(h), g = 9.80665 m/s² (CGPM 1901).
+		expect(calculate({ ...drop, uncertainties: { height_m: 0.1 } })).toMatchObject({
+			outputs: {
+				energy: { value: 490.3325, unit: 'J', uncertainty: expect.closeTo(9.80665, 9) }
+			}
+		});
+		expect(calculate({ ...drop, uncertainties: {} })).toMatchObject({
+			outputs: { energy: { uncertainty: 'exact' } }
+		});
+	});
+
+	test('the age in a set keeps its published one; what rests on untied parameters says why it has none', () => {
+		const at = (set: string, z: number) =>
+			calculate({
+				calculator: 'cosmo.at_z',
+				inputs: { cosmology: { set }, z },
+				uncertainties: {}
+			});
+		// Planck 2018 VI, table 2: 13.787 ± 0.020 Gyr.
+		expect(at('Planck18', 0)).toMatchObject({ outputs: { age: { uncertainty: 0.02 } } });
+		expect(at('Planck15', 1)).toMatchObject({
+			outputs: { age: { uncertainty: 'not-available', note: expect.stringMatching(/\.$/) } }
+		});
+	});
+
+	test('a request without them is answered as it always was', () => {
+		expect(Object.keys(Object.values(outputsOf(calculate(drop)))[0]!)).toEqual(['value', 'unit']);
+	});
+
+	test.each([
+		[{ uncertainties: [] }, 'uncertainties-broken'],
+		[{ uncertainties: 0.1 }, 'uncertainties-broken'],
+		[{ correlations: [] }, 'uncertainties-broken'],
+		[{ uncertainties: {}, correlations: {} }, 'correlations-broken'],
+		[{ uncertainties: { height: 1 } }, 'unknown-input'],
+		[{ uncertainties: { height_m: -1 } }, 'uncertainty-broken'],
+		[{ uncertainties: { height_m: 1 }, correlations: [1] }, 'correlation-broken']
+	])('%o is refused as %s', (more, code) => {
+		expect(calculate({ ...drop, ...more })).toMatchObject({
+			refused: { code, message: expect.stringMatching(/[.?]$/) }
+		});
+	});
+
+	function outputsOf(answer: ReturnType<typeof calculate>) {
+		if ('refused' in answer) throw new Error(answer.refused.message);
+		return answer.outputs;
+	}
+});
+
 test('the description is plain JSON with inputs, outputs, units, ranges and sources', () => {
 	const described = describeCalculators();
 	expect(JSON.parse(JSON.stringify(described))).toEqual(described);

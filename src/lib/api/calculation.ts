@@ -7,7 +7,10 @@ import {
 	type CalculatorDefinition,
 	type InputSpec,
 	type Refusal,
+	type DrawnSpread,
+	type Reading,
 	type Result,
+	type Uncertainty,
 	type Validity,
 	type Warning
 } from '../physics/calculator.ts';
@@ -16,15 +19,29 @@ import { catalogue } from '../physics/calculators/index.ts';
 import { nearestOf } from '../physics/calculators/nearest.ts';
 import { runCalculator } from '../physics/calculators/run.ts';
 import { constants } from '../physics/constants/index.ts';
+import { runWithUncertainty } from '../physics/uncertainty/run-with-uncertainty.ts';
 
 export interface CalculationRequest {
 	calculator: string;
 	inputs: Record<string, unknown>;
+	/** Standard uncertainties by input key; given, even empty, the answer tells the outputs' uncertainties. */
+	uncertainties?: Record<string, number>;
+	/** `["cosmology.H0", "cosmology.Om0", -0.98]`: correlations of inputs that have uncertainties. */
+	correlations?: [string, string, number][];
+}
+
+export interface AnsweredReading {
+	value: number | string;
+	unit: string;
+	/** These three only when uncertainties were asked for: standard uncertainty in `unit`, how it was found, and its draws. */
+	uncertainty?: Uncertainty;
+	note?: string;
+	drawn?: DrawnSpread;
 }
 
 export type CalculationAnswer =
 	| {
-			outputs: Record<string, { value: number | string; unit: string }>;
+			outputs: Record<string, AnsweredReading>;
 			warnings: Warning[];
 			validity: Validity;
 			/** Present only when a declared output has no value for these inputs. */
@@ -37,14 +54,14 @@ export function calculate(request: unknown): CalculationAnswer {
 	if (!isRecord(request)) {
 		return refused('request-broken', 'A calculation is an object with “calculator” and “inputs”.');
 	}
-	const stray = Object.keys(request).find((key) => key !== 'calculator' && key !== 'inputs');
+	const stray = Object.keys(request).find((key) => !MEMBERS.includes(key));
 	if (stray !== undefined) {
 		return refused(
 			'request-broken',
-			`“${stray.slice(0, 40)}” isn't known here. Send “calculator” and “inputs” alone.`
+			`“${stray.slice(0, 40)}” isn't known here. Send “calculator” and “inputs”, and “uncertainties” and “correlations” where you want them carried.`
 		);
 	}
-	const { calculator: id, inputs } = request;
+	const { calculator: id, inputs, uncertainties, correlations } = request;
 	if (typeof id !== 'string') {
 		return refused(
 			'request-broken',
@@ -62,7 +79,44 @@ export function calculate(request: unknown): CalculationAnswer {
 	if (!isRecord(inputs)) {
 		return refused('inputs-broken', '“inputs” must be an object with one entry for each input.');
 	}
-	return answerOf(runCalculator(calculator, inputs));
+	if (uncertainties === undefined && correlations === undefined) {
+		return answerOf(runCalculator(calculator, inputs));
+	}
+	if (!isRecord(uncertainties)) {
+		return refused(
+			'uncertainties-broken',
+			'“uncertainties” must be an object with a standard uncertainty for each input that has one.'
+		);
+	}
+	if (correlations !== undefined && !Array.isArray(correlations)) {
+		return refused(
+			'correlations-broken',
+			'“correlations” must be a list such as [["cosmology.H0", "cosmology.Om0", -0.98]].'
+		);
+	}
+	return uncertainAnswerOf(
+		runWithUncertainty(calculator, inputs, { uncertainties, correlations: correlations ?? [] })
+	);
+}
+
+const MEMBERS = ['calculator', 'inputs', 'uncertainties', 'correlations'];
+
+function uncertainAnswerOf(result: Result): CalculationAnswer {
+	const answer = answerOf(result);
+	if (!result.ok || 'refused' in answer) return answer;
+	const outputs = Object.entries(result.outputs).map(
+		([key, { value, unit, uncertainty, uncertaintyNote, drawn }]: [string, Reading]) => [
+			key,
+			{
+				value,
+				unit,
+				uncertainty,
+				...(uncertaintyNote === undefined ? {} : { note: uncertaintyNote }),
+				...(drawn === undefined ? {} : { drawn })
+			}
+		]
+	);
+	return { ...answer, outputs: Object.fromEntries(outputs) };
 }
 
 /** A result as the public sees it: values and units, without the bench's bookkeeping. */

@@ -11,7 +11,7 @@ import {
 } from 'prosemirror-state';
 import { EditorView } from 'prosemirror-view';
 import { judgeClaims } from '../factcheck/judge.ts';
-import type { CalculatorSet } from '../physics/calculator.ts';
+import type { Calculator, CalculatorSet } from '../physics/calculator.ts';
 import { LiveWidget } from '../renderer/live-widget.svelte.ts';
 import type { Control, Step, WidgetDocument } from '../widget/document.ts';
 import { evaluate, type Evaluation } from '../widget/evaluate.ts';
@@ -19,6 +19,7 @@ import { MediaQuery } from 'svelte/reactivity';
 import { parseDocument, type Issue } from '../widget/parse.ts';
 import { claimPlaces, wordsAt, type ClaimPlace, type Words } from '../widget/places.ts';
 import type { QueryView } from '../workflow/piece.ts';
+import { mayCompose, type VettingState } from '../workflow/vetting.ts';
 import { benchReadings, sameRef, type BenchReading } from './bench-readings.ts';
 import { toDocument, toManuscript } from './convert.ts';
 import { createState } from './editor-state.ts';
@@ -46,6 +47,8 @@ export type BenchHeight = 'closed' | 'half' | 'full';
 export interface ManuscriptParts {
 	document: WidgetDocument;
 	calculators: CalculatorSet;
+	/** Where the house's own calculators stand in their vetting; the software's are vetted. */
+	states: Readonly<Record<string, VettingState>>;
 	readOnly: boolean;
 	/** Open queries on the newest proof. */
 	queries: readonly QueryView[];
@@ -80,6 +83,7 @@ export class Manuscript {
 	raised = $state<string | null>(null);
 
 	readonly calculators: CalculatorSet;
+	readonly #states: Readonly<Record<string, VettingState>>;
 	readonly readOnly: boolean;
 	readonly queries: readonly QueryView[];
 	readonly widget: LiveWidget;
@@ -93,6 +97,7 @@ export class Manuscript {
 
 	constructor(parts: ManuscriptParts) {
 		this.calculators = parts.calculators;
+		this.#states = parts.states;
 		this.readOnly = parts.readOnly;
 		this.queries = parts.queries;
 		this.#changed = parts.changed;
@@ -102,6 +107,15 @@ export class Manuscript {
 			() => this.document,
 			() => parts.calculators
 		);
+	}
+
+	vettingOf(calculatorId: string): VettingState {
+		return this.#states[calculatorId] ?? 'vetted';
+	}
+
+	/** The calculators that may be hung on the bench: what was superseded or withdrawn stays where it hangs, and is not offered. */
+	get offered(): Calculator[] {
+		return [...this.calculators.values()].filter(({ id }) => mayCompose(this.vettingOf(id)));
 	}
 
 	// What follows from the state

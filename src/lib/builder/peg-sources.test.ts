@@ -1,32 +1,49 @@
-import { describe, expect, test } from 'vitest';
+import { expect, test } from 'vitest';
 import { catalogue } from '../physics/calculators/index.ts';
-import { firstLight } from '../server/demo/first-light.ts';
+import type { Step } from '../widget/document.ts';
 import { evaluate } from '../widget/evaluate.ts';
 import { benchReadings } from './bench-readings.ts';
 import { readingsForPeg } from './peg-sources.ts';
 
-describe('readings a setting can be fed from', () => {
-	/** The age is far out of its range, so that the redshift is refused and the line has none. */
-	const steps = structuredClone(firstLight.steps);
-	const [age, line] = steps;
-	if (!age || !line) throw new Error('The demo has two calculators.');
-	age.settings.value = { from: 'fixed', value: -1 };
-	const readings = benchReadings(
-		{ steps, controls: [] },
-		evaluate({ ...firstLight, steps, controls: [] }, {}, catalogue),
-		catalogue
+const age = (value: number): Step => ({
+	id: 'age',
+	calculator: 'cosmo.inverse',
+	revision: '1.0.0',
+	settings: {
+		cosmology: { from: 'fixed', value: { set: 'Planck18' } },
+		kind: { from: 'fixed', value: 'z_from_age' },
+		value: { from: 'fixed', value }
+	}
+});
+const line: Step = {
+	id: 'line',
+	calculator: 'line.observe',
+	revision: '1.0.0',
+	settings: {
+		restFrequency_Hz: { from: 'fixed', value: 1420405751.768 },
+		z: { from: 'fixed', value: 20 }
+	}
+};
+
+function offered(steps: Step[], step: Step, unit: string): string[] {
+	const document = { steps, controls: [] };
+	const readings = benchReadings(document, evaluate(document, {}, catalogue), catalogue);
+	return readingsForPeg(document, step, unit, readings, catalogue).map(({ ref }) =>
+		'output' in ref ? `${ref.step} ${ref.output}` : ''
 	);
-	const offered = (unit: string) =>
-		readingsForPeg(steps, line, unit, readings, catalogue).map(({ ref }) => ref);
+}
 
-	test('are offered while they are refused, so that the tie can be mended', () => {
-		expect(readings.find(({ tag }) => tag === 'A')?.outcome.ok).toBe(false);
-		expect(offered('')).toContainEqual({ step: age.id, output: 'z' });
-	});
+test('readings whose unit fits are offered, refused ones too', () => {
+	expect(offered([age(0.18), line], line, '')).toContain('age z');
+	// Older than the Universe: refused, and still what the setting may be tied to.
+	expect(offered([age(200), line], line, '')).toContain('age z');
+	expect(offered([age(0.18), line], line, 'Hz')).toEqual([]);
+});
 
-	test('are never offered in a unit of another kind, or to what they feed on', () => {
-		expect(offered('MHz')).toEqual([]);
-		const back = readingsForPeg(steps, age, 'MHz', readings, catalogue);
-		expect(back).toEqual([]);
-	});
+test('what feeds on the step itself is never offered', () => {
+	const fed: Step = {
+		...line,
+		settings: { ...line.settings, z: { from: 'reading', step: 'age', output: 'z' } }
+	};
+	expect(offered([age(0.18), fed], age(0.18), 'Hz')).toEqual([]);
 });

@@ -1,7 +1,7 @@
 /** What a peg can be fed from: readings and sliders in units that convert, and never a ring. */
 import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
 import { commensurable, units, type Unit } from '../physics/units/units.ts';
-import type { Control, SettingSource, Step } from '../widget/document.ts';
+import type { Control, SettingSource, Step, WidgetDocument } from '../widget/document.ts';
 import { wiringOf } from '../widget/graph.ts';
 import { fixedSettings, unitOfRef } from '../widget/tie-units.ts';
 import type { BenchReading } from './bench-readings.ts';
@@ -18,9 +18,9 @@ export function unitsLike(symbol: string): readonly Unit[] {
 	return units.filter((unit) => unit.symbol !== '' && commensurable(unit.symbol, symbol));
 }
 
-/** By the units the wiring has: a reading that is refused at this moment can be tied, or its calculator couldn't be mended. */
+/** By the units that the wiring brings, so that a reading which is refused just now can be tied all the same. */
 export function readingsForPeg(
-	steps: readonly Step[],
+	document: Pick<WidgetDocument, 'steps' | 'controls'>,
 	step: Step,
 	unit: string,
 	readings: readonly BenchReading[],
@@ -28,8 +28,8 @@ export function readingsForPeg(
 ): BenchReading[] {
 	return readings.filter(({ ref, tag }) => {
 		if (tag === '' || 'control' in ref || !('output' in ref)) return false;
-		if (wiringOf(steps, ref).steps.some(({ id }) => id === step.id)) return false;
-		const own = unitOfRef({ steps: [...steps], controls: [] }, ref, calculators);
+		if (wiringOf(document.steps, ref).steps.some(({ id }) => id === step.id)) return false;
+		const own = unitOfRef(document, ref, calculators);
 		return own !== null && commensurable(own, unit);
 	});
 }

@@ -5,6 +5,7 @@ import { commensurable } from '../physics/units/units.ts';
 import type { CalculatorSet } from '../physics/calculator.ts';
 import type { WidgetDocument } from '../widget/document.ts';
 import { readingAt, type Evaluation } from '../widget/evaluate.ts';
+import { readingWithUncertainty } from '../widget/evaluate-uncertainty.ts';
 import { liveStated } from '../widget/places.ts';
 import { printStated, type Stated } from '../widget/stated.ts';
 import type { NumberInCopy } from './quantities.ts';
@@ -31,7 +32,8 @@ export function weighedWords(home: Home, number: NumberInCopy): WeighedWords | n
 	if (!claim || claim.form === 'exempt') return null;
 	const { document, calculators } = home;
 	const evaluation = claim.form === 'live' ? home.widget.evaluation : home.firstEvaluation;
-	const outcome = readingAt(document, evaluation, claim.reading, calculators);
+	const read = claim.form === 'live' ? readingAt : readingWithUncertainty;
+	const outcome = read(document, evaluation, claim.reading, calculators);
 	const stated =
 		claim.form === 'live'
 			? liveStated(document, evaluation, claim.id, calculators)

@@ -5,6 +5,7 @@ import {
 	type Calculator,
 	type CalculatorSet
 } from '../physics/calculator.ts';
+import { catalogue } from '../physics/calculators/index.ts';
 import type { Claim, Control, Inline, WidgetDocument } from '../widget/document.ts';
 import { judgeClaims } from './judge.ts';
 import { settingsOf } from './trials.ts';
@@ -263,5 +264,35 @@ describe('what a reader sees is what is weighed', () => {
 		];
 		const verdict = judgeClaims(documentOf(content, [live, stated]), calculators).get('it');
 		expect(verdict).toMatchObject({ verdict: 'tips' });
+	});
+});
+
+describe('the uncertainty behind stated words', () => {
+	/** “nearly 14 billion years” on the age in Planck 2018 at a redshift, in a block of this kind. */
+	const ageOf = (z: number, set = 'Planck18'): WidgetDocument => ({
+		...documentOf(
+			[{ kind: 'claim', claim: 'it', text: 'nearly 14 billion years' }],
+			[{ id: 'it', form: 'stated', reading: { step: 'now', output: 'age' } }]
+		),
+		steps: [
+			{
+				id: 'now',
+				calculator: 'cosmo.at_z',
+				revision: '1.0.0',
+				settings: {
+					cosmology: { from: 'fixed', value: { set } },
+					z: { from: 'fixed', value: z }
+				}
+			}
+		]
+	});
+
+	// 13.787 ± 0.020 Gyr (Planck 2018 VI, table 2). With H₀ and Ωₘ as independent u would be 0.11, and the words would lean.
+	test.each([0, 1e-9])('the age at redshift %d stays on its side of 14', (z) => {
+		expect(judgeClaims(ageOf(z), catalogue).get('it')?.verdict).toBe('level');
+	});
+
+	test('where it can’t be carried, the direction isn’t established', () => {
+		expect(judgeClaims(ageOf(1e-9, 'Planck15'), catalogue).get('it')?.verdict).toBe('leans');
 	});
 });

@@ -3,6 +3,7 @@ import type { CalculatorSet } from '../physics/calculator.ts';
 import { commensurable } from '../physics/units/units.ts';
 import type { Claim, Control, ControlValues, WidgetDocument } from '../widget/document.ts';
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
+import { readingWithUncertainty } from '../widget/evaluate-uncertainty.ts';
 import { claimPlaces, liveStated, type ClaimPlace } from '../widget/places.ts';
 import type { Stated } from '../widget/stated.ts';
 import { decide, unweighed, type Decision } from './decide.ts';
@@ -109,12 +110,16 @@ function judgeStated(
 	calculators: CalculatorSet
 ): Verdict {
 	const found = quantityInPlace(document, place);
-	const weighAt = (values: ControlValues) =>
-		weighWords(found, readingAt(document, evaluated(values), claim.reading, calculators));
-	const start = weighAt({});
+	const weighAt = (values: ControlValues, draws: boolean) =>
+		weighWords(
+			found,
+			readingWithUncertainty(document, evaluated(values), claim.reading, calculators, { draws })
+		);
+	const start = weighAt({}, true);
 	const suggestions = start.stated ? suggestWordings(start.stated, start.reading) : [];
+	// Draws take their time, so the many settings along a slider make do with the straight line.
 	const worst = moves(document, place)
-		? worstOf(tryThroughout(document, claim.reading, (values) => weighAt(values).decision))
+		? worstOf(tryThroughout(document, claim.reading, (values) => weighAt(values, false).decision))
 		: null;
 	if (!worst || rank(worst.decision) <= rank(start.decision)) {
 		return { ...start.decision, suggestions };

@@ -33,12 +33,25 @@ export type Validity = 'ok' | 'approximate' | 'outside';
 /** Standard uncertainty in the reading's own unit, or a statement why there is no number. */
 export type Uncertainty = number | 'exact' | 'not-available';
 
+/** What many seeded draws of the inputs made of a reading, in its unit. */
+export interface DrawnSpread {
+	median: number;
+	/** Ends of the central 95 per cent. */
+	low: number;
+	high: number;
+	draws: number;
+}
+
 /** One output of a calculator. Text outputs (a band's name) have a string value and no unit. */
 export interface Reading {
 	value: number | string;
 	unit: string;
 	quantity: QuantityKind;
 	uncertainty: Uncertainty;
+	/** How the uncertainty was found, or why there is none; only where it was asked for (`uncertainty/`). */
+	uncertaintyNote?: string;
+	/** Where the spread is lopsided: the middle and the central 95 per cent of seeded draws, in the reading's unit. */
+	drawn?: DrawnSpread;
 }
 
 export type Result =
@@ -204,6 +217,11 @@ export interface CalculatorDefinition {
 	/** Groups of inputs of which exactly one is given. */
 	oneOf?: string[][];
 	outputs: Record<string, OutputSpec>;
+	/**
+	 * Outputs that nothing but the parameters of the universe makes uncertain, so that their uncertainty follows from the
+	 * parameter set's. One given by `compute` for such an output is the published one, and stands.
+	 */
+	restsOnCosmology?: readonly string[];
 	equations: { tex: string; says: string }[];
 	assumptions: string[];
 	warnings: WarningSpec[];
@@ -242,6 +260,10 @@ export function defineCalculator(definition: CalculatorDefinition): Calculator {
 	const companions = Object.values(definition.inputs).flatMap((input) =>
 		input.kind === 'number' && input.neededWith ? [input.neededWith] : []
 	);
+	for (const key of definition.restsOnCosmology ?? []) {
+		if (!Object.hasOwn(definition.outputs, key))
+			throw new Error(`${definition.id}: no output “${key}”`);
+	}
 	for (const key of [...(definition.oneOf ?? []).flat(), ...companions]) {
 		if (!Object.hasOwn(definition.inputs, key))
 			throw new Error(`${definition.id}: no input “${key}”`);

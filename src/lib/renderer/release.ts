@@ -1,4 +1,5 @@
 /** What a frame is made from: one release, whole. It travels inside the frame's document. */
+import type { HouseDefinition } from '../physics/house/definition.ts';
 import type { WidgetDocument } from '../widget/document.ts';
 import type { ClaimRecords } from './records.ts';
 
@@ -21,6 +22,8 @@ export interface FrameRelease extends Released {
 	/** Where the piece's public page is; '' for the frame's own host. */
 	origin: string;
 	document: WidgetDocument;
+	/** The house's own calculators that it uses, as plain trees; built where they run. */
+	houseCalculators: readonly HouseDefinition[];
 	/** SHA-256 of the frozen proof, in hex. */
 	digest: string;
 }

@@ -7,6 +7,7 @@ import {
 	refuse,
 	resolveUnit,
 	type CalculatorSet,
+	type Calculator,
 	type InputSpec,
 	type NumberInput,
 	type RawInputs,
@@ -39,20 +40,32 @@ export interface Evaluation {
 
 export type ReadingOutcome = { ok: true; reading: Reading } | { ok: false; refusal: Refusal };
 
-type Wired = Pick<WidgetDocument, 'steps' | 'controls'>;
+export type Wired = Pick<WidgetDocument, 'steps' | 'controls'>;
+
+/** Works one step on inputs that its settings came to; `evaluateUncertainty` puts its own in place of the plain one. */
+export type RunStep = (
+	step: Step,
+	calculator: Calculator,
+	inputs: RawInputs,
+	uncertainties: Readonly<Record<string, Uncertainty>>
+) => Result;
+
+const runPlainly: RunStep = (_step, calculator, inputs, uncertainties) =>
+	runCalculator(calculator, inputs, uncertainties);
 
 /** Works every step in order. Values outside a control's range are brought to its nearest end. */
 export function evaluate(
 	document: Wired,
 	values: ControlValues,
-	calculators: CalculatorSet
+	calculators: CalculatorSet,
+	run: RunStep = runPlainly
 ): Evaluation {
 	const settled = settleValues(document.controls, values);
 	const order = orderSteps(document.steps);
 	const results: Record<string, Result> = {};
 	for (const step of order.ok ? order.steps : document.steps) {
 		results[step.id] = order.ok
-			? evaluateStep(step, document, settled, results, calculators)
+			? evaluateStep(step, document, settled, results, calculators, run)
 			: refuse('wiring', 'The calculators on the bench are wired in a ring.');
 	}
 	return { values: settled, steps: results };
@@ -75,7 +88,8 @@ function evaluateStep(
 	document: Wired,
 	values: ControlValues,
 	results: Record<string, Result>,
-	calculators: CalculatorSet
+	calculators: CalculatorSet,
+	run: RunStep
 ): Result {
 	const calculator = calculators.get(step.calculator);
 	if (!calculator)
@@ -91,7 +105,7 @@ function evaluateStep(
 		assign(inputs, key, outcome.value);
 		if (outcome.uncertainty !== undefined) uncertainties[head] = outcome.uncertainty;
 	}
-	return runCalculator(calculator, inputs, uncertainties);
+	return run(step, calculator, inputs, uncertainties);
 }
 
 /** Choices first: a number's unit may hang on one (`energy.convert`, `cosmo.inverse`). Whole objects before their parts. */

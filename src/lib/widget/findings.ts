@@ -3,6 +3,7 @@ import type { CalculatorSet } from '../physics/calculator.ts';
 import { isTextBlock, type ChartBlock, type WidgetDocument } from './document.ts';
 import { evaluate, readingAt } from './evaluate.ts';
 import { gridProblem } from './grid.ts';
+import { pinnedLineFindings } from './pinned-lines.ts';
 import { blockText, tokenWords } from './places.ts';
 
 export interface Finding {
@@ -18,7 +19,8 @@ export function findings(document: WidgetDocument, calculators: CalculatorSet): 
 		...wordFindings(document),
 		...document.blocks.flatMap((block) => (block.kind === 'chart' ? chartFindings(block) : [])),
 		...controlFindings(document),
-		...readingFindings(document, calculators)
+		...readingFindings(document, calculators),
+		...pinnedLineFindings(document, calculators)
 	];
 }
 

@@ -48,6 +48,11 @@ describe('what is broken is named', () => {
 
 	test.each<[string, (document: WidgetDocument) => unknown, RegExp]>([
 		[
+			'a constants edition the house doesn’t have',
+			(d) => ({ ...d, constants: '2030.9' }),
+			/no constants edition “2030.9”. It has 2026.1/
+		],
+		[
 			'an unknown unit',
 			(d) => ({ ...d, controls: [{ ...d.controls[0], unit: 'furlong-ish' }] }),
 			/no unit of the house/
@@ -82,22 +87,6 @@ describe('what is broken is named', () => {
 				blocks: d.blocks.map((b) => (b.kind === 'chart' ? { ...b, y: { ...b.y, unit: 'm' } } : b))
 			}),
 			/can’t be printed in m/
-		],
-		[
-			'a made-up value under a line’s name',
-			(d) => {
-				d.steps[1]!.settings.restFrequency_Hz = { from: 'line', line: 'hi-21cm', value: 1e9 };
-				return d;
-			},
-			/another value in the catalogue/
-		],
-		[
-			'an unknown line',
-			(d) => {
-				d.steps[1]!.settings.restFrequency_Hz = { from: 'line', line: 'no-such', value: 1e9 };
-				return d;
-			},
-			/no line “no-such”/
 		],
 		[
 			'an output named after the language’s own',
@@ -143,5 +132,17 @@ test('an empty sheet parses, and says what it lacks', () => {
 		'no-title',
 		'no-point',
 		'no-copy'
+	]);
+});
+
+test.each([
+	['hi-21cm', 1e9, /another value in the catalogue/],
+	['no-such', 1420405751.768, /no line “no-such”/]
+])('a made-up number under the name of line %s holds a proof back', (line, value, says) => {
+	const named = structuredClone(firstLight);
+	named.steps[1]!.settings.restFrequency_Hz = { from: 'line', line, value };
+	expect(parseDocument(named, catalogue).ok).toBe(true);
+	expect(findings(named, catalogue)).toEqual([
+		expect.objectContaining({ code: 'line-moved', says: expect.stringMatching(says) })
 	]);
 });

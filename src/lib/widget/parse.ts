@@ -3,13 +3,8 @@
  * there, no ring on the bench, every setting one its calculator has and every tie between commensurable units.
  * Drafts may be incomplete (see findings.ts); they may not be broken.
  */
-import {
-	resolveUnit,
-	type Calculator,
-	type CalculatorSet,
-	type InputSpec
-} from '../physics/calculator.ts';
-import { lineById, restValue } from '../physics/lines/catalogue.ts';
+import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
+import { edition, editions } from '../physics/constants/index.ts';
 import { commensurable, unitOf } from '../physics/units/units.ts';
 import {
 	DOCUMENT_VERSION,
@@ -43,7 +38,11 @@ export function parseDocument(stored: unknown, calculators: CalculatorSet): Pars
 			issues: shaped.error.issues.map(({ path, message }) => ({ path: path.join('.'), message }))
 		};
 	}
-	const issues = [...idIssues(shaped.data), ...wiringIssues(shaped.data, calculators)];
+	const issues = [
+		...editionIssues(shaped.data),
+		...idIssues(shaped.data),
+		...wiringIssues(shaped.data, calculators)
+	];
 	return issues.length > 0 ? { ok: false, issues } : { ok: true, document: shaped.data };
 }
 
@@ -69,6 +68,18 @@ function lift(stored: unknown): Lifted {
 
 function broken(path: string, message: string): { ok: false; issues: Issue[] } {
 	return { ok: false, issues: [{ path, message }] };
+}
+
+/** A piece pins an edition that this house has; there is nothing to work it with otherwise. */
+function editionIssues({ constants }: WidgetDocument): Issue[] {
+	return edition(constants)
+		? []
+		: [
+				{
+					path: 'constants',
+					message: `This house has no constants edition “${constants}”. It has ${Object.keys(editions).join(', ')}.`
+				}
+			];
 }
 
 /** Ids are unique in their kind, and every claim entry stands exactly once in the copy. */
@@ -184,7 +195,6 @@ function settingIssue(
 	if (!spec || (part !== undefined && spec.kind !== 'cosmology')) {
 		return `${calculator.title} has no setting “${key}”.`;
 	}
-	if (source.from === 'line') return lineIssue(source, spec, step);
 	const unit = sourceUnit(source, document, calculators);
 	if (unit === 'missing-control') return `The control of “${spec.label}” isn’t in the piece.`;
 	if (unit === 'missing-output') return `The reading tied to “${spec.label}” doesn’t exist.`;
@@ -194,28 +204,6 @@ function settingIssue(
 		? null
 		: `“${spec.label}” is in ${wanted || 'plain numbers'} and can’t take a value in ${unit.unit || 'plain numbers'}.`;
 }
-
-/** A pinned line says whose number it is, so it must be that number. */
-function lineIssue(
-	source: Extract<SettingSource, { from: 'line' }>,
-	spec: InputSpec,
-	step: Step
-): string | null {
-	const line = lineById(source.line);
-	if (!line) return `The catalogue has no line “${source.line}”.`;
-	if (spec.kind !== 'number' || !LINE_QUANTITIES.has(spec.quantity)) {
-		return `“${spec.label}” can’t take a line of the catalogue.`;
-	}
-	const value = restValue(line, resolveUnit(spec.unit, fixedSettings(step)));
-	return Math.abs(value / source.value - 1) < ROUNDING
-		? null
-		: `${line.label} has another value in the catalogue now: choose the line anew.`;
-}
-
-/** Converting a line's own value to the setting's unit may cost the last bit. */
-const ROUNDING = 1e-14;
-
-const LINE_QUANTITIES: ReadonlySet<string> = new Set(['wavelength', 'frequency', 'photon-energy']);
 
 function sourceUnit(
 	source: SettingSource,

@@ -19,6 +19,8 @@ export interface ProofPeople {
 /** What the actions are about; a piece without a proof has `proof: null`. */
 export interface Resource {
 	proof: ProofPeople | null;
+	/** Who proposed the revision of a calculator. */
+	proposer?: string;
 }
 
 export const ACTIONS = [
@@ -32,11 +34,19 @@ export const ACTIONS = [
 	'answer-query',
 	'pass-proof',
 	'release-proof',
-	'read-calculators'
+	'read-calculators',
+	'propose-calculator',
+	'vet-calculator',
+	'withdraw-calculator'
 ] as const;
 export type Action = (typeof ACTIONS)[number];
 
-type Rule = { roles: readonly Role[]; apart?: (actor: Actor, proof: ProofPeople) => boolean };
+interface Rule {
+	roles: readonly Role[];
+	apart?: (actor: Actor, proof: ProofPeople) => boolean;
+	/** Not for whoever proposed what it is about. */
+	second?: true;
+}
 
 const notWriter = (actor: Actor, proof: ProofPeople) => !proof.writers.includes(actor.personId);
 const neitherWriterNorChecker = (actor: Actor, proof: ProofPeople) =>
@@ -54,10 +64,13 @@ const RULES: Record<Action, Rule> = {
 	'answer-query': { roles: ['writer', 'scientist', 'editor'] },
 	'pass-proof': { roles: ['editor'], apart: neitherWriterNorChecker },
 	'release-proof': { roles: ['editor'], apart: neitherWriterNorChecker },
-	'read-calculators': { roles: ['writer', 'scientist', 'editor', 'admin'] }
+	'read-calculators': { roles: ['writer', 'scientist', 'editor', 'admin'] },
+	'propose-calculator': { roles: ['scientist'] },
+	'vet-calculator': { roles: ['scientist'], second: true },
+	'withdraw-calculator': { roles: ['scientist'] }
 };
 
-export type Denial = 'not-permitted' | 'same-person-twice';
+export type Denial = 'not-permitted' | 'same-person-twice' | 'own-proposal';
 
 /** Null when the actor may; otherwise why not. */
 export function denial(
@@ -69,6 +82,7 @@ export function denial(
 	if (!actor.roles.some((role) => rule.roles.includes(role))) return 'not-permitted';
 	if (rule.apart && resource.proof && !rule.apart(actor, resource.proof))
 		return 'same-person-twice';
+	if (rule.second && resource.proposer === actor.personId) return 'own-proposal';
 	return null;
 }
 

@@ -28,7 +28,8 @@ type Checked<T> = { ok: true; value: T } | { ok: false; refusal: Refusal };
  * Runs a calculator on raw inputs, numbers in the declared units.
  *
  * `uncertainties` tells what is known of inputs that come from another reading (absent means exact, as a setting is).
- * Until uncertainties are carried through, an input that isn't exact leaves no output exact.
+ * An input that isn't exact leaves no output exact; numbers are carried by `uncertainty/run-with-uncertainty.ts`, which
+ * works a calculator many times over and so isn't for every move of a slider.
  */
 export function runCalculator(
 	calculator: Calculator,

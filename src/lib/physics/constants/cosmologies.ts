@@ -12,14 +12,28 @@ export interface CosmologySet {
 	Neff: number;
 	/** eV, one for each species; a single value stands for all species. */
 	m_nu: readonly number[];
-	/** Standard uncertainties as published; null where the numbers are a convention. */
+	/** What was published of its age and how well it is known; null where the numbers are a convention. */
 	published: {
 		ageGyr: number;
 		ageUncertaintyGyr: number;
-		H0Uncertainty: number;
+		uncertainties: ParameterUncertainties;
+		/**
+		 * Correlation of H₀ with Ωₘ in the fit. The two are strongly tied, so without it nothing that rests on both has an
+		 * honest uncertainty: null where the house doesn't hold it.
+		 */
+		correlation: { H0WithOm0: number; source: string } | null;
 		note: string;
 	} | null;
 	source: string;
+}
+
+/** Standard uncertainties of a set's parameters, in their own units. What isn't here is a choice of the model. */
+export interface ParameterUncertainties {
+	/** km/s/Mpc */
+	H0: number;
+	Om0?: number;
+	/** K */
+	Tcmb0?: number;
 }
 
 export const cosmologySets = {
@@ -34,8 +48,9 @@ export const cosmologySets = {
 		published: {
 			ageGyr: 13.787,
 			ageUncertaintyGyr: 0.02,
-			H0Uncertainty: 0.42,
-			note: 'Age and H₀ as printed in table 2, last column.'
+			uncertainties: { H0: 0.42, Om0: 0.0056, Tcmb0: 0.0006 },
+			correlation: { H0WithOm0: -0.98, source: 'from memory, about −0.98' },
+			note: 'Age, H₀ and Ωₘ as printed in table 2, last column; the background’s temperature from Fixsen 2009, ApJ 707, 916 (from memory), measured apart from the rest.'
 		},
 		source:
 			'Planck Collaboration 2020, Planck 2018 results VI, A&A 641, A6, table 2, last column (TT,TE,EE+lowE+lensing+BAO), doi:10.1051/0004-6361/201833910'
@@ -51,8 +66,9 @@ export const cosmologySets = {
 		published: {
 			ageGyr: 13.799,
 			ageUncertaintyGyr: 0.021,
-			H0Uncertainty: 0.46,
-			note: 'Uncertainties from memory.'
+			uncertainties: { H0: 0.46 },
+			correlation: null,
+			note: 'Uncertainties from memory; how H₀ and Ωₘ move together isn’t held.'
 		},
 		source:
 			'Planck Collaboration 2016, Planck 2015 results XIII, A&A 594, A13, table 4, doi:10.1051/0004-6361/201525830'
@@ -68,8 +84,9 @@ export const cosmologySets = {
 		published: {
 			ageGyr: 13.7965,
 			ageUncertaintyGyr: 0.037,
-			H0Uncertainty: 0.77,
-			note: 'Uncertainties from memory.'
+			uncertainties: { H0: 0.77 },
+			correlation: null,
+			note: 'Uncertainties from memory; how H₀ and Ωₘ move together isn’t held.'
 		},
 		source:
 			'Planck Collaboration 2014, Planck 2013 results XVI, A&A 571, A16, table 5, doi:10.1051/0004-6361/201321591'
@@ -85,8 +102,9 @@ export const cosmologySets = {
 		published: {
 			ageGyr: 13.772,
 			ageUncertaintyGyr: 0.059,
-			H0Uncertainty: 0.8,
-			note: 'Uncertainties from memory.'
+			uncertainties: { H0: 0.8 },
+			correlation: null,
+			note: 'Uncertainties from memory; how H₀ and Ωₘ move together isn’t held.'
 		},
 		source: 'Hinshaw et al. 2013, ApJS 208, 19, table 4, doi:10.1088/0067-0049/208/2/19'
 	},

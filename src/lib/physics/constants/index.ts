@@ -4,12 +4,10 @@
  */
 import { iauNominal } from './astronomy.ts';
 import { codata2018 } from './codata-2018.ts';
-import { codata2022 } from './codata-2022.ts';
 import { cosmologySets } from './cosmologies.ts';
 
 export type { Constant } from './constant.ts';
 export type { CosmologySet, CosmologySetName } from './cosmologies.ts';
-export { codata2022 };
 
 export interface ConstantsEdition {
 	name: string;
@@ -36,3 +34,8 @@ export const EDITION_IN_USE = '2026.1';
 
 /** The constants every calculator computes with. */
 export const constants: ConstantsEdition = editions[EDITION_IN_USE];
+
+/** The edition of this name; a widget pins one by its name. */
+export function edition(name: string): ConstantsEdition | undefined {
+	return Object.hasOwn(editions, name) ? editions[name as keyof typeof editions] : undefined;
+}

@@ -34,3 +34,6 @@ export function gaussLegendre(count: number): readonly Node[] {
 
 /** 64 nodes: about 1e-14 relative for every integral of an expanding universe in the variables used there. */
 export const GL64 = gaussLegendre(64);
+
+/** 6 nodes, for short steps. */
+export const GL6 = gaussLegendre(6);

@@ -61,3 +61,13 @@ export async function connect(client: PGlite, migrations: string): Promise<Db> {
 	await migrate(db, { migrationsFolder: migrations });
 	return db;
 }
+
+/** SQLSTATE of a refused statement, or undefined: Drizzle wraps the driver's error. */
+export function sqlState(error: unknown): string | undefined {
+	const cause = error instanceof Error && error.cause ? error.cause : error;
+	return cause instanceof Error && 'code' in cause && typeof cause.code === 'string'
+		? cause.code
+		: undefined;
+}
+
+export const UNIQUE_VIOLATION = '23505';

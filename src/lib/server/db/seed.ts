@@ -16,6 +16,7 @@ import { addPerson, readActor } from '../services/people.ts';
 import { createPiece, emptyDocument, getPiece, listPieces, saveDraft } from '../services/pieces.ts';
 import { passConditions, passProof, pullProof } from '../services/proofs.ts';
 import { releaseProof } from '../services/releases.ts';
+import { signWhatCame } from '../services/vettings.ts';
 import { people } from './schema/index.ts';
 
 export type Seed = 'none' | 'people' | 'demo';
@@ -50,6 +51,7 @@ const DEMO_PIECES: DemoPiece[] = [
 export async function seed(fixtures: Fixtures, what: Seed): Promise<void> {
 	if (what === 'none') return;
 	const ids = await seedPeople(fixtures);
+	await signWhatCame(fixtures, new Date(), [ids.mateus, ids.ama]);
 	if (what === 'people') return;
 	for (const piece of DEMO_PIECES) await seedPiece(fixtures, ids, piece);
 }

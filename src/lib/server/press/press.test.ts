@@ -49,6 +49,8 @@ function print(document: WidgetDocument): Promise<Bundle> {
 	const signedAt = new Date('2026-12-12T09:00:00Z');
 	return makeBundle({
 		frozen: freeze(document, catalogue),
+		calculators: catalogue,
+		houseCalculators: [],
 		slug: 'first-light',
 		releaseNumber: 3,
 		releasedAt: new Date('2026-12-15T23:30:00Z'),
@@ -176,6 +178,8 @@ test('a folder without a build says how to make one', async () => {
 	await expect(
 		makeBundle({
 			frozen: empty,
+			calculators: catalogue,
+			houseCalculators: [],
 			slug: 'a',
 			releaseNumber: 1,
 			releasedAt: new Date(0),

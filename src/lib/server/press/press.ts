@@ -2,8 +2,8 @@
 import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { render } from 'svelte/server';
-import type { Calculator } from '../../physics/calculator.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
+import type { Calculator, CalculatorSet } from '../../physics/calculator.ts';
+import type { HouseDefinition } from '../../physics/house/definition.ts';
 import type { ClaimRecords } from '../../renderer/records.ts';
 import Frame from '../../renderer/Frame.svelte';
 import type { FrameRelease } from '../../renderer/release.ts';
@@ -20,6 +20,10 @@ export type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
 
 export interface BundleInput {
 	frozen: Frozen;
+	/** All that the house works with. */
+	calculators: CalculatorSet;
+	/** The house's own among them, as data; the frame carries those the piece uses. */
+	houseCalculators: readonly HouseDefinition[];
 	slug: string;
 	releaseNumber: number;
 	releasedAt: Date;
@@ -40,8 +44,12 @@ export interface BundleInput {
 export async function makeBundle(input: BundleInput): Promise<Bundle> {
 	const { frozen, slug, pressFolder } = input;
 	const press = await readManifest(pressFolder);
-	const used = frozen.calculators.map(({ id }) => calculatorOf(id));
-	const scripts = used.map((calculator) => scriptOf(press, calculator));
+	const used = frozen.calculators.map(({ id }) => calculatorOf(id, input.calculators));
+	const ids = new Set(used.map(({ id }) => id));
+	const houseCalculators = input.houseCalculators.filter(({ id }) => ids.has(id));
+	const ownIds = new Set(houseCalculators.map(({ id }) => id));
+	const builtIn = used.filter(({ id }) => !ownIds.has(id));
+	const scripts = builtIn.map((calculator) => scriptOf(press, calculator));
 	const css = await readFile(join(pressFolder, press.style), 'utf8');
 
 	const release: FrameRelease = {
@@ -53,7 +61,8 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		document: frozen.document,
 		digest: frozen.digest,
 		records: input.records,
-		curves: curvesOf(frozen.document)
+		curves: curvesOf(frozen.document, input.calculators),
+		houseCalculators
 	};
 	const calculators = new Map(used.map((calculator) => [calculator.id, calculator]));
 	const address = (name: string) => `/press/${name}`;
@@ -65,7 +74,7 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		ahead: namesOf([{ file: '', imports: press.frame.imports }, ...scripts]).map(address),
 		copyFace: address(press.copyFace),
 		calculators: Object.fromEntries(
-			used.map(({ id }, index) => [id, address(scripts[index]?.file ?? '')])
+			builtIn.map(({ id }, index) => [id, address(scripts[index]?.file ?? '')])
 		)
 	});
 
@@ -92,11 +101,11 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 /** Figures kept of a drawn line: a thousandth of a pixel in any frame. */
 const CURVE_FIGURES = 7;
 
-function curvesOf(document: WidgetDocument): FrameRelease['curves'] {
+function curvesOf(document: WidgetDocument, calculators: CalculatorSet): FrameRelease['curves'] {
 	const charts = document.blocks.filter((block) => block.kind === 'chart');
 	const rounded = ({ y }: ChartPoint) => (y === null ? null : Number(y.toPrecision(CURVE_FIGURES)));
 	return Object.fromEntries(
-		charts.map((chart) => [chart.id, sampleChart(document, {}, chart, catalogue).map(rounded)])
+		charts.map((chart) => [chart.id, sampleChart(document, {}, chart, calculators).map(rounded)])
 	);
 }
 
@@ -118,9 +127,9 @@ function manifestOf(
 	};
 }
 
-function calculatorOf(id: string): Calculator {
-	const calculator = catalogue.get(id);
-	if (!calculator) throw new Error(`The catalogue has no calculator ${id}.`);
+function calculatorOf(id: string, calculators: CalculatorSet): Calculator {
+	const calculator = calculators.get(id);
+	if (!calculator) throw new Error(`The house has no calculator ${id}.`);
 	return calculator;
 }
 

@@ -2,6 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 import { openTestDatabase, type TestDatabase } from '../../../../tests/support/database.ts';
 import { contentOf, Desk, reword, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
+import { catalogue } from '../../physics/calculators/index.ts';
 import { firstLight } from '../demo/first-light.ts';
 import { daybook, outbox, signatures } from '../db/schema/index.ts';
 import { signClaim, takeBackSignature } from './claims.ts';
@@ -379,7 +380,7 @@ describe('passing', () => {
 			}
 			const proofId = await desk.toProof(changed);
 			const { id: pieceId } = await desk.piece();
-			const { claims } = examine(changed);
+			const { claims } = examine(changed, catalogue);
 			await office.db.insert(signatures).values(
 				claims.map(({ claim, cover, coverHash, sentence }) => ({
 					pieceId,

@@ -1,7 +1,6 @@
 /** The public account of a released piece: its text, its makers, how each number was checked. Needs no session. */
 import { desc, eq } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
 import type { ReleaseView } from '../../workflow/piece.ts';
 import type { Context } from '../context.ts';
 import type { Db } from '../db/client.ts';
@@ -12,6 +11,7 @@ import { readDossier } from './dossier.ts';
 import { nameBook } from './people.ts';
 import { makersOf, namedBy, signingsOf } from './release-makers.ts';
 import { standingOf } from './standing.ts';
+import { readStock } from './stock.ts';
 import { readStored } from './stored-document.ts';
 
 export interface Colophon {
@@ -52,7 +52,7 @@ export async function readColophon({ db }: Pick<Context, 'db'>, slug: string): P
 	};
 }
 
-/** For releases from before accounts were kept: worked out with the calculators of today. */
+/** For releases from before accounts were kept: worked out with the revisions that ran when it went out. */
 async function accountAnew(db: Db, slug: string, releaseId: string): Promise<PublicAccount> {
 	const dossier = await readDossier(db, { slug });
 	const [row] = await db
@@ -61,14 +61,16 @@ async function accountAnew(db: Db, slug: string, releaseId: string): Promise<Pub
 		.innerJoin(proofs, eq(proofs.id, releases.proofId))
 		.where(eq(releases.id, releaseId));
 	if (!dossier || !row) throw new Error(`A release of ${slug} has lost its proof.`);
-	const document = readStored(row.release.document);
-	const standing = standingOf(dossier, { ...row.proof, document }, row.release.releasedAt);
+	const at = row.release.releasedAt;
+	const stock = await readStock(db, at);
+	const document = readStored(row.release.document, stock.calculators);
+	const standing = standingOf({ ...dossier, stock }, { ...row.proof, document }, at);
 	const editor = row.proof.passedBy ?? row.release.releasedBy;
 	const names = await nameBook(db, namedBy(standing, editor));
 	return accountOf(
 		document,
-		catalogue,
-		recordsOf(document, catalogue, signingsOf(standing, names)),
+		stock.calculators,
+		recordsOf(document, stock.calculators, signingsOf(standing, names)),
 		makersOf(standing, editor, names)
 	);
 }

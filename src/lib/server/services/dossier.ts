@@ -5,6 +5,8 @@ import type { Db } from '../db/client.ts';
 import { pieces, pieceWriters, proofs, queries, releases, signatures } from '../db/schema/index.ts';
 import { readStored } from './stored-document.ts';
 
+import { readStock, type Stock } from './stock.ts';
+
 export type PieceRow = typeof pieces.$inferSelect;
 export type ProofRow = typeof proofs.$inferSelect;
 export type SignatureRow = typeof signatures.$inferSelect & { proofNumber: number };
@@ -23,6 +25,8 @@ export interface Dossier {
 	queries: QueryRow[];
 	/** Newest first. */
 	releases: ReleaseRow[];
+	/** What the piece is worked with now. */
+	stock: Stock;
 }
 
 /**
@@ -63,14 +67,15 @@ export async function readDossiers(
 function readable({ piece, proof, ...rest }: Dossier): Dossier {
 	return {
 		...rest,
-		piece: { ...piece, document: readStored(piece.document) },
-		proof: proof && { ...proof, document: readStored(proof.document) }
+		piece: { ...piece, document: readStored(piece.document, rest.stock.calculators) },
+		proof: proof && { ...proof, document: readStored(proof.document, rest.stock.calculators) }
 	};
 }
 
 async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 	if (rows.length === 0) return [];
 	const ids = rows.map(({ id }) => id);
+	const stock = await readStock(db);
 	const writers = await db.select().from(pieceWriters).where(inArray(pieceWriters.pieceId, ids));
 	const newest = await db
 		.selectDistinctOn([proofs.pieceId])
@@ -114,7 +119,8 @@ async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 			proof: ofPiece(newest)[0] ?? null,
 			signatures: ofPiece(signed.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
 			queries: ofPiece(asked.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
-			releases: ofPiece(released)
+			releases: ofPiece(released),
+			stock
 		};
 	});
 }

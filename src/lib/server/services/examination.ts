@@ -2,7 +2,7 @@
 import { judgeClaims } from '../../factcheck/judge.ts';
 import { undeclaredFindings } from '../../factcheck/undeclared.ts';
 import type { Verdict } from '../../factcheck/verdict.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
+import type { CalculatorSet } from '../../physics/calculator.ts';
 import { claimCovers, coverHash, type ClaimCover } from '../../widget/cover.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
 import { evaluate } from '../../widget/evaluate.ts';
@@ -24,27 +24,29 @@ export interface Examination {
 	digest: string;
 }
 
-/** The same document gives the same findings while the process runs, so the desk needn't weigh everything again. */
-const seen = new Map<string, Examination>();
+/** The same document worked with the same calculators gives the same findings, so the desk needn't weigh everything again. */
+const seenWith = new WeakMap<CalculatorSet, Map<string, Examination>>();
 const KEPT = 200;
 
-export function examine(document: WidgetDocument): Examination {
+export function examine(document: WidgetDocument, calculators: CalculatorSet): Examination {
+	const seen = seenWith.get(calculators) ?? new Map<string, Examination>();
+	seenWith.set(calculators, seen);
 	const key = digestOf(document);
 	const kept = seen.get(key);
 	if (kept) return kept;
-	const fresh = examineAnew(document);
+	const fresh = examineAnew(document, calculators);
 	const [oldest] = seen.keys();
 	if (seen.size >= KEPT && oldest !== undefined) seen.delete(oldest);
 	seen.set(key, fresh);
 	return fresh;
 }
 
-function examineAnew(document: WidgetDocument): Examination {
-	const verdicts = judgeClaims(document, catalogue);
-	const covers = claimCovers(document, catalogue);
+function examineAnew(document: WidgetDocument, calculators: CalculatorSet): Examination {
+	const verdicts = judgeClaims(document, calculators);
+	const covers = claimCovers(document, calculators);
 	const places = claimPlaces(
 		document,
-		wordsAt(document, evaluate(document, {}, catalogue), catalogue)
+		wordsAt(document, evaluate(document, {}, calculators), calculators)
 	);
 	const claims = places.flatMap((place) => {
 		const verdict = verdicts.get(place.claim.id);
@@ -53,7 +55,7 @@ function examineAnew(document: WidgetDocument): Examination {
 	});
 	return {
 		claims,
-		findings: [...findings(document, catalogue), ...undeclaredFindings(document)],
-		digest: freeze(document, catalogue).digest
+		findings: [...findings(document, calculators), ...undeclaredFindings(document)],
+		digest: freeze(document, calculators).digest
 	};
 }

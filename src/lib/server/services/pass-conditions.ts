@@ -1,15 +1,19 @@
 /** What must hold before a proof goes to press. Each condition is a row here: a sentence, and the way to clear it. */
+import type { Calculator } from '../../physics/calculator.ts';
 import { routes } from '../../routes.ts';
 import { can, type Actor } from '../../workflow/permissions.ts';
+import { mayPublish, type VettingState } from '../../workflow/vetting.ts';
 import type { Condition, PersonName } from '../../workflow/piece.ts';
 import type { Dossier, ProofRow } from './dossier.ts';
 import { examine } from './examination.ts';
 import { isOpen, standingOf, type Standing, type StandingClaim } from './standing.ts';
+import type { Stock } from './stock.ts';
 
 interface Facts {
 	slug: string;
 	proof: ProofRow;
 	standing: Standing;
+	stock: Stock;
 	actor: Actor;
 	names: (personId: string) => PersonName;
 }
@@ -89,8 +93,8 @@ const RULES: Rule[] = [
 			mend: met ? '' : 'An editor who has neither written nor checked this proof passes it.'
 		};
 	},
-	({ proof, slug }) => {
-		const { findings } = examine(proof.document);
+	({ proof, slug, stock }) => {
+		const { findings } = examine(proof.document, stock.calculators);
 		return {
 			side: 'galley',
 			met: findings.length === 0,
@@ -102,8 +106,8 @@ const RULES: Rule[] = [
 			href: routes.manuscript(slug)
 		};
 	},
-	({ proof, slug }) => {
-		const met = examine(proof.document).digest === proof.digest;
+	({ proof, slug, stock }) => {
+		const met = examine(proof.document, stock.calculators).digest === proof.digest;
 		return {
 			side: 'galley',
 			met,
@@ -112,6 +116,24 @@ const RULES: Rule[] = [
 				: 'A calculator, or the form in which pieces are kept, has changed since this proof was pulled.',
 			mend: met ? '' : 'The writer pulls a new proof; what has moved is checked again.',
 			href: routes.manuscript(slug)
+		};
+	},
+	({ proof, stock }) => {
+		const used = new Set(proof.document.steps.map(({ calculator }) => calculator));
+		const open = [...used].flatMap((id) => {
+			const calculator = stock.calculators.get(id);
+			const state = calculator && stock.stateOf(calculator);
+			return calculator && state && !mayPublish(state) ? [{ calculator, state }] : [];
+		});
+		const [first] = open;
+		return {
+			side: 'galley',
+			met: !first,
+			says: first
+				? open.map(({ calculator, state }) => notVetted(calculator, state)).join(' ')
+				: 'Every calculator it uses is vetted.',
+			mend: first ? VETTING_MENDS[first.state] : '',
+			...(first ? { href: routes.calculator(first.calculator.id) } : {})
 		};
 	},
 	() => ({
@@ -137,9 +159,22 @@ export function conditionsOf(dossier: Dossier, actor: Actor, names: Facts['names
 			}
 		];
 	}
-	const facts: Facts = { slug, proof, standing: standingOf(dossier, proof), actor, names };
+	const { stock } = dossier;
+	const facts: Facts = { slug, proof, standing: standingOf(dossier, proof), stock, actor, names };
 	return RULES.map((rule) => rule(facts));
 }
+
+function notVetted({ title, revision }: Calculator, state: VettingState): string {
+	return `${title}, ${revision} is ${state}, not vetted.`;
+}
+
+const VETTING_MENDS: Record<VettingState, string> = {
+	proposed: 'Its check values have to agree, and a second scientist signs it.',
+	tested: 'A second scientist looks at its card and signs it.',
+	vetted: '',
+	superseded: 'A newer revision has to be vetted.',
+	withdrawn: 'The writer hangs another calculator in its place, and pulls a new proof.'
+};
 
 function passer(actor: Actor): string {
 	return actor.roles.includes('editor')

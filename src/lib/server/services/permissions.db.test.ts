@@ -3,13 +3,23 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { openTestDatabase, type TestDatabase } from '../../../../tests/support/database.ts';
 import { Desk, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
+import { emptyCard } from '../../vetting/fresh.ts';
 import { can, ROLES, type Action, type Role } from '../../workflow/permissions.ts';
 import type { Context } from '../context.ts';
 import { signClaim, takeBackSignature } from './claims.ts';
+import {
+	proposeHouseCalculator,
+	readHouseCalculator,
+	reviseHouseCalculator,
+	vetCalculator,
+	withdrawCalculator
+} from './house-calculators.ts';
+import { tryHouseCalculator } from './house-test.ts';
 import { createPiece, getPiece, listPieces, saveDraft } from './pieces.ts';
 import { passConditions, passProof, pullProof } from './proofs.ts';
 import { answerQuery, closeQuery, raiseQuery } from './queries.ts';
 import { releaseProof } from './releases.ts';
+import { listCalculators, readVettings } from './vettings.ts';
 
 let database: TestDatabase;
 let office: Office;
@@ -24,6 +34,9 @@ beforeAll(async () => {
 	people.set('none', await office.add('Nobody Atall', []));
 });
 afterAll(() => database.close());
+
+const REVISION = { base: '1.0.0', change: 'patch' as const, note: 'Nothing.' };
+const NO_REVISION = { calculator: 'house.nowhere', revision: '1.0.0', note: 'Nothing.' };
 
 /**
  * Each service, the action it asks for, and how it's called. Input is made to fail right after the permission: what
@@ -54,7 +67,23 @@ const SERVICES: [name: string, action: Action, call: (ctx: Context) => Promise<u
 	],
 	['closeQuery', 'query-claim', (ctx) => closeQuery(ctx, 'nowhere', { queryId: 'x' })],
 	['passProof', 'pass-proof', (ctx) => passProof(ctx, 'nowhere', { proofId: 'x' })],
-	['releaseProof', 'release-proof', (ctx) => releaseProof(ctx, 'nowhere', { proofId: 'x' })]
+	['releaseProof', 'release-proof', (ctx) => releaseProof(ctx, 'nowhere', { proofId: 'x' })],
+	[
+		'proposeHouseCalculator',
+		'propose-calculator',
+		(ctx) => proposeHouseCalculator(ctx, { ...emptyCard(), slug: 'nothing' })
+	],
+	[
+		'reviseHouseCalculator',
+		'propose-calculator',
+		(ctx) => reviseHouseCalculator(ctx, 'house.nowhere', { ...emptyCard(), ...REVISION })
+	],
+	['readHouseCalculator', 'propose-calculator', (ctx) => readHouseCalculator(ctx, 'house.nowhere')],
+	['tryHouseCalculator', 'propose-calculator', async (ctx) => tryHouseCalculator(ctx, {})],
+	['vetCalculator', 'vet-calculator', (ctx) => vetCalculator(ctx, NO_REVISION)],
+	['withdrawCalculator', 'withdraw-calculator', (ctx) => withdrawCalculator(ctx, NO_REVISION)],
+	['listCalculators', 'read-calculators', (ctx) => listCalculators(ctx)],
+	['readVettings', 'read-calculators', (ctx) => readVettings(ctx, 'cosmo.at_z')]
 ];
 
 const DENIALS = ['not-permitted', 'same-person-twice', 'not-signed-in'];

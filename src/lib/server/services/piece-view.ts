@@ -195,7 +195,8 @@ function missing(dossier: Dossier, standing: Standing | null, working: WorkingSt
 	if (working === 'passed') return 'its release';
 	if (working === 'checked') return 'an editor’s pass';
 	const examination = examine(
-		working === 'draft' || !dossier.proof ? dossier.piece.document : dossier.proof.document
+		working === 'draft' || !dossier.proof ? dossier.piece.document : dossier.proof.document,
+		dossier.stock.calculators
 	);
 	const weighed = examination.claims.filter(({ claim }) => claim.form !== 'exempt');
 	const verdicts = (name: string) =>

@@ -3,7 +3,6 @@ import { and, eq, sql } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
 import type { CreatePiece } from '../../forms/create-piece.ts';
 import type { SaveDraft } from '../../forms/save-draft.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
 import { EDITION_IN_USE } from '../../physics/constants/index.ts';
 import { DOCUMENT_VERSION, type WidgetDocument } from '../../widget/document.ts';
 import { canonicalJson } from '../../widget/freeze.ts';
@@ -17,6 +16,7 @@ import { record } from './daybook.ts';
 import { namedIn, readDossier, readDossiers, type PieceRow } from './dossier.ts';
 import { nameBook } from './people.ts';
 import { summarise, summariseUnreadable, viewPiece } from './piece-view.ts';
+import { calculatorsOf } from './stock.ts';
 import { refuseUnstorable, unstorableText } from './storable.ts';
 import { readStored } from './stored-document.ts';
 
@@ -91,7 +91,7 @@ export interface Conflict extends Saved {
 export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): Promise<Saved> {
 	const { actor, now } = ctx;
 	requirePermission(actor, 'edit-draft');
-	const parsed = parseDocument(input.document, catalogue);
+	const parsed = parseDocument(input.document, await calculatorsOf(ctx));
 	const issues = parsed.ok ? unstorableText(parsed.document) : parsed.issues;
 	if (!parsed.ok || issues.length > 0) throw new SteelyardError('document-broken', { issues });
 
@@ -132,7 +132,7 @@ async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
 	const current: Conflict = {
 		...saved(piece),
 		savedBy: names(piece.savedBy),
-		document: readStored(piece.document)
+		document: readStored(piece.document, await calculatorsOf({ db: tx }))
 	};
 	return new SteelyardError('version-conflict', { ...current });
 }

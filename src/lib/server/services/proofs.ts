@@ -23,8 +23,8 @@ export async function pullProof(
 	const { actor, now } = ctx;
 	requirePermission(actor, 'pull-proof');
 	return ctx.db.transaction(async (tx) => {
-		const { piece, proof: newest, writers } = await dossierOf(tx, await lockPiece(tx, slug));
-		const { findings: lacking, digest } = examine(piece.document);
+		const { piece, proof: newest, writers, stock } = await dossierOf(tx, await lockPiece(tx, slug));
+		const { findings: lacking, digest } = examine(piece.document, stock.calculators);
 		if (lacking.length > 0) throw new SteelyardError('proof-not-ready', { findings: lacking });
 
 		if (newest?.digest === digest) return { proofId: newest.id, number: newest.number };

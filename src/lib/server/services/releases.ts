@@ -1,7 +1,6 @@
 /** From a passed proof to what readers get. */
 import { and, eq, lte } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
-import { catalogue } from '../../physics/calculators/index.ts';
 import { canonicalJson, freeze } from '../../widget/freeze.ts';
 import { requirePermission } from '../../workflow/permissions.ts';
 import type { ReleaseView } from '../../workflow/piece.ts';
@@ -139,11 +138,14 @@ async function print(
 	{ dossier, proof, standing }: PassedProof,
 	number: number
 ): Promise<{ bundle: Bundle; account: PublicAccount }> {
+	const { calculators, house } = dossier.stock;
 	const names = await nameBook(ctx.db, namedBy(standing, proof.passedBy));
 	const makers = makersOf(standing, proof.passedBy, names);
-	const records = recordsOf(proof.document, catalogue, signingsOf(standing, names));
+	const records = recordsOf(proof.document, calculators, signingsOf(standing, names));
 	const bundle = await makeBundle({
-		frozen: freeze(proof.document, catalogue),
+		frozen: freeze(proof.document, calculators),
+		calculators,
+		houseCalculators: house,
 		slug: dossier.piece.slug,
 		releaseNumber: number,
 		releasedAt: ctx.now,
@@ -152,5 +154,5 @@ async function print(
 		records,
 		pressFolder: ctx.pressFolder
 	});
-	return { bundle, account: accountOf(proof.document, catalogue, records, makers) };
+	return { bundle, account: accountOf(proof.document, calculators, records, makers) };
 }

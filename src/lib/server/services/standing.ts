@@ -24,7 +24,8 @@ export interface Standing {
  * names it went out with.
  */
 export function standingOf(dossier: Dossier, proof: ProofRow, at?: Date): Standing {
-	const claims = examine(proof.document).claims.map((examined) => {
+	const { claims: examinedClaims } = examine(proof.document, dossier.stock.calculators);
+	const claims = examinedClaims.map((examined) => {
 		const id = examined.claim.id;
 		const signatures = dossier.signatures
 			.filter((signature) => signature.claim === id && stoodAt(signature, at))

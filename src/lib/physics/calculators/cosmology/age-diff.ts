@@ -9,7 +9,7 @@ import {
 	redshiftInput,
 	universeWithPast
 } from './limits.ts';
-import { pathBetween } from './integrals.ts';
+import { pathFrom } from './integrals.ts';
 
 /** Time between two redshifts, in Myr, whichever comes first. Integrated directly, so that near redshifts lose no digits. */
 export const ageDiff = defineCalculator({
@@ -27,6 +27,7 @@ export const ageDiff = defineCalculator({
 	outputs: {
 		duration: { label: 'Time between them', symbol: 'Δt', quantity: 'duration', unit: 'Myr' }
 	},
+	restsOnCosmology: ['duration'],
 	equations: [
 		{
 			tex: '\\Delta t = \\frac{1}{H_0}\\left|\\int_{z_1}^{z_2} \\frac{\\mathrm{d}z}{(1+z)\\,E(z)}\\right|',
@@ -47,7 +48,7 @@ export const ageDiff = defineCalculator({
 		const x1 = Math.log1p(z1);
 		// ln((1+z₂)/(1+z₁)) from the difference, which is exact for near redshifts.
 		const width = Math.log1p((z2 - z1) / (1 + z1));
-		const time = Math.abs(pathBetween(universe, x1, x1 + width).time);
+		const time = Math.abs(pathFrom(universe, x1, width).time);
 		return {
 			ok: true,
 			values: { duration: time * universe.hubbleTimeGyr * 1000 },

@@ -19,7 +19,7 @@ import {
 	universeWithPast
 } from './limits.ts';
 import type { CosmologyParameters } from './parameters.ts';
-import { futureOf, pastOf, pathBetween, transverseOf, volumeOf } from './integrals.ts';
+import { reachOf, transverseOf, volumeOf } from './integrals.ts';
 import type { Universe } from './universe.ts';
 
 const { c } = constants.physical;
@@ -28,6 +28,10 @@ const GLY_PER_MPC = (pc.value / ly.value) * 1e-3;
 /** kpc under one arcsecond at one Mpc. */
 const KPC_PER_ARCSEC = (1000 * Math.PI) / 648_000;
 const LIGHT_KM_S = c.value / 1000;
+
+/** Chosen with the model, not fitted: flatness, and the neutrinos' masses. */
+const CHOSEN_OUTPUTS = ['scale_factor', 'Ok', 'Ok0', 'Onu', 'Onu0'];
+const FITTED_OUTPUTS = Object.keys(atZOutputs).filter((key) => !CHOSEN_OUTPUTS.includes(key));
 
 /**
  * Everything an expanding universe says about one redshift: ages, distances, horizons, densities, speeds.
@@ -53,6 +57,7 @@ export const atZ = defineCalculator({
 	],
 	inputs: { cosmology: cosmologyInput, z: redshiftInput('Redshift', 1) },
 	outputs: atZOutputs,
+	restsOnCosmology: FITTED_OUTPUTS,
 	equations: [
 		{
 			tex: 'E^2(z) = \\Omega_m(1+z)^3 + \\Omega_\\gamma(1+z)^4\\,[1+r_\\nu(z)] + \\Omega_k(1+z)^2 + \\Omega_\\mathrm{DE}\\,(1+z)^{3(1+w_0+w_a)}\\,e^{-3w_a z/(1+z)}',
@@ -99,16 +104,15 @@ function readingsAt(universe: Universe, z: number) {
 	const u = 1 + z;
 	const E2 = universe.E2(u);
 	const E = Math.sqrt(E2);
-	const path = pathBetween(universe, 0, Math.log1p(z));
-	const past = pastOf(universe, u);
-	const comoving = path.distance * hubbleDistanceMpc;
-	const transverse = transverseOf(universe, path.distance) * hubbleDistanceMpc;
+	const reach = reachOf(universe, Math.log1p(z));
+	const comoving = reach.distance * hubbleDistanceMpc;
+	const transverse = transverseOf(universe, reach.distance) * hubbleDistanceMpc;
 	const angular = transverse / u;
-	const lookback = path.time * hubbleTimeGyr;
+	const lookback = reach.time * hubbleTimeGyr;
 	const photons = (universe.Ogamma0 * u ** 4) / E2;
 
 	const values: Record<string, number> = {
-		age: past.age * hubbleTimeGyr,
+		age: reach.age * hubbleTimeGyr,
 		lookback,
 		light_travel_distance: lookback,
 		comoving_distance: comoving,
@@ -119,7 +123,7 @@ function readingsAt(universe: Universe, z: number) {
 		distmod: 5 * Math.log10(transverse * u) + 25,
 		kpc_per_arcsec: angular * KPC_PER_ARCSEC,
 		arcsec_per_kpc: 1 / (angular * KPC_PER_ARCSEC),
-		comoving_volume: volumeOf(universe, path.distance) * (hubbleDistanceMpc / 1000) ** 3,
+		comoving_volume: volumeOf(universe, reach.distance) * (hubbleDistanceMpc / 1000) ** 3,
 		E,
 		H: H0 * E,
 		critical_density: universe.criticalDensity0 * E2,
@@ -130,11 +134,11 @@ function readingsAt(universe: Universe, z: number) {
 		Ogamma: photons,
 		Onu: photons * universe.neutrinoRatio(u),
 		Ok: (universe.Ok0 * u * u) / E2,
-		particle_horizon: past.horizon * hubbleDistanceMpc,
-		event_horizon: universe.hasEventHorizon ? futureOf(universe, u) * hubbleDistanceMpc : Infinity,
+		particle_horizon: reach.horizon * hubbleDistanceMpc,
+		event_horizon: reach.future * hubbleDistanceMpc,
 		hubble_radius: hubbleDistanceMpc / E,
-		recession_now: path.distance * LIGHT_KM_S,
-		recession_then: (path.distance * E * LIGHT_KM_S) / u,
+		recession_now: reach.distance * LIGHT_KM_S,
+		recession_then: (reach.distance * E * LIGHT_KM_S) / u,
 		deceleration_q: universe.slope(u) - 1,
 		hubble_time: hubbleTimeGyr,
 		hubble_distance: hubbleDistanceMpc,
@@ -204,7 +208,7 @@ function readingsAt(universe: Universe, z: number) {
 	return { values, withheld };
 }
 
-/** Only what the publications state, or what follows from H₀ alone; the parameters are correlated, so no more is honest. */
+/** What the publications state, or what follows from H₀ alone. The rest takes the whole fit: see `restsOnCosmology`. */
 function uncertaintiesAt(
 	universe: Universe,
 	parameters: CosmologyParameters,
@@ -225,12 +229,12 @@ function uncertaintiesAt(
 	const published =
 		parameters.set === null ? null : constants.cosmologies[parameters.set].published;
 	if (!published) return known;
-	const relative = published.H0Uncertainty / parameters.H0;
+	const relative = published.uncertainties.H0 / parameters.H0;
 	known.hubble_time = relative * universe.hubbleTimeGyr;
 	known.hubble_distance = relative * universe.hubbleDistanceMpc;
 	if (z === 0) {
 		known.age = published.ageUncertaintyGyr;
-		known.H = published.H0Uncertainty;
+		known.H = published.uncertainties.H0;
 		known.hubble_radius = relative * universe.hubbleDistanceMpc;
 	}
 	return known;

@@ -1,21 +1,24 @@
 /**
- * Times, distances and volumes of an expanding universe, by 64-node Gauss–Legendre quadrature in variables that keep
- * the integrands smooth. Distances are in Hubble distances, times in Hubble times.
+ * Times, distances and volumes of an expanding universe, by Gauss–Legendre quadrature in variables that keep the
+ * integrands smooth. Distances are in Hubble distances, times in Hubble times.
  */
-import { GL64 } from '../../numerics/quadrature.ts';
+import { GL6, GL64, type Node } from '../../numerics/quadrature.ts';
 import { NEGLIGIBLE_WA, type Universe } from './universe.ts';
 
-/** Look-back time and comoving distance from x₁ to x₂ (x₁ = 0: from now): ∫dx/E and ∫e^x dx/E. */
-export function pathBetween(
+/**
+ * Look-back time and comoving distance over a stretch of x (x = 0: from now): ∫dx/E and ∫e^x dx/E. The width is an
+ * argument of its own, since near ends lose its digits.
+ */
+export function pathFrom(
 	universe: Universe,
-	x1: number,
-	x2: number
+	x: number,
+	width: number,
+	nodes: readonly Node[] = GL64
 ): { time: number; distance: number } {
-	const width = x2 - x1;
 	let time = 0;
 	let distance = 0;
-	for (const { at, weight } of GL64) {
-		const u = Math.exp(x1 + width * at);
+	for (const { at, weight } of nodes) {
+		const u = Math.exp(x + width * at);
 		const share = weight / Math.sqrt(universe.E2(u));
 		time += share;
 		distance += share * u;
@@ -23,17 +26,30 @@ export function pathBetween(
 	return { time: time * width, distance: distance * width };
 }
 
+/** Light’s time so long before u takes too little of s to be seen by the nodes: it is then integrated apart. */
+const LONG_BEFORE = 1e4;
+
+/** Age and particle horizon at u. Not finite unless `earlyPower` is above 0 and 2. */
+function pastOf(universe: Universe, u: number): { age: number; horizon: number } {
+	const { equality } = universe;
+	if (equality < LONG_BEFORE * u) return beginningUntil(universe, u);
+	const since = pathFrom(universe, Math.log(u), Math.log(equality / u));
+	const until = beginningUntil(universe, equality);
+	return { age: until.age + since.time, horizon: until.horizon + since.distance };
+}
+
 /**
- * Age and particle horizon at u, by a = a₀s² with s in (0, 1): ∫dx/E and ∫e^x dx/E from x to infinity. Not finite
- * unless `earlyPower` is above 0 and 2.
+ * Age and particle horizon at u, by a = a₀s⁴ with s in (0, 1): ∫dx/E and ∫e^x dx/E from x to infinity. The fourth power
+ * gives the time when light outweighed matter enough of the interval; the square, which would do for matter alone, loses
+ * the horizon’s tenth digit.
  */
-export function pastOf(universe: Universe, u: number): { age: number; horizon: number } {
+function beginningUntil(universe: Universe, u: number): { age: number; horizon: number } {
 	// Where dark energy alone fills the past, a higher power of s keeps the integrand level near s = 0.
-	const power = universe.earlyPower >= 1 ? 2 : 2 / universe.earlyPower;
+	const power = universe.earlyPower >= 1 ? 4 : 4 / universe.earlyPower;
 	let age = 0;
 	let horizon = 0;
 	for (const { at: s, weight } of GL64) {
-		const then = power === 2 ? u / (s * s) : u / s ** power;
+		const then = power === 4 ? u / (s * s * (s * s)) : u / s ** power;
 		// dx = −power × ds/s
 		const share = (power * weight) / (s * Math.sqrt(universe.E2(then)));
 		age += share;
@@ -42,8 +58,59 @@ export function pastOf(universe: Universe, u: number): { age: number; horizon: n
 	return { age, horizon };
 }
 
+/** Everything that is added up along the way of light to x = ln(1+z), in Hubble times and distances. */
+export interface Reach {
+	/** Look-back time and comoving distance, from now. */
+	time: number;
+	distance: number;
+	/** Age and particle horizon. */
+	age: number;
+	horizon: number;
+	/** What light sent then can still cover; meant only where `hasEventHorizon`. */
+	future: number;
+}
+
+/** Distance in x between milestones: short enough for 6 nodes to reach the last bits from one to the next. */
+const SPACING = 0.125;
+const milestones = new WeakMap<Universe, Map<number, Reach>>();
+
+/**
+ * All integrals at x. In the past they go on from a milestone, whose own were taken over the whole way and are kept with
+ * the universe: a curve costs little more than its points, and no point depends on which were asked before.
+ */
+export function reachOf(universe: Universe, x: number): Reach {
+	const step = Math.floor(x / SPACING);
+	if (!(step >= 0)) return wholeReach(universe, x);
+	const from = milestone(universe, step);
+	const { time, distance } = pathFrom(universe, step * SPACING, x - step * SPACING, GL6);
+	return {
+		time: from.time + time,
+		distance: from.distance + distance,
+		age: from.age - time,
+		horizon: from.horizon - distance,
+		future: from.future + distance
+	};
+}
+
+function milestone(universe: Universe, step: number): Reach {
+	let own = milestones.get(universe);
+	if (!own) milestones.set(universe, (own = new Map<number, Reach>()));
+	let reach = own.get(step);
+	if (!reach) own.set(step, (reach = wholeReach(universe, step * SPACING)));
+	return reach;
+}
+
+function wholeReach(universe: Universe, x: number): Reach {
+	const u = Math.exp(x);
+	const future = universe.hasEventHorizon ? futureOf(universe, u) : Infinity;
+	const path = pathFrom(universe, 0, x);
+	if (x >= 0) return { ...path, ...pastOf(universe, u), future };
+	const now = pastOf(universe, 1);
+	return { ...path, age: now.age - path.time, horizon: now.horizon - path.distance, future };
+}
+
 /** Comoving distance that light sent at u can still cover. Only where `hasEventHorizon`. */
-export function futureOf(universe: Universe, u: number): number {
+function futureOf(universe: Universe, u: number): number {
 	const end = universe.turnaround;
 	const { w0, wa } = universe.parameters;
 	if (end > 0) {
@@ -53,11 +120,8 @@ export function futureOf(universe: Universe, u: number): number {
 	if (wa > NEGLIGIBLE_WA) {
 		// E grows like exp(1.5 wₐ/u): below this the rest of the future adds nothing a double can hold.
 		const low = Math.log(Math.min((1.5 * wa) / 50, u / 20));
-		const middle = (low + Math.log(u)) / 2;
-		return (
-			pathBetween(universe, low, middle).distance +
-			pathBetween(universe, middle, Math.log(u)).distance
-		);
+		const half = (Math.log(u) - low) / 2;
+		return pathFrom(universe, low, half).distance + pathFrom(universe, low + half, half).distance;
 	}
 	// E ~ u^(3(1+w₀)/2) far in the future: for w₀ above −1 a power of s keeps the integrand level near 0.
 	const power = w0 > -1 ? 1 / (1 - 1.5 * (1 + w0)) : 1;

@@ -10,7 +10,7 @@ import {
 	cosmologyWarnings,
 	universeWithPast
 } from './limits.ts';
-import { pastOf, pathBetween, transverseOf } from './integrals.ts';
+import { reachOf, transverseOf } from './integrals.ts';
 import { X_MAX, X_MIN, type Universe } from './universe.ts';
 
 type Kind = 'z_from_age' | 'z_from_lookback' | 'z_from_comoving' | 'z_from_luminosity';
@@ -96,6 +96,7 @@ export const inverse = defineCalculator({
 			unit: 'times'
 		}
 	},
+	restsOnCosmology: ['z', 'stretch'],
 	equations: [
 		{
 			tex: 't(z) = \\frac{1}{H_0}\\int_{z}^{\\infty} \\frac{\\mathrm{d}z^\\prime}{(1+z^\\prime)\\,E(z^\\prime)} = t',
@@ -142,7 +143,7 @@ export const inverse = defineCalculator({
 function curveOf(universe: Universe, kind: Kind): Curve {
 	const { hubbleTimeGyr, hubbleDistanceMpc } = universe;
 	const rate = (x: number) => 1 / Math.sqrt(universe.E2(Math.exp(x)));
-	const distance = (x: number) => pathBetween(universe, 0, x).distance;
+	const distance = (x: number) => reachOf(universe, x).distance;
 	const future = universe.turnaround > 0 ? Math.log(universe.turnaround) + 1e-9 : X_MIN;
 	switch (kind) {
 		case 'z_from_age':
@@ -151,7 +152,7 @@ function curveOf(universe: Universe, kind: Kind): Curve {
 				scale: hubbleTimeGyr,
 				from: future,
 				to: X_MAX,
-				at: (x) => pastOf(universe, Math.exp(x)).age,
+				at: (x) => reachOf(universe, x).age,
 				slope: (x) => -rate(x),
 				below: () =>
 					'So early is before this model begins. Give an age of at least a second or so.',
@@ -164,7 +165,7 @@ function curveOf(universe: Universe, kind: Kind): Curve {
 				scale: hubbleTimeGyr,
 				from: 0,
 				to: X_MAX,
-				at: (x) => pathBetween(universe, 0, x).time,
+				at: (x) => reachOf(universe, x).time,
 				slope: rate,
 				below: () => 'A time before now can’t be negative.',
 				above: (limit) => `That is longer ago than the Big Bang. Give a time below ${limit}.`
@@ -206,7 +207,7 @@ function firstQuarter(universe: Universe): number {
 	const { Ok0 } = universe;
 	if (Ok0 >= 0) return X_MAX;
 	const equator = Math.PI / 2 / Math.sqrt(-Ok0);
-	return brentRoot((x) => pathBetween(universe, 0, x).distance - equator, 0, X_MAX, 1e-12) ?? X_MAX;
+	return brentRoot((x) => reachOf(universe, x).distance - equator, 0, X_MAX, 1e-12) ?? X_MAX;
 }
 
 function solve(curve: Curve, target: number): { ok: true; x: number } | ReturnType<typeof refuse> {

@@ -47,6 +47,8 @@ export interface Universe {
 	bounces: boolean;
 	/** u at which the expansion will stop; 0 when it never does. */
 	turnaround: number;
+	/** u at which light (with neutrinos without mass to speak of) weighed as much as matter; 0 where one is missing. */
+	equality: number;
 	/** Power of u that E² grows with in the far past. */
 	earlyPower: number;
 	/** Whether light sent now can reach only so far in all the future. */
@@ -60,18 +62,34 @@ export interface Universe {
 	slope(u: number): number;
 }
 
+/** u at which no neutrino’s mass counts. */
+const LONG_AGO = 1e12;
+
 const cache = new Map<string, Universe>();
 const CACHE_SIZE = 64;
+/** The one asked for last: a chart asks for one a hundred times, and writing its key takes longer than its answer. */
+let last: Universe | null = null;
 
-/** The universe with these parameters; the last few are kept, since a chart asks for one a hundred times. */
+/** The universe with these parameters; the last few are kept. */
 export function universeOf(parameters: CosmologyParameters): Universe {
+	if (last !== null && sameParameters(last.parameters, parameters)) return last;
 	const key = JSON.stringify(parameters);
-	const kept = cache.get(key);
-	if (kept) return kept;
-	const universe = makeUniverse(parameters);
-	if (cache.size >= CACHE_SIZE) cache.delete(cache.keys().next().value!);
-	cache.set(key, universe);
+	let universe = cache.get(key);
+	if (!universe) {
+		universe = makeUniverse(parameters);
+		if (cache.size >= CACHE_SIZE) cache.delete(cache.keys().next().value!);
+		cache.set(key, universe);
+	}
+	last = universe;
 	return universe;
+}
+
+function sameParameters(a: CosmologyParameters, b: CosmologyParameters): boolean {
+	for (const key of Object.keys(a) as (keyof CosmologyParameters)[]) {
+		if (key !== 'm_nu' && a[key] !== b[key]) return false;
+	}
+	const masses = b.m_nu;
+	return a.m_nu.length === masses.length && a.m_nu.every((mass, index) => mass === masses[index]);
 }
 
 function makeUniverse(parameters: CosmologyParameters): Universe {
@@ -79,6 +97,7 @@ function makeUniverse(parameters: CosmologyParameters): Universe {
 	const hubblePerSecond = H0 / KM_PER_MPC;
 	const criticalDensity0 = (3 * hubblePerSecond ** 2) / (8 * Math.PI * G.value);
 	const Ogamma0 = ((4 * sigma.value) / c.value ** 3) * (Tcmb0 ** 4 / criticalDensity0);
+	const heavy = massive(parameters);
 	const neutrinoRatio = neutrinos(parameters);
 	const Onu0 = Ogamma0 * neutrinoRatio(1);
 	const isFlat = parameters.Ode0 === null;
@@ -114,6 +133,7 @@ function makeUniverse(parameters: CosmologyParameters): Universe {
 		Ok0,
 		bounces: bounces(E2, Ok0, Ode0),
 		turnaround,
+		equality: Ogamma0 > 0 ? Om0 / (Ogamma0 * (1 + neutrinoRatio(LONG_AGO))) : 0,
 		earlyPower,
 		hasEventHorizon:
 			turnaround > 0 || (Ode0 > 0 && (wa > NEGLIGIBLE_WA || (wa >= 0 && w0 < -1 / 3))),
@@ -125,43 +145,56 @@ function makeUniverse(parameters: CosmologyParameters): Universe {
 			const light =
 				Ogamma0 === 0
 					? 0
-					: Ogamma0 * u ** 4 * (4 * (1 + neutrinoRatio(u)) + neutrinoSlope(parameters, u));
+					: Ogamma0 * u ** 4 * (4 * (1 + neutrinoRatio(u)) + neutrinoSlope(parameters, heavy, u));
 			return (3 * Om0 * u ** 3 + 2 * Ok0 * u ** 2 + light + dark) / (2 * E2(u));
 		}
 	};
 
 	function neutrinos({ m_nu }: CosmologyParameters): (u: number) => number {
 		if (m_nu.length === 0) return () => 0;
-		const heavy = massive(parameters);
 		if (heavy.length === 0) return () => NEUTRINO_SHARE * Neff;
 		const each = (NEUTRINO_SHARE * Neff) / m_nu.length;
 		const massless = m_nu.filter((mass) => mass === 0).length;
 		return (u) => {
 			let sum = massless;
-			for (const { y, species } of heavy) {
-				sum += species * (1 + (y / u) ** NEUTRINO_POWER) ** NEUTRINO_ROOT;
+			const x = Math.log(u);
+			for (const { lnY, species } of heavy) {
+				// (1 + (y/u)^p)^r by exponentials: twice as quick as powers, and every integral comes through here.
+				const term = Math.exp(NEUTRINO_POWER * (lnY - x));
+				sum += species * Math.exp(NEUTRINO_ROOT * Math.log(1 + term));
 			}
 			return each * sum;
 		};
 	}
 }
 
-/** 0.3173 m/(k T_ν) now for each mass above 0, with the number of species that have it. */
-function massive({ m_nu, Tcmb0 }: CosmologyParameters): { y: number; species: number }[] {
+interface HeavyNeutrino {
+	/** 0.3173 m/(k T_ν) now. */
+	y: number;
+	lnY: number;
+	/** How many species have this mass. */
+	species: number;
+}
+
+/** Each mass above 0. */
+function massive({ m_nu, Tcmb0 }: CosmologyParameters): HeavyNeutrino[] {
 	const thermalEv = (k.value / e.value) * NEUTRINO_TEMPERATURE * Tcmb0;
 	return [...new Set(m_nu)]
 		.filter((mass) => mass > 0)
-		.map((mass) => ({
-			y: (NEUTRINO_SCALE * mass) / thermalEv,
-			species: m_nu.filter((other) => other === mass).length
-		}));
+		.map((mass) => {
+			const y = (NEUTRINO_SCALE * mass) / thermalEv;
+			return { y, lnY: Math.log(y), species: m_nu.filter((other) => other === mass).length };
+		});
 }
 
 /** d(neutrino ratio)/dln u */
-function neutrinoSlope(parameters: CosmologyParameters, u: number): number {
-	const { m_nu, Neff } = parameters;
+function neutrinoSlope(
+	{ m_nu, Neff }: CosmologyParameters,
+	heavy: readonly HeavyNeutrino[],
+	u: number
+): number {
 	let sum = 0;
-	for (const { y, species } of massive(parameters)) {
+	for (const { y, species } of heavy) {
 		const term = (y / u) ** NEUTRINO_POWER;
 		sum -= species * NEUTRINO_POWER * NEUTRINO_ROOT * term * (1 + term) ** (NEUTRINO_ROOT - 1);
 	}

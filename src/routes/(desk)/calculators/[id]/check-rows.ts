@@ -8,6 +8,8 @@ export interface CheckRow {
 	reads: number | null;
 	refusal: string | null;
 	agrees: boolean;
+	/** How far the reading lies from the published value, in units of what is published as its ±; null where that is 0. */
+	within: number | null;
 }
 
 export function checkRows(calculator: Calculator): CheckRow[] {
@@ -15,11 +17,13 @@ export function checkRows(calculator: Calculator): CheckRow[] {
 		const result = runCalculator(calculator, check.inputs);
 		const value = result.ok ? result.outputs[check.output]?.value : undefined;
 		const reads = typeof value === 'number' ? value * check.outputScale : null;
+		const apart = reads === null ? null : Math.abs(reads - check.published);
 		return {
 			check,
 			reads,
 			refusal: result.ok ? null : result.refusal.message,
-			agrees: reads !== null && Math.abs(reads - check.published) <= check.tolerance
+			agrees: apart !== null && apart <= check.tolerance,
+			within: apart === null || check.tolerance === 0 ? null : apart / check.tolerance
 		};
 	});
 }

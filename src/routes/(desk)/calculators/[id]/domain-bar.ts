@@ -7,6 +7,8 @@ export interface DomainBar {
 	/** Where the first value stands. */
 	at: number;
 	labels: { at: number; text: string }[];
+	/** How the bar is measured. */
+	scale: 'even' | 'log';
 }
 
 /** Spans wider than this many times are drawn by their logarithm, where all is positive. */
@@ -15,7 +17,7 @@ const WIDE = 1000;
 const APART = 0.14;
 
 export function domainBar(spec: NumberInput): DomainBar {
-	const scale = scaleOf(spec);
+	const { place: scale, kind } = scaleOf(spec);
 	const good = spec.good ?? spec;
 	const ends = {
 		from: scale(Math.max(spec.min, good.min)),
@@ -32,21 +34,27 @@ export function domainBar(spec: NumberInput): DomainBar {
 		if (labels.every((other) => Math.abs(other.at - at) >= APART))
 			labels.push({ at, text: label(value) });
 	}
-	return { good: ends, at: scale(spec.initial), labels };
+	return { good: ends, at: scale(spec.initial), labels, scale: kind };
 }
 
-function scaleOf({ min, max, log }: NumberInput): (value: number) => number {
+function scaleOf({ min, max, log }: NumberInput): {
+	place: (value: number) => number;
+	kind: DomainBar['scale'];
+} {
 	const clamp = (share: number) => Math.min(1, Math.max(0, share));
 	if (min > 0 && (log || max / min > WIDE)) {
 		const [low, high] = [Math.log(min), Math.log(max)];
-		return (value) => clamp((Math.log(Math.max(value, min)) - low) / (high - low));
+		return {
+			place: (value) => clamp((Math.log(Math.max(value, min)) - low) / (high - low)),
+			kind: 'log'
+		};
 	}
 	if (min > -10 && max > WIDE) {
 		// From around nought over many decades: even near nought, then by the logarithm.
 		const bend = (value: number) => Math.log1p(Math.max(0, value - min));
-		return (value) => clamp(bend(value) / bend(max));
+		return { place: (value) => clamp(bend(value) / bend(max)), kind: 'log' };
 	}
-	return (value) => clamp((value - min) / (max - min));
+	return { place: (value) => clamp((value - min) / (max - min)), kind: 'even' };
 }
 
 const label = (value: number) => printDigits(value, 4, true);

@@ -21,6 +21,7 @@ import type {
 	WidgetDocument
 } from '$lib/widget/document.ts';
 import { evaluate, readingAt, type Evaluation } from '$lib/widget/evaluate.ts';
+import { readingWithUncertainty } from '$lib/widget/evaluate-uncertainty.ts';
 import { wiringOf } from '$lib/widget/graph.ts';
 import {
 	OUTPUT_FIGURES,
@@ -60,6 +61,8 @@ export interface WorkingStep {
 
 export interface ClaimRecord {
 	reading: PrintedReading | null;
+	/** How its uncertainty was found, or why it has none. */
+	uncertaintyNote: string | null;
 	/** What is read: “frequency today”. */
 	label: string;
 	refusal: string | null;
@@ -85,13 +88,15 @@ export function claimRecord(
 	if (claim.form === 'exempt') return null;
 	const ref = claim.reading;
 	const evaluation = evaluate(document, values, calculators);
-	const outcome = readingAt(document, evaluation, ref, calculators);
+	const read = claim.form === 'live' ? readingAt : readingWithUncertainty;
+	const outcome = read(document, evaluation, ref, calculators);
 	const wiring = wiringOf(document.steps, ref);
 	const stated = weighingOf(document, evaluation, claim, words, calculators)?.stated ?? null;
 	const step = 'step' in ref ? document.steps.find(({ id }) => id === ref.step) : undefined;
 	const calculator = (step && calculators.get(step.calculator)) ?? null;
 	return {
 		reading: outcome.ok ? printReading(inUnitOf(stated, outcome.reading), OUTPUT_FIGURES) : null,
+		uncertaintyNote: (outcome.ok && outcome.reading.uncertaintyNote) || null,
 		label: refLabel(document, ref, calculators),
 		refusal: outcome.ok ? null : outcome.refusal.message,
 		calculator,
