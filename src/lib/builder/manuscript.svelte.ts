@@ -165,6 +165,8 @@ export class Manuscript {
 			{
 				state: this.state,
 				editable: () => !this.readOnly,
+				// Cells of a pasted table have no place here; their words must not run together into other numbers.
+				transformPastedHTML: (html) => html.replace(/<\/t[dh]\s*>/gi, ' $&'),
 				// The bench lies over the sheet's foot: a line one goes to must stand above it.
 				get scrollMargin() {
 					const bench = document.querySelector('.bench-and-foot');
