@@ -181,14 +181,14 @@ describe('proposing', () => {
 });
 
 describe('vetting', () => {
-	test('the proposer can’t sign; a second scientist with a fresh passphrase can', async () => {
+	test('the proposer can’t sign; a second scientist who signed in just now can', async () => {
 		await propose();
 		const own = { calculator: ID, revision: '1.0.0', note: '' };
 		await expect(vetCalculator(await proposer(), own)).rejects.toEqual(code('own-proposal'));
 		const stale = await office.as(second);
 		office.wait(20);
 		await expect(vetCalculator({ ...stale, now: office.now }, own)).rejects.toEqual(
-			code('confirm-needed')
+			code('confirm-by-link')
 		);
 		await vet();
 		expect(await states()).toEqual({ '1.0.0': 'vetted' });
@@ -341,7 +341,7 @@ describe('publishing', () => {
 		expect(await galley()).toEqual([]);
 		await vet('2.0.0');
 		expect((await galley()).map(({ says }) => says)).toEqual([
-			'A calculator has changed since this proof was pulled.'
+			'A calculator, or the form in which pieces are kept, has changed since this proof was pulled.'
 		]);
 	});
 });
