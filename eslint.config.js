@@ -14,9 +14,16 @@ const OWN = [
 	'widget',
 	'factcheck',
 	'workflow',
+	'copy-lint',
+	'import',
+	'export',
 	'renderer',
 	'builder',
 	'vetting',
+	'pictures',
+	'typeset',
+	'themes',
+	'galley',
 	'ui',
 	'forms',
 	'api',
@@ -24,7 +31,7 @@ const OWN = [
 	'errors',
 	'routes'
 ];
-const PURE = ['physics', 'widget', 'factcheck', 'workflow'];
+const PURE = ['physics', 'widget', 'factcheck', 'workflow', 'copy-lint', 'import', 'export'];
 
 const TABLE = {
 	physics: {
@@ -34,7 +41,7 @@ const TABLE = {
 	},
 	widget: {
 		own: ['physics', 'errors'],
-		packages: ['zod', '@noble/hashes'],
+		packages: ['zod', '@noble/hashes', 'diff'],
 		why: 'a document and what follows from it must come out the same in the builder, the frame and the fact-check'
 	},
 	factcheck: {
@@ -48,8 +55,23 @@ const TABLE = {
 		packages: [],
 		why: 'permissions and states are decided from plain facts, so that services and pages can ask the same function'
 	},
+	'copy-lint': {
+		own: ['widget'],
+		packages: [],
+		why: 'a note on the copy depends on the copy alone'
+	},
+	import: {
+		own: [],
+		packages: ['markdown-it'],
+		why: 'an import is plain data about blocks, whoever asks for it'
+	},
+	export: {
+		own: ['physics', 'widget', 'factcheck'],
+		packages: [],
+		why: 'what is printed of a piece depends on the piece and its readings alone'
+	},
 	forms: {
-		own: ['widget', 'workflow', 'errors', 'physics'],
+		own: ['widget', 'workflow', 'errors', 'physics', 'themes'],
 		packages: ['zod'],
 		why: 'a form is a schema that the page and the service share'
 	},
@@ -75,9 +97,36 @@ const TABLE = {
 		packages: ['svelte', 'sveltekit-superforms', 'idb-keyval', '\\$app/(state|navigation|forms)'],
 		why: 'writing and vetting a calculator happens in a browser: it reaches the server over HTTP'
 	},
+	pictures: {
+		own: ['ui', 'errors', 'routes'],
+		types: ['widget'],
+		packages: ['zod', 'svelte'],
+		why: 'the picture desk happens in a browser: it reaches the server over HTTP and knows no document but the block it fills'
+	},
+	typeset: {
+		own: ['renderer', 'pictures', 'physics', 'routes'],
+		packages: ['svelte', 'katex'],
+		why: 'equations are set on the server for readers and in the browser for the office, by one function'
+	},
+	themes: {
+		own: ['renderer', 'ui', 'forms', 'widget', 'physics', 'errors', 'routes'],
+		packages: ['svelte', 'sveltekit-superforms', '\\$app/(state|navigation|forms)'],
+		why: 'a theme is two colours and rules, and is written in a browser: it reaches the server over HTTP'
+	},
+	galley: {
+		own: ['renderer', 'typeset', 'ui', 'widget', 'physics', 'errors', 'routes'],
+		packages: ['svelte', 'axe-core$'],
+		why: 'the galley looks at the drawn frame in a browser: it asks the server for nothing'
+	},
 	builder: {
 		own: [
+			'copy-lint',
+			'import',
+			'export',
+			'pictures',
+			'typeset',
 			'renderer',
+			'vetting',
 			'ui',
 			'forms',
 			'factcheck',
@@ -155,7 +204,8 @@ function mayImport(folder, parsing) {
 	}
 	if (folder === 'renderer') {
 		patterns.push({
-			regex: '(?:^|/)widget/(?:document|parse|upgrades)\\.ts$',
+			regex:
+				'(?:^|/)widget/(?:document|block|chart|control|formula-step|language|references|parse|upgrades)\\.ts$',
 			allowTypeImports: true,
 			message: 'The frame carries no zod: take only types from the document’s schema.'
 		});

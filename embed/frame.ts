@@ -6,8 +6,10 @@ import './document.css';
 import { hydrate } from 'svelte';
 import type { Calculator, CalculatorSet } from '../src/lib/physics/calculator.ts';
 import type { HouseDefinition } from '../src/lib/physics/house/definition.ts';
+import { loadChartViews } from '../src/lib/renderer/blocks/chart-views.ts';
 import Frame from '../src/lib/renderer/Frame.svelte';
 import type { FrameRelease } from '../src/lib/renderer/release.ts';
+import { loadPrintWords } from '../src/lib/widget/languages/load.ts';
 import { heightMessage } from './messages.ts';
 
 /** The release in the document, and where the script of each of its calculators is. */
@@ -17,9 +19,11 @@ interface Inlined {
 }
 
 async function wake(target: HTMLElement, { release, calculators }: Inlined): Promise<void> {
-	const loaded = await Promise.all(
-		Object.entries(calculators).map(([id, address]) => loadCalculator(id, address))
-	);
+	const [loaded] = await Promise.all([
+		Promise.all(Object.entries(calculators).map(([id, address]) => loadCalculator(id, address))),
+		loadChartViews(release.document),
+		loadPrintWords(release.document.language)
+	]);
 	// A release from before the house had calculators of its own carries none.
 	const own = await buildAll(release.houseCalculators ?? []);
 	hydrate(Frame, {

@@ -1,10 +1,12 @@
 /** The server's entry, built to build/serve.js: settings from the environment, pages from build/app. */
 import process from 'node:process';
-import { readEnv } from '../src/lib/server/env.ts';
+import { LARGEST_BYTES } from '../src/lib/pictures/view.ts';
+import { readEnv, takeUploads } from '../src/lib/server/env.ts';
 import { startServer, stopOnSignals } from './server.ts';
 
 try {
 	const env = readEnv();
+	takeUploads(LARGEST_BYTES);
 	const server = await startServer({
 		host: env.HOST,
 		port: env.PORT,

@@ -92,7 +92,7 @@ function ask(
 }
 
 const POLICY =
-	"default-src 'none'; script-src 'self'; style-src 'sha256-abc='; font-src 'self'; connect-src 'none'; base-uri 'none'; " +
+	"default-src 'none'; script-src 'self'; style-src 'sha256-abc='; font-src 'self'; img-src 'self'; connect-src 'none'; base-uri 'none'; " +
 	"form-action 'none'; object-src 'none'; frame-ancestors *; " +
 	'sandbox allow-scripts allow-popups allow-popups-to-escape-sandbox; ' +
 	"require-trusted-types-for 'script'; trusted-types svelte-trusted-html";

@@ -22,6 +22,10 @@ export default defineConfig({
 	root: ROOT,
 	base: '/press/',
 	publicDir: false,
+	resolve: {
+		// Each form of chart is a script of its own, which only the frames that show it load.
+		alias: [{ find: /^(.*)\/chart-views\.ts$/, replacement: '$1/chart-views-later.ts' }]
+	},
 	plugins: [
 		signs(),
 		leaveOut(),
@@ -56,7 +60,16 @@ export default defineConfig({
 				chunkFileNames: '[name]-[hash].js',
 				assetFileNames: '[name]-[hash][extname]',
 				// All that every frame needs packs better, and comes sooner, as one file.
-				codeSplitting: { groups: [{ name: 'core', test: /\/renderer\/Frame\.svelte$/ }] }
+				codeSplitting: {
+					groups: [
+						{ name: 'core', test: /\/renderer\/Frame\.svelte$/ },
+						// What all forms of chart share, so that a chart takes two requests and not six.
+						{
+							name: 'chart',
+							test: /\/figures\/(?:ChartFigure|LevelTicks|axis|place-labels|item-table)\b/
+						}
+					]
+				}
 			}
 		}
 	}

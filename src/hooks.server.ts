@@ -1,3 +1,4 @@
+import '$lib/factcheck/lexicon/all.ts';
 import { sequence } from '@sveltejs/kit/hooks';
 import { redirect, type Handle, type HandleServerError, type ServerInit } from '@sveltejs/kit';
 import { explanations, SteelyardError } from '$lib/errors.ts';
@@ -6,10 +7,10 @@ import { sessionIdOf } from '$lib/server/auth/auth-js.ts';
 import { cookieNames } from '$lib/server/auth/cookies.ts';
 import { newId } from '$lib/server/db/ids.ts';
 import { house, openHouseOnce } from '$lib/server/house.ts';
+import { bodyLimitOf, withinLimit } from '$lib/server/http/body-limit.ts';
 import { apiFailure } from '$lib/server/http/failures.ts';
 import { guardOf } from '$lib/server/http/guard.ts';
 import { withSecurityHeaders } from '$lib/server/http/headers.ts';
-import { BODY_LIMIT_BYTES } from '$lib/server/http/json-body.ts';
 import { originRefusal } from '$lib/server/http/origin-check.ts';
 import { logFault } from '$lib/server/log.ts';
 import { readSession } from '$lib/server/services/sessions.ts';
@@ -25,7 +26,8 @@ const answer: Handle = async ({ event, resolve }) => {
 	return withSecurityHeaders(response, {
 		secure: house().origin.startsWith('https:'),
 		personal: event.locals.actor !== null || event.request.method !== 'GET',
-		requestId: event.locals.requestId
+		requestId: event.locals.requestId,
+		framedByUs: event.route.id?.startsWith('/(strip)') ?? false
 	});
 };
 
@@ -40,9 +42,10 @@ const refuseForeign: Handle = ({ event, resolve }) => {
 		const refusal = originRefusal(event.request, house().origin);
 		if (refusal) return Response.json({ error: { message: refusal } }, { status: 403 });
 	}
-	if (Number(event.request.headers.get('content-length')) > BODY_LIMIT_BYTES) {
-		return apiFailure(new SteelyardError('too-large'));
-	}
+	const limit = bodyLimitOf(event.route.id, event.request.method);
+	if (Number(event.request.headers.get('content-length')) > limit.bytes)
+		return apiFailure(new SteelyardError(limit.code));
+	event.request = withinLimit(event.request, limit.bytes);
 	return resolve(event);
 };
 

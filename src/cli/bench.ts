@@ -5,10 +5,11 @@
 import { writeFileSync } from 'node:fs';
 import { cpus, loadavg } from 'node:os';
 import { parseArgs } from 'node:util';
+import { benchBuilder } from './bench/builder.ts';
 import { benchCalculators } from './bench/calculators.ts';
 import { giveUp, Plain, say, seconds } from './set-up/say.mjs';
 
-const PARTS = { calculators: benchCalculators };
+const PARTS = { calculators: benchCalculators, builder: benchBuilder };
 const TURN_SECONDS = 0.1;
 
 function options() {

@@ -1,7 +1,9 @@
 /** One line of `weigh`: the request as sent, checked, weighed and answered. */
 import { z } from 'zod';
 import { detectQuantities, type DetectedQuantity } from '../lib/factcheck/detect.ts';
-import { hedgeFamily, LANGUAGES, type Language } from '../lib/factcheck/hedges.ts';
+import '../lib/factcheck/lexicon/all.ts';
+import { hedgeFamily } from '../lib/factcheck/hedges.ts';
+import { LANGUAGES, type Language } from '../lib/widget/language.ts';
 import type { Verdict } from '../lib/factcheck/verdict.ts';
 import { weigh, type WeighedReading } from '../lib/factcheck/weigh.ts';
 import { commensurable, suggestUnit, unitNamed, unitOf } from '../lib/physics/units/units.ts';
@@ -25,6 +27,7 @@ const ReadingFields = {
 };
 
 const BareForm = z.object({
+	lang: z.string().nullish(),
 	hedge: z.string().max(60).nullish(),
 	numeral: z.union([z.string().max(60), z.number()]),
 	scale: z.number().positive().max(1e300).nullish(),
@@ -139,14 +142,16 @@ function unknownLanguage(lang: string): LineError {
 function weighBare(sent: Record<string, unknown>): WeighAnswer {
 	const form = BareForm.safeParse(sent);
 	if (!form.success) return shapeError(form.error);
-	const { hedge, scale, value } = form.data;
-	const family = hedgeFamily(hedge ?? '', 'en');
+	const { hedge, scale, value, lang } = form.data;
+	const language = languageOf(lang ?? 'en');
+	if (!language) return unknownLanguage(lang ?? '');
+	const family = hedgeFamily(hedge ?? '', language);
 	if (!family)
 		return lineError(
 			'unknown-hedge',
 			`“${hedge}” is no hedge of the house. Send '' or 'bare' for none.`
 		);
-	const numeral = plainNumeral(form.data.numeral);
+	const numeral = plainNumeral(form.data.numeral, language);
 	if (numeral === null) {
 		return lineError(
 			'not-a-numeral',
@@ -161,21 +166,27 @@ function weighBare(sent: Record<string, unknown>): WeighAnswer {
 		unit: ''
 	};
 	// In this form the reading of “up to” is the highest of its range.
-	return weigh(stated, {
-		value,
-		unit: '',
-		uncertainty: uncertaintyOf(form.data),
-		maximum: family === 'up-to'
-	});
+	return weigh(
+		stated,
+		{ value, unit: '', uncertainty: uncertaintyOf(form.data), maximum: family === 'up-to' },
+		language
+	);
 }
 
-function plainNumeral(written: string | number): string | null {
-	const text = typeof written === 'number' ? plainDecimal(written) : written.trim();
+function plainNumeral(written: string | number, language: Language): string | null {
+	const text = typeof written === 'number' ? plainDecimal(written) : pointed(written, language);
 	const plain = text
 		.replace(/^[−-]/, '-')
 		.replace(/(?<=\d)[,\s\u00a0\u202f\u2009](?=\d{3}(?!\d))/g, '');
 	const digits = plain.replace(/^(-?)\./, '$10.');
 	return /^-?\d+(?:\.\d+)?$/.test(digits) ? digits : null;
+}
+
+/** With a point for the decimal mark, whatever the language writes. */
+function pointed(written: string, language: Language): string {
+	const text = written.trim();
+	if (language === 'en') return text;
+	return text.replace(/(?<=\d)\.(?=\d{3}(?!\d))/g, '').replace(',', '.');
 }
 
 /** An uncertainty of 0 says exact, unless the line says that it isn’t. No number at all says that none is known. */
@@ -214,13 +225,17 @@ function weighSentence(sent: Record<string, unknown>): WeighAnswer {
 					'“value” is missing. Send the calculator’s reading, or null where there is none.'
 				);
 	}
-	const verdict = weigh(quantity.stated, {
-		value,
-		unit: unit.symbol,
-		uncertainty: uncertaintyOf(form.data),
-		maximum: Boolean(values) || kind === 'maximum',
-		...(kind ? { quantity: kind } : {})
-	});
+	const verdict = weigh(
+		quantity.stated,
+		{
+			value,
+			unit: unit.symbol,
+			uncertainty: uncertaintyOf(form.data),
+			maximum: Boolean(values) || kind === 'maximum',
+			...(kind ? { quantity: kind } : {})
+		},
+		language
+	);
 	if (!quantity.doubleHedge) return verdict;
 	return { ...verdict, severity: 'block', reason: 'Two hedges on one number: keep one.' };
 }

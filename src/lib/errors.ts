@@ -66,6 +66,21 @@ export const explanations = {
 		message: 'Someone else saved this piece while you were writing.',
 		help: 'Load their version, or keep yours as the newest. Both are kept.'
 	},
+	'slip-changed': {
+		status: 409,
+		message: 'Someone else has changed this slip meanwhile.',
+		help: 'Look at what it says now, then change it again.'
+	},
+	'piece-spiked': {
+		status: 403,
+		message: 'This piece is on the spike.',
+		help: 'Take it off the spike at the desk, then go on. Nothing of it is lost.'
+	},
+	'piece-out': {
+		status: 409,
+		message: 'This piece has been released, so it can’t be spiked.',
+		help: 'Readers may have it open. Change it, or leave it as it stands.'
+	},
 	'document-broken': {
 		status: 422,
 		message: 'This document doesn’t hang together.',
@@ -141,6 +156,11 @@ export const explanations = {
 		message: 'Someone else has proposed a newer revision meanwhile.',
 		help: 'Open the newest one, and make your change on it.'
 	},
+	'formula-broken': {
+		status: 409,
+		message: 'This formula doesn’t hold any more.',
+		help: 'The writer mends it on the bench, and pulls a new proof.'
+	},
 	'vetting-out-of-order': {
 		status: 409,
 		message: 'This revision doesn’t stand where it could take this step.',
@@ -150,6 +170,76 @@ export const explanations = {
 		status: 503,
 		message: 'The store for published pieces doesn’t answer.',
 		help: 'Nothing was published. Try again in a minute.'
+	},
+	'picture-refused': {
+		status: 422,
+		message: 'This file can’t be taken as a picture.',
+		help: 'What is wrong, and how to mend it, stands beside the file.'
+	},
+	'picture-too-heavy': {
+		status: 413,
+		message: 'This file is larger than 10 MB.',
+		help: 'Make the picture smaller in a picture program, or save it as JPEG or WebP.'
+	},
+	'picture-cut-off': {
+		status: 400,
+		message: 'The file stopped coming before it was whole.',
+		help: 'Nothing of it is kept. Send it again.'
+	},
+	'pictures-slowed': {
+		status: 429,
+		message: 'Many pictures are coming in at once.',
+		help: 'Wait a few seconds and send this one again.'
+	},
+	'pictures-full': {
+		status: 409,
+		message: 'You have brought 500 pictures to the desk, which is as many as one person may.',
+		help: 'Delete some that aren’t used, or ask a colleague to add this one.'
+	},
+	'picture-changed': {
+		status: 409,
+		message: 'Someone else has changed this picture’s record meanwhile.',
+		help: 'Look at what they wrote, then save yours again if it still holds.'
+	},
+	'picture-not-ready': {
+		status: 409,
+		message: 'This picture’s record isn’t complete.',
+		help: 'Fill in what is listed, then use it.'
+	},
+	'picture-used': {
+		status: 409,
+		message: 'This picture is used.',
+		help: 'Take it out of the drafts that are listed, or replace it. What is in proofs and releases stays for good.'
+	},
+	'picture-missing': {
+		status: 409,
+		message: 'A picture of this piece is no longer at the picture desk.',
+		help: 'Put another in its place in the manuscript, and pull a new proof.'
+	},
+	'word-file-refused': {
+		status: 422,
+		message: 'This file can’t be brought in.',
+		help: 'What is wrong, and how to mend it, stands beside the file.'
+	},
+	'word-file-too-heavy': {
+		status: 413,
+		message: 'This file is larger than 5 MB.',
+		help: 'Save it without its pictures, or paste the text into the manuscript.'
+	},
+	'word-files-slowed': {
+		status: 429,
+		message: 'Two files are being read already.',
+		help: 'Wait a few seconds and send this one again.'
+	},
+	'theme-fails': {
+		status: 422,
+		message: 'This theme can’t be read well enough.',
+		help: 'Each pair that fails is named, with the nearest colour that would do.'
+	},
+	'theme-name-taken': {
+		status: 409,
+		message: 'Another theme has this name.',
+		help: 'Choose another name.'
 	},
 	'input-broken': {
 		status: 422,

@@ -173,8 +173,8 @@ describe('a calculator of the house', { timeout: 120_000 }, () => {
 		await page.keyboard.press('Control+b');
 		await add(page, 'how long does thunder take?');
 		const sound = bench.getByRole('region', { name: 'Speed of sound in air' });
-		await sound.getByRole('button', { name: /Make a slider of this/ }).click();
-		await bench.getByLabel('What the slider moves').fill('The air’s temperature');
+		await sound.getByRole('button', { name: /Make a control of this/ }).click();
+		await bench.getByLabel('What it moves').fill('The air’s temperature');
 		for (const [label, value] of [
 			['From', '250'],
 			['To', '320'],
@@ -183,7 +183,7 @@ describe('a calculator of the house', { timeout: 120_000 }, () => {
 		] as const) {
 			await bench.getByLabel(label, { exact: true }).fill(value);
 		}
-		await bench.getByRole('button', { name: 'Make the slider' }).click();
+		await bench.getByRole('button', { name: 'Make the control' }).click();
 		await add(page, 'thrown at a speed and an angle');
 		const flight = bench.getByRole('region', { name: /without air/ });
 		await flight
@@ -207,7 +207,7 @@ describe('a calculator of the house', { timeout: 120_000 }, () => {
 		await page.keyboard.press('Control+End');
 		await page.keyboard.press('Enter');
 		await page.keyboard.type('/');
-		await page.getByRole('combobox', { name: 'Insert' }).fill('slider');
+		await page.getByRole('combobox', { name: 'Insert' }).fill('control:');
 		await page.keyboard.press('Enter');
 		await expect
 			.poll(() => page.getByRole('status', { name: 'Keeping' }).innerText(), SOON)

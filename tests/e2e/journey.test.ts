@@ -110,9 +110,9 @@ describe('first light on the dial', { timeout: 120_000 }, () => {
 		await manuscript.click();
 		await page.keyboard.press('Control+End');
 		await page.keyboard.press('Enter');
-		await insert(page, 'slider');
-		await insert(page, 'chart');
-		const chart = page.getByRole('form', { name: 'Chart' });
+		await insert(page, 'control:');
+		await insert(page, 'chart: line');
+		const chart = page.getByRole('form', { name: 'Line chart' });
 		await chart
 			.getByLabel(/^Reading, upwards/)
 			.selectOption({ label: 'D · Frequency as observed, Redshifted line' });
@@ -331,8 +331,8 @@ async function wireTheBench(page: Page): Promise<void> {
 	await addCalculator(page, 'age to redshift');
 
 	const age = bench.getByRole('region', { name: 'Age or distance to redshift' });
-	await age.getByRole('button', { name: /Make a slider of this/ }).click();
-	await bench.getByLabel('What the slider moves').fill('The wave left at this age');
+	await age.getByRole('button', { name: /Make a control of this/ }).click();
+	await bench.getByLabel('What it moves').fill('The wave left at this age');
 	await bench.locator('form').getByLabel(/^Unit/).selectOption('Myr');
 	for (const [label, value] of [
 		['From', '100'],
@@ -342,7 +342,7 @@ async function wireTheBench(page: Page): Promise<void> {
 	] as const) {
 		await bench.getByLabel(label, { exact: true }).fill(value);
 	}
-	await bench.getByRole('button', { name: 'Make the slider' }).click();
+	await bench.getByRole('button', { name: 'Make the control' }).click();
 
 	await addCalculator(page, 'redshifted line');
 	const line = bench.getByRole('region', { name: 'Redshifted line' });

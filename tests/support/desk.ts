@@ -1,7 +1,8 @@
 /** A piece on its way, for service tests: three people and the demo's own document, brought as far as a test needs. */
 import { firstLight } from '../../src/lib/server/demo/first-light.ts';
 import { signClaim } from '../../src/lib/server/services/claims.ts';
-import { createPiece, getPiece, saveDraft } from '../../src/lib/server/services/pieces.ts';
+import { createPiece } from '../../src/lib/server/services/draft-start.ts';
+import { getPiece, saveDraft } from '../../src/lib/server/services/pieces.ts';
 import { passProof, pullProof } from '../../src/lib/server/services/proofs.ts';
 import type { Inline, WidgetDocument } from '../../src/lib/widget/document.ts';
 import type { ClaimState, PieceView } from '../../src/lib/workflow/piece.ts';

@@ -3,7 +3,7 @@ import type { Client, Context, Fixtures } from '../../src/lib/server/context.ts'
 import type { Db } from '../../src/lib/server/db/client.ts';
 import { addPerson, readActor } from '../../src/lib/server/services/people.ts';
 import { openSession } from '../../src/lib/server/services/sessions.ts';
-import type { ObjectStore } from '../../src/lib/server/store/object-store.ts';
+import type { ObjectStore, StoredKey } from '../../src/lib/server/store/object-store.ts';
 import type { Role } from '../../src/lib/workflow/permissions.ts';
 
 export const ORIGIN = 'http://localhost:4700';
@@ -14,12 +14,15 @@ export const noShelf = {} as Fixtures['shelf'];
 
 export class MemoryStore implements ObjectStore {
 	readonly objects = new Map<string, Uint8Array>();
+	/** When each was put. */
+	readonly putAt = new Map<string, Date>();
 	/** Thrown by every call while it is set. */
 	failure: Error | null = null;
 
 	async put(key: string, bytes: Uint8Array): Promise<void> {
 		this.#answer();
 		this.objects.set(key, bytes);
+		this.putAt.set(key, new Date());
 	}
 	async get(key: string): Promise<Uint8Array | null> {
 		this.#answer();
@@ -28,6 +31,16 @@ export class MemoryStore implements ObjectStore {
 	async head(key: string): Promise<boolean> {
 		this.#answer();
 		return this.objects.has(key);
+	}
+	async remove(key: string): Promise<void> {
+		this.#answer();
+		this.objects.delete(key);
+	}
+	async list(prefix: string): Promise<StoredKey[]> {
+		this.#answer();
+		return [...this.objects.keys()]
+			.filter((key) => key.startsWith(prefix))
+			.map((key) => ({ key, putAt: this.putAt.get(key) ?? new Date() }));
 	}
 	close(): void {
 		this.objects.clear();

@@ -30,6 +30,10 @@ export interface House {
 	mail: MailFake;
 	/** Where the server keeps its data. */
 	dataFolder: string;
+	/** Where the object store keeps its objects. */
+	storeFolder: string;
+	/** The server's process. */
+	pid(): number;
 	/** All that the server has printed since it last started. */
 	said(): string;
 	/** Ends the server with the signal and waits until it is gone; resolves to its exit code, null after SIGKILL. */
@@ -139,6 +143,8 @@ export async function startHouse({
 		partner: partner.url,
 		mail,
 		dataFolder,
+		storeFolder: join(folder, 'store'),
+		pid: () => running.child.pid ?? 0,
 		said: () => running.said(),
 		end,
 		startAgain: start,

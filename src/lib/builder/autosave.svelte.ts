@@ -1,6 +1,7 @@
 /**
  * Keeps the draft: into this browser's journal at once, to the server a moment later, and says where it stands.
- * Nothing here is thrown away until the server has said that it keeps it.
+ * Nothing here is thrown away until the server has said that it keeps it. Where someone else has kept a newer version,
+ * it is merged in over the last one that both had, and the result is kept.
  */
 import type { WidgetDocument } from '../widget/document.ts';
 import { digestOf } from '../widget/freeze.ts';
@@ -16,6 +17,7 @@ const FIRST_RETRY_MS = 1_000;
 const LONGEST_RETRY_MS = 15_000;
 /** A server that takes longer than this to answer counts as away. */
 const LONGEST_ANSWER_MS = 15_000;
+const MOST_TURNS = 4;
 
 export type KeepState =
 	| { name: 'kept' }
@@ -24,7 +26,8 @@ export type KeepState =
 	/** The server doesn't answer; `nextTry` counts from 1. */
 	| { name: 'away'; tries: number }
 	| { name: 'signed-out' }
-	| { name: 'conflict'; theirs: TheirVersion }
+	/** Someone's newer version can't be read in this window. */
+	| { name: 'unreadable'; theirs: TheirVersion }
 	| { name: 'refused'; issues: RefusedIssue[] };
 
 export interface RefusedIssue {
@@ -36,14 +39,22 @@ export interface RefusedIssue {
 export interface TheirVersion {
 	version: number;
 	savedAt: string;
-	savedBy: string;
+	savedBy: { personId: string; name: string };
 	document: unknown;
 }
+
+/** `unfinished`: one's own words don't hang together, so the server's answer to them comes first. */
+export type TakenIn = 'taken' | 'unreadable' | 'unfinished';
 
 export interface Kept {
 	version: number;
 	/** ISO 8601, UTC. */
 	savedAt: string;
+}
+
+/** What the sheet starts from: what the server has. */
+export interface Started extends Kept {
+	document: unknown;
 }
 
 export interface AutosaveParts {
@@ -53,6 +64,8 @@ export interface AutosaveParts {
 	now: () => Date;
 	/** The draft as it stands; called when it is about to be kept. */
 	draft: () => WidgetDocument;
+	/** Merges their version into the draft, over the document that both grew from; null when that isn't known. */
+	takeIn: (base: unknown, theirs: TheirVersion) => TakenIn;
 }
 
 export class Autosave {
@@ -67,13 +80,16 @@ export class Autosave {
 	#waitingSince: number | null = null;
 	#changesMade = 0;
 	#underWay: Promise<void> | null = null;
+	/** The document of `version`, as the server has it; null when it isn't known. */
+	#base: unknown;
 	/** Digests of drafts sent whose answer never came: the server may have kept one of them all the same. */
 	#unanswered = new Set<string>();
 
-	constructor(parts: AutosaveParts, kept: Kept) {
+	constructor(parts: AutosaveParts, { version, savedAt, document }: Started) {
 		this.#parts = parts;
-		this.version = kept.version;
-		this.keptAt = kept.savedAt;
+		this.version = version;
+		this.keptAt = savedAt;
+		this.#base = document;
 	}
 
 	get isSynced(): boolean {
@@ -86,8 +102,8 @@ export class Autosave {
 		const { name } = this.state;
 		if (name === 'kept' || name === 'refused') this.state = { name: 'unsynced' };
 		this.#journalTimer ??= setTimeout(() => void this.flushJournal(), JOURNAL_MS);
-		// A conflict waits for the writer, a lost sign-in and an away server for their own next try.
-		if (name === 'conflict' || name === 'signed-out' || name === 'away') return;
+		// What can't be read waits for a newer window, a lost sign-in and an away server for their own next try.
+		if (name === 'unreadable' || name === 'signed-out' || name === 'away') return;
 		this.#keepSoon();
 	}
 
@@ -111,7 +127,14 @@ export class Autosave {
 	entry(): JournalEntry {
 		// The journal outlives this page, so it takes plain data, not the editor's own objects.
 		const document: unknown = JSON.parse(JSON.stringify(this.#parts.draft()));
-		return { baseVersion: this.version, document, at: this.#parts.now().toISOString() };
+		const at = this.#parts.now().toISOString();
+		return { baseVersion: this.version, base: this.#base, document, at };
+	}
+
+	/** Goes on from words that a window left behind: they grew from this version, and aren't kept yet. */
+	goOnFrom({ baseVersion, base }: JournalEntry): void {
+		this.version = baseVersion;
+		this.#base = base ?? null;
 	}
 
 	/** Asks the server to keep the draft as it stands; tries again by itself while the server is away. */
@@ -130,7 +153,11 @@ export class Autosave {
 	/** Waits for the save under way, then keeps what was typed since. True when the server has every word. */
 	async keepAll(): Promise<boolean> {
 		await this.#underWay;
-		if (!this.isSynced) await this.tryNow();
+		// What a merge brings in is one more save; someone who keeps typing beside us could go on for ever.
+		for (let turn = 0; turn < MOST_TURNS && !this.isSynced; turn += 1) {
+			await this.tryNow();
+			if ((this.state as KeepState).name !== 'unsynced') break;
+		}
 		return this.isSynced;
 	}
 
@@ -140,7 +167,7 @@ export class Autosave {
 		const tries = this.state.name === 'away' ? this.state.tries : 0;
 		if (tries === 0) this.state = { name: 'keeping' };
 		const body = JSON.stringify({ baseVersion: this.version, document: this.#parts.draft() });
-		this.#unanswered.add(digestIn(body));
+		this.#unanswered.add(digestOf(documentIn(body)));
 		try {
 			const response = await this.#parts.fetch(this.#parts.address, {
 				method: 'PUT',
@@ -148,15 +175,20 @@ export class Autosave {
 				body,
 				signal: AbortSignal.timeout(LONGEST_ANSWER_MS)
 			});
-			await this.#settle(response, sentChanges, tries);
+			await this.#settle(response, body, sentChanges, tries);
 		} catch {
 			// No answer, half an answer, or one that isn't the house's own: to the writer, the server is away.
 			this.#tryLater(tries);
 		}
 	}
 
-	async #settle(response: Response, sentChanges: number, tries: number): Promise<void> {
-		if (response.ok) return this.#settleKept((await response.json()) as Kept, sentChanges);
+	async #settle(
+		response: Response,
+		body: string,
+		sentChanges: number,
+		tries: number
+	): Promise<void> {
+		if (response.ok) return this.#settleKept((await response.json()) as Kept, body, sentChanges);
 		switch (response.status) {
 			case 401:
 				this.state = { name: 'signed-out' };
@@ -175,7 +207,8 @@ export class Autosave {
 		void this.flushJournal();
 	}
 
-	#settleKept({ version, savedAt }: Kept, sentChanges: number): void {
+	#settleKept({ version, savedAt }: Kept, body: string, sentChanges: number): void {
+		this.#base = documentIn(body);
 		this.version = version;
 		this.keptAt = savedAt;
 		this.#unanswered.clear();
@@ -190,13 +223,22 @@ export class Autosave {
 		this.#keepSoon();
 	}
 
-	/** The newer version may be one of our own, whose answer was lost on the way. */
+	/** The newer version may be one of our own, whose answer was lost on the way; any other is merged in. */
 	#settleConflict(theirs: TheirVersion): void {
 		if (!this.#unanswered.has(digestOf(theirs.document))) {
-			this.state = { name: 'conflict', theirs };
-			return;
+			const taken = this.#parts.takeIn(this.#base, theirs);
+			if (taken === 'unreadable') {
+				this.state = { name: 'unreadable', theirs };
+				return;
+			}
+			if (taken === 'unfinished') {
+				this.state = { name: 'unsynced' };
+				this.#keepSoon();
+				return;
+			}
 		}
 		this.version = theirs.version;
+		this.#base = theirs.document;
 		this.keptAt = theirs.savedAt;
 		this.state = { name: 'unsynced' };
 		this.#keepSoon();
@@ -211,42 +253,13 @@ export class Autosave {
 
 	/** After a sign-in in another tab, or when the writer doesn't want to wait. */
 	tryNow(): Promise<void> {
-		if (this.state.name === 'conflict') return Promise.resolve();
 		this.state = { name: 'unsynced' };
 		return this.keep();
 	}
 
-	/** Keeps this browser's words as the newest version, on top of theirs, which are set aside here. */
-	keepMine(): Promise<void> {
-		if (this.state.name !== 'conflict') return Promise.resolve();
-		const { version, savedAt, document } = this.state.theirs;
-		void this.#parts.journal.setAside({ baseVersion: version, at: savedAt, document });
-		this.version = version;
-		this.state = { name: 'unsynced' };
-		return this.keep();
-	}
-
-	/** Sets this browser's words aside and goes on from theirs; the caller puts their words into the editor. */
-	takeTheirs(): TheirVersion | null {
-		if (this.state.name !== 'conflict') return null;
-		const { theirs } = this.state;
-		void this.#moveAside(this.entry());
-		this.version = theirs.version;
-		this.keptAt = theirs.savedAt;
-		this.state = { name: 'kept' };
-		return theirs;
-	}
-
-	/** The journal lets go of its newest entry only when that one is safe beside it. */
-	async #moveAside(entry: JournalEntry): Promise<void> {
-		const { journal } = this.#parts;
-		await journal.setAside(entry);
-		if (journal.works && this.isSynced) await journal.clear();
-	}
-
-	/** Words in the journal grew from an older version than the server's: the writer decides. */
-	meetConflict(theirs: TheirVersion): void {
-		this.state = { name: 'conflict', theirs };
+	/** The network is back: what waits for the server needn't wait out its time. */
+	online(): void {
+		if (this.state.name === 'away') void this.tryNow();
 	}
 
 	stop(): void {
@@ -258,7 +271,7 @@ export class Autosave {
 interface ConflictDetails {
 	version: number;
 	savedAt: string;
-	savedBy: { name: string };
+	savedBy: { personId: string; name: string };
 	document: unknown;
 }
 
@@ -266,7 +279,7 @@ interface ConflictDetails {
 function theirVersion(body: unknown): TheirVersion {
 	const { version, savedAt, savedBy, document } = (body as { error: { details: ConflictDetails } })
 		.error.details;
-	return { version, savedAt, savedBy: savedBy.name, document };
+	return { version, savedAt, savedBy, document };
 }
 
 function issuesOf(body: unknown): RefusedIssue[] {
@@ -279,7 +292,7 @@ function issuesOf(body: unknown): RefusedIssue[] {
 	return [{ path: '', message: message || 'The server can’t keep this draft.' }];
 }
 
-/** The digest of a body's document as the server reads it: what JSON doesn't carry is gone. */
-function digestIn(body: string): string {
-	return digestOf((JSON.parse(body) as { document: unknown }).document);
+/** A body's document as the server reads it: what JSON doesn't carry is gone. */
+function documentIn(body: string): unknown {
+	return (JSON.parse(body) as { document: unknown }).document;
 }

@@ -1,15 +1,17 @@
 import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest';
 import type { WidgetDocument } from '../widget/document.ts';
-import { Autosave } from './autosave.svelte.ts';
+import { Autosave, type TakenIn, type TheirVersion } from './autosave.svelte.ts';
 import type { Journal, JournalEntry } from './journal.ts';
+import type { OpenAsk } from './keep-asks.ts';
 import { PatientJournal } from './patient-journal.svelte.ts';
 
 const EMPTY: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: '',
 	point: '',
+	formulas: [],
 	steps: [],
 	controls: [],
 	blocks: [],
@@ -19,7 +21,9 @@ const EMPTY: WidgetDocument = {
 class MemoryJournal implements Journal {
 	entry: JournalEntry | null = null;
 	aside: JournalEntry[] = [];
-	read = () => Promise.resolve(this.entry);
+	asks: OpenAsk[] = [];
+	read = () => Promise.resolve([]);
+	letGo = () => Promise.resolve();
 	write = (entry: JournalEntry) => {
 		this.entry = entry;
 		return Promise.resolve();
@@ -37,6 +41,16 @@ class MemoryJournal implements Journal {
 		this.aside = this.aside.filter((entry) => entry.at !== at);
 		return Promise.resolve();
 	};
+	keepAsk = (ask: OpenAsk) => {
+		this.asks = [...this.asks.filter(({ id }) => id !== ask.id), ask];
+		return Promise.resolve();
+	};
+	listAsks = () => Promise.resolve([...this.asks]);
+	dropAsk = (id: string) => {
+		this.asks = this.asks.filter((ask) => ask.id !== id);
+		return Promise.resolve();
+	};
+	close = () => undefined;
 }
 
 /** A server that keeps versions as the real one does, and can be taken away. */
@@ -86,6 +100,8 @@ describe('autosave', () => {
 	let journal: MemoryJournal;
 	let title: string;
 	let autosave: Autosave;
+	/** What merging makes of both: here the two titles, one after the other. */
+	let takeIn: (base: unknown, theirs: TheirVersion) => TakenIn;
 
 	const autosaveWith = (fetch: typeof globalThis.fetch, kept: Journal | PatientJournal) =>
 		new Autosave(
@@ -94,9 +110,10 @@ describe('autosave', () => {
 				journal: kept instanceof PatientJournal ? kept : new PatientJournal(kept),
 				fetch,
 				now: () => new Date(),
-				draft: () => ({ ...EMPTY, title })
+				draft: () => ({ ...EMPTY, title }),
+				takeIn: (...both) => takeIn(...both)
 			},
-			{ version: 1, savedAt: '2026-12-08T08:59:00.000Z' }
+			{ version: 1, savedAt: '2026-12-08T08:59:00.000Z', document: EMPTY }
 		);
 
 	const type = (text: string) => {
@@ -110,6 +127,11 @@ describe('autosave', () => {
 		server = new Server();
 		journal = new MemoryJournal();
 		title = '';
+		takeIn = vi.fn((_base: unknown, theirs: TheirVersion): TakenIn => {
+			title = `${(theirs.document as WidgetDocument).title} ${title}`;
+			autosave.changed();
+			return 'taken';
+		});
 		autosave = autosaveWith(server.fetch, journal);
 	});
 
@@ -299,39 +321,106 @@ describe('autosave', () => {
 	});
 
 	describe('when someone else saved in between', () => {
-		beforeEach(async () => {
-			server.version = 4;
-			server.document = { ...EMPTY, title: 'Theirs' };
+		const theirs = (words: string) => {
+			server.version += 3;
+			server.document = { ...EMPTY, title: words };
+		};
+
+		test('their version is merged in over the last one both had, and the result is kept', async () => {
+			theirs('Theirs');
 			type('Mine');
 			await pass(400);
+			expect(takeIn).toHaveBeenCalledExactlyOnceWith(
+				EMPTY,
+				expect.objectContaining({
+					version: 4,
+					savedBy: { personId: 'p-2', name: 'Kofi Adjarra-Lund' },
+					document: { ...EMPTY, title: 'Theirs' }
+				})
+			);
+			await pass(2_000);
+			expect(server.requests.at(-1)).toEqual({
+				baseVersion: 4,
+				document: { ...EMPTY, title: 'Theirs Mine' }
+			});
+			expect(autosave.state.name).toBe('kept');
+			expect(journal.entry).toBeNull();
 		});
 
-		test('the conflict says who and when, and waits', async () => {
-			expect(autosave.state).toMatchObject({
-				name: 'conflict',
-				theirs: { version: 4, savedBy: 'Kofi Adjarra-Lund' }
-			});
-			expect(journal.entry).toMatchObject({ document: { title: 'Mine' } });
+		test('the next merge starts from what was kept last', async () => {
+			type('Mine');
+			await pass(400);
+			theirs('Theirs');
+			type('!');
+			await pass(400);
+			expect(takeIn).toHaveBeenCalledExactlyOnceWith(
+				{ ...EMPTY, title: 'Mine' },
+				expect.objectContaining({ version: 5 })
+			);
+			await pass(2_000);
+			theirs('Again');
+			type('?');
+			await pass(400);
+			expect(takeIn).toHaveBeenLastCalledWith(
+				{ ...EMPTY, title: 'Theirs Mine!' },
+				expect.objectContaining({ version: 9 })
+			);
+		});
+
+		test('what the journal holds says what it grew from', async () => {
+			theirs('Theirs');
+			server.away = true;
+			type('Mine');
+			await pass(600);
+			expect(journal.entry).toMatchObject({ baseVersion: 1, base: EMPTY });
+			server.away = false;
+			autosave.online();
+			await pass(0);
+			expect(journal.entry).toMatchObject({ baseVersion: 4, base: { title: 'Theirs' } });
+		});
+
+		test('a version that can’t be read stops the keeping, and the words stay here', async () => {
+			takeIn = vi.fn((): TakenIn => 'unreadable');
+			autosave = autosaveWith(server.fetch, journal);
+			theirs('From a newer house');
+			type('Mine');
+			await pass(400);
+			expect(autosave.state).toMatchObject({ name: 'unreadable', theirs: { version: 4 } });
 			type('!');
 			await pass(5_000);
 			expect(server.requests).toHaveLength(1);
+			expect(journal.entry).toMatchObject({ document: { title: 'Mine!' } });
 		});
 
-		test('keep mine puts these words on top of theirs', async () => {
-			await autosave.keepMine();
-			expect(server.document.title).toBe('Mine');
-			expect(journal.aside).toMatchObject([{ baseVersion: 4, document: { title: 'Theirs' } }]);
-			expect(server.version).toBe(5);
-			expect(autosave.state.name).toBe('kept');
+		test('while one’s own words don’t hang together, the server is asked what is wrong with them', async () => {
+			takeIn = vi.fn((): TakenIn => 'unfinished');
+			autosave = autosaveWith(server.fetch, journal);
+			theirs('Theirs');
+			type('Mine');
+			await pass(400);
+			server.answer = Response.json(
+				{ error: { details: { issues: [{ path: 'title', message: 'Too long.' }] } } },
+				{ status: 422 }
+			);
+			await pass(1_000);
+			expect(autosave.state).toMatchObject({ name: 'refused', issues: [{ path: 'title' }] });
+			expect(autosave.version).toBe(1);
 		});
 
-		test('load theirs sets mine aside in the journal', async () => {
-			const theirs = autosave.takeTheirs();
-			await pass(0);
-			expect(theirs?.document).toMatchObject({ title: 'Theirs' });
-			expect(journal.aside).toMatchObject([{ document: { title: 'Mine' } }]);
-			expect(autosave.version).toBe(4);
-			expect(autosave.isSynced).toBe(true);
+		test('keeping everything waits for the merge too', async () => {
+			theirs('Theirs');
+			type('Mine');
+			expect(await autosave.keepAll()).toBe(true);
+			expect(server.document.title).toBe('Theirs Mine');
+		});
+
+		test('words that a window left behind go on from what they grew from', async () => {
+			theirs('Theirs');
+			autosave.goOnFrom({ baseVersion: 2, base: { of: 'two' }, document: null, at: '' });
+			type('Left');
+			await pass(400);
+			expect(server.requests[0]).toMatchObject({ baseVersion: 2 });
+			expect(takeIn).toHaveBeenCalledExactlyOnceWith({ of: 'two' }, expect.anything());
 		});
 	});
 });

@@ -1,7 +1,7 @@
 /** Everything on the bench that a number can be tied to, in the order it hangs there, with its letter tag. */
 import type { CalculatorSet } from '../physics/calculator.ts';
-import type { ReadingRef, WidgetDocument } from '../widget/document.ts';
-import { readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
+import type { ReadingRef } from '../widget/document.ts';
+import { readingAt, type Evaluation, type ReadingOutcome, type Wired } from '../widget/evaluate.ts';
 import { tagLetter } from './wiring.ts';
 
 export interface BenchReading {
@@ -16,7 +16,7 @@ export interface BenchReading {
 
 /** Outputs first, then sliders, then settings that aren't wired from elsewhere on the bench. */
 export function benchReadings(
-	document: Pick<WidgetDocument, 'steps' | 'controls'>,
+	document: Wired,
 	evaluation: Evaluation,
 	calculators: CalculatorSet
 ): BenchReading[] {

@@ -1,24 +1,32 @@
 /** A chart's words to begin with, from what the calculators say of themselves. The writer changes them at will. */
 import type { CalculatorSet } from '../physics/calculator.ts';
 import { unitOf } from '../physics/units/units.ts';
-import type { Control, ReadingRef, WidgetDocument } from '../widget/document.ts';
+import { hasOptions } from '../widget/control.ts';
+import type { Control, LineChart, ReadingRef, WidgetDocument } from '../widget/document.ts';
 import { sampleChart } from '../widget/evaluate.ts';
 import { wiringOf } from '../widget/graph.ts';
 import { printStated, stateReading } from '../widget/stated.ts';
 import { sameRef, type BenchReading } from './bench-readings.ts';
-import type { ChartFields } from './schema.ts';
+
+export type LineFields = Omit<LineChart, 'id' | 'kind'>;
 
 export function suggestChart(
 	document: WidgetDocument,
 	reading: BenchReading,
 	control: Control,
 	calculators: CalculatorSet
-): ChartFields {
+): LineFields {
 	const unit = chartUnit(document, reading);
 	const fields = {
+		form: 'line' as const,
 		title: reading.label,
-		x: { control: control.id, label: control.label },
-		y: { reading: reading.ref, unit, label: reading.label },
+		x: {
+			control: control.id,
+			label: control.label,
+			scale: control.kind === 'log-slider' ? ('log' as const) : ('linear' as const)
+		},
+		y: { unit, label: reading.label, scale: 'linear' as const, from: 'data' as const },
+		series: [{ id: 'line', reading: reading.ref, label: '' }],
 		bands: [],
 		source: sources(document, reading.ref, calculators),
 		description: ''
@@ -50,13 +58,13 @@ function sources(document: WidgetDocument, ref: ReadingRef, calculators: Calcula
 function ends(
 	document: WidgetDocument,
 	control: Control,
-	fields: Pick<ChartFields, 'x' | 'y'>,
+	fields: Pick<LineFields, 'x' | 'y' | 'series'>,
 	calculators: CalculatorSet
 ): string {
-	const points = sampleChart(document, {}, fields, calculators);
+	const [points = []] = sampleChart(document, {}, fields, calculators);
 	const first = points[0]?.y;
 	const last = points.at(-1)?.y;
-	if (first == null || last == null) return '';
+	if (first == null || last == null || hasOptions(control)) return '';
 	const { unit, label } = fields.y;
 	const say = (value: number) =>
 		printStated(stateReading(value, unit, { unit, figures: 3, hedge: 'none' }));

@@ -1,35 +1,35 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { anyOf } from '../../../tests/support/from-schema.ts';
+import { Control, hasOptions } from '../widget/control.ts';
 import {
+	Block,
+	isTextBlock,
+	TEXT_KINDS,
 	WidgetDocument,
-	type Block,
 	type Claim,
-	type Control,
 	type Inline,
 	type Step
 } from '../widget/document.ts';
+import { LANGUAGES } from '../widget/language.ts';
 import { readableDocument, toDocument, toManuscript } from './convert.ts';
 
 const id = (prefix: string) => fc.nat(999).map((n) => `${prefix}-${n}`);
 const words = fc.string({ minLength: 1, maxLength: 30, unit: 'grapheme' });
 const finite = fc.double({ noNaN: true, noDefaultInfinity: true });
 
-const control: fc.Arbitrary<Control> = fc
-	.record({
-		id: id('control'),
-		label: words,
-		unit: fc.constantFrom('', 'MHz', 'Myr'),
-		min: fc.integer({ min: -100, max: 0 }),
-		span: fc.integer({ min: 1, max: 100 }),
-		step: fc.integer({ min: 1, max: 5 }),
-		at: fc.double({ min: 0, max: 1, noNaN: true })
-	})
-	.map(({ span, at, ...rest }) => ({
-		...rest,
-		kind: 'slider',
-		max: rest.min + span,
-		initial: rest.min + Math.floor(span * at)
-	}));
+/** Rules across a control's fields: ends in order, a start that is one of them, options of one sort. */
+const control = anyOf(Control).map((made): Control => {
+	if (hasOptions(made)) {
+		const options = made.options.map(({ label }, value) => ({ label, value }));
+		return Control.parse({ ...made, options, initial: made.initial % options.length });
+	}
+	const [min = 0, initial = 0, max = 0] = [made.min, made.initial, made.max].sort((a, b) => a - b);
+	return min < max ? { ...made, min, initial, max } : { ...made, min: 1, initial: 1, max: 2 };
+});
+
+/** Every block that is drawn from fields, by the schema. */
+const drawn = anyOf(Block).filter((block) => !isTextBlock(block));
 
 const step: fc.Arbitrary<Step> = fc.record({
 	id: id('step'),
@@ -69,7 +69,7 @@ const claim: fc.Arbitrary<Claim> = fc.oneof(
 		reading,
 		unit: fc.constantFrom('', 'MHz'),
 		figures: fc.integer({ min: 1, max: 6 }),
-		hedge: fc.constantFrom('none' as const, 'about' as const)
+		hedge: fc.constantFrom('none' as const, 'about' as const, 'fitting' as const)
 	}),
 	fc.record({ id: id('claim'), form: fc.constant('exempt' as const), reason: words })
 );
@@ -118,27 +118,18 @@ const widgetDocument: fc.Arbitrary<WidgetDocument> = fc
 		const block: fc.Arbitrary<Block> = fc.oneof(
 			fc.record({
 				id: id('block'),
-				kind: fc.constantFrom('paragraph', 'heading', 'result', 'limits', 'caution'),
+				kind: fc.constantFrom(...TEXT_KINDS),
 				content: inlines([])
 			}),
-			fc.record({ id: id('block'), kind: fc.constant('control' as const), control: id('control') }),
-			fc.record({
-				id: id('block'),
-				kind: fc.constant('chart' as const),
-				title: words,
-				x: fc.record({ control: id('control'), label: words }),
-				y: fc.record({ reading, unit: fc.constantFrom('', 'MHz'), label: words }),
-				bands: fc.array(fc.record({ from: finite, to: finite, label: words }), { maxLength: 2 }),
-				source: words,
-				description: words
-			})
+			drawn
 		);
 		return fc.record({
-			version: fc.constant(1 as const),
-			language: fc.constant('en' as const),
+			version: fc.constant(2 as const),
+			language: fc.constantFrom(...LANGUAGES),
 			constants: fc.constant('2026.1'),
 			title: fc.string({ maxLength: 40 }),
 			point: fc.string({ maxLength: 40 }),
+			formulas: fc.constant([]),
 			steps: fc.constant(steps),
 			controls: fc.constant(controls),
 			claims: fc.constant(claims),
@@ -170,11 +161,12 @@ describe('widget document and manuscript', () => {
 
 	test('a sheet without blocks gets an empty paragraph to type in', () => {
 		const manuscript = toManuscript({
-			version: 1,
+			version: 2,
 			language: 'en',
 			constants: '2026.1',
 			title: '',
 			point: '',
+			formulas: [],
 			steps: [],
 			controls: [],
 			blocks: [],
@@ -185,11 +177,12 @@ describe('widget document and manuscript', () => {
 
 	describe('words found in a browser', () => {
 		const found = {
-			version: 1,
+			version: 2,
 			language: 'en',
 			constants: '2026.1',
 			title: 'x'.repeat(130),
 			point: '',
+			formulas: [],
 			steps: [{ id: 'step-1', calculator: 'gone.since', revision: '1', settings: {} }],
 			controls: [],
 			blocks: [{ id: 'block-1', kind: 'paragraph', content: [{ kind: 'text', text: 'Words.' }] }],
@@ -214,11 +207,12 @@ describe('widget document and manuscript', () => {
 
 	test('a claim whose words are gone is left out of the document', () => {
 		const document: WidgetDocument = {
-			version: 1,
+			version: 2,
 			language: 'en',
 			constants: '2026.1',
 			title: '',
 			point: '',
+			formulas: [],
 			steps: [],
 			controls: [],
 			blocks: [{ id: 'block-1', kind: 'paragraph', content: [] }],

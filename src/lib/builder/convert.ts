@@ -11,12 +11,20 @@ import {
 	type WidgetDocument
 } from '../widget/document.ts';
 import { newId } from './ids.ts';
-import { claimOf, isTextBlockKind, schema, wiringOf, type ChartFields } from './schema.ts';
+import {
+	claimOf,
+	isTextBlockKind,
+	schema,
+	wiringOf,
+	type FieldBlock,
+	type FieldBlockKind,
+	type FieldsOf
+} from './schema.ts';
 
 export function toManuscript(document: WidgetDocument): Node {
-	const { constants, steps, controls, claims } = document;
+	const { language, constants, formulas, steps, controls, claims } = document;
 	const blocks = document.blocks.map(blockNode);
-	return schema.node('doc', { constants, steps, controls, claims }, [
+	return schema.node('doc', { language, constants, formulas, steps, controls, claims }, [
 		schema.node('title', null, words(document.title)),
 		schema.node('point', null, words(document.point)),
 		...(blocks.length > 0 ? blocks : [schema.node('paragraph', { id: newId('block') })])
@@ -43,6 +51,7 @@ function hasShape(stored: unknown): stored is WidgetDocument {
 	return (
 		areIdentified(stored.blocks) &&
 		areIdentified(stored.controls) &&
+		areIdentified(stored.formulas) &&
 		areIdentified(stored.claims, (claim) => typeof claim.form === 'string') &&
 		areIdentified(
 			stored.steps,
@@ -101,14 +110,15 @@ function inlineNode(inline: Inline): Node {
 
 /** Claims whose words have been deleted stay in the editor for undo and for pasting back, but not in the document. */
 export function toDocument(doc: Node): WidgetDocument {
-	const { constants, steps, controls, claims } = wiringOf(doc);
+	const { language, constants, formulas, steps, controls, claims } = wiringOf(doc);
 	const standing = claimsInCopy(doc);
 	return {
 		version: DOCUMENT_VERSION,
-		language: 'en',
+		language,
 		constants,
 		title: doc.child(0).textContent,
 		point: doc.child(1).textContent,
+		formulas: [...formulas],
 		steps: [...steps] as Step[],
 		controls: [...controls] as Control[],
 		blocks: blockNodes(doc).map(blockOf),
@@ -146,7 +156,7 @@ function convertBlock(node: Node): Block {
 	const kind = node.type.name;
 	if (isTextBlockKind(kind)) return { id, kind, content: inlinesOf(node.content) };
 	if (kind === 'control') return { id, kind, control: node.attrs.control as string };
-	return { id, kind: 'chart', ...(node.attrs.fields as ChartFields) };
+	return { id, kind, ...(node.attrs.fields as FieldsOf<FieldBlockKind>) } as FieldBlock;
 }
 
 function inlinesOf(content: Fragment): Inline[] {

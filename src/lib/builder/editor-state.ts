@@ -4,6 +4,7 @@ import type { Node } from 'prosemirror-model';
 import { EditorState, TextSelection } from 'prosemirror-state';
 import { headLimits, type HeadLine } from './head-limits.ts';
 import { manuscriptKeys, type KeyTargets } from './keys.ts';
+import { keepTheirs } from './keep-theirs.ts';
 import { mend, upkeep } from './upkeep.ts';
 import { weighingPlugin, type MarkTargets } from './weighing.ts';
 
@@ -21,6 +22,8 @@ export function createState(
 		plugins: [
 			...manuscriptKeys(targets),
 			history({ depth: 1000 }),
+			// Before the upkeep, which takes claims out of the copy that the wiring doesn't know.
+			keepTheirs(),
 			upkeep(),
 			headLimits((line) => (targets.heldBack = line)),
 			weighingPlugin(targets)

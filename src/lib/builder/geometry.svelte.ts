@@ -9,6 +9,12 @@ export interface Line {
 	middle: number;
 }
 
+/** Something a note is about, at the first line of its words. */
+export interface Spot {
+	key: string;
+	from: number;
+}
+
 export interface BlockPlace {
 	pos: number;
 	id: string;
@@ -24,6 +30,8 @@ export class Geometry {
 	lines = $state.raw<Line[]>([]);
 	blocks = $state.raw<BlockPlace[]>([]);
 	height = $state(0);
+	/** Middle of the line by a spot's key. */
+	spots = $state.raw<ReadonlyMap<string, number>>(new Map());
 
 	measure(view: EditorView, sheet: HTMLElement, numbers: readonly NumberInCopy[]): void {
 		const origin = sheet.getBoundingClientRect().top;
@@ -56,11 +64,34 @@ export class Geometry {
 		this.height = sheet.getBoundingClientRect().height;
 	}
 
-	/** Middle of the line a number stands on; null before it has been laid out. */
-	lineOf(key: string): number | null {
-		return (
-			this.lines.find(({ numbers }) => numbers.some((number) => number.key === key))?.middle ?? null
+	measureSpots(view: EditorView, sheet: HTMLElement, spots: readonly Spot[]): void {
+		const origin = sheet.getBoundingClientRect().top;
+		const { doc } = view.state;
+		this.spots = new Map(
+			spots.flatMap(({ key, from }): [string, number][] => {
+				if (from >= doc.content.size) return [];
+				const dom = doc.nodeAt(from)?.isBlock ? view.nodeDOM(from) : null;
+				const box = dom instanceof HTMLElement ? dom.getBoundingClientRect() : null;
+				if (box) return [[key, box.top + Math.min(box.height / 2, 14) - origin]];
+				const { top, bottom } = view.coordsAtPos(from, 1);
+				return [[key, (top + bottom) / 2 - origin]];
+			})
 		);
+	}
+
+	/** Where the block at `pos` stands just now, for what can't wait for the next round. */
+	blockAt(view: EditorView, sheet: HTMLElement, pos: number): BlockPlace | null {
+		const block = view.state.doc.nodeAt(pos);
+		const dom = view.nodeDOM(pos);
+		if (!block || !(dom instanceof HTMLElement)) return null;
+		const box = dom.getBoundingClientRect();
+		return {
+			pos,
+			id: (block.attrs.id as string | undefined) ?? '',
+			kind: block.type.name,
+			top: box.top - sheet.getBoundingClientRect().top,
+			height: box.height
+		};
 	}
 }
 

@@ -1,8 +1,8 @@
 /** Putting blocks into the copy: in place of the empty line one is on, otherwise after the block one is in. */
 import type { Node } from 'prosemirror-model';
-import { TextSelection, type Transaction } from 'prosemirror-state';
+import { NodeSelection, TextSelection, type Transaction } from 'prosemirror-state';
 import { newId } from './ids.ts';
-import { schema, type ChartFields, type TextBlockKind } from './schema.ts';
+import { schema, type FieldBlockKind, type FieldsOf, type TextBlockKind } from './schema.ts';
 
 /** Where a block goes that is asked for at `pos`; never above the point. */
 function place(doc: Node, pos: number): { from: number; to: number } {
@@ -51,18 +51,40 @@ export function insertControl(transaction: Transaction, pos: number, control: st
 	return insertBlock(transaction, pos, schema.node('control', { id: newId('block'), control }));
 }
 
-export function insertChart(
+export function insertFields<K extends FieldBlockKind>(
 	transaction: Transaction,
 	pos: number,
-	fields: ChartFields
+	kind: K,
+	fields: FieldsOf<K>
 ): Transaction {
-	return insertBlock(transaction, pos, schema.node('chart', { id: newId('block'), fields }));
+	return insertBlock(transaction, pos, schema.node(kind, { id: newId('block'), fields }));
 }
 
-export function changeChart(
+export function changeFields(
 	transaction: Transaction,
 	pos: number,
-	fields: ChartFields
+	fields: FieldsOf<FieldBlockKind>
 ): Transaction {
 	return transaction.setNodeAttribute(pos, 'fields', fields);
+}
+
+/** The block at `pos` one place up or down among the blocks; null at either end. */
+export function moveBlock(
+	transaction: Transaction,
+	pos: number,
+	direction: 'up' | 'down'
+): Transaction | null {
+	const { doc } = transaction;
+	const index = doc.resolve(pos).index(0);
+	const block = doc.child(index);
+	const other = direction === 'up' ? index - 1 : index + 1;
+	// The title and the point stand first and stay there.
+	if (index < 2 || other < 2 || other >= doc.childCount) return null;
+	const beside = doc.child(other);
+	const to = direction === 'up' ? pos - beside.nodeSize : pos + beside.nodeSize;
+	transaction.delete(pos, pos + block.nodeSize).insert(to, block);
+	const selection = block.isAtom
+		? NodeSelection.create(transaction.doc, to)
+		: TextSelection.near(transaction.doc.resolve(to + 1));
+	return transaction.setSelection(selection).scrollIntoView();
 }

@@ -8,7 +8,7 @@ import {
 	splitBlock,
 	toggleMark
 } from 'prosemirror-commands';
-import { redo, undo } from 'prosemirror-history';
+import { closeHistory, redo, undo } from 'prosemirror-history';
 import { keymap } from 'prosemirror-keymap';
 import {
 	NodeSelection,
@@ -18,13 +18,18 @@ import {
 	type Command,
 	type EditorState
 } from 'prosemirror-state';
+import { moveBlock } from './insert.ts';
 import type { NumberInCopy } from './quantities.ts';
 import { schema } from './schema.ts';
 import { focusedNumber } from './weighing.ts';
 
 /** What the keys act on beside the text. */
 export interface KeyTargets {
+	forms: { change(pos: number): boolean };
 	openTie(number: NumberInCopy): void;
+	/** Marks the selected words by hand. */
+	tieSelection(): boolean;
+	lint: { takeHere(): boolean };
 	goToNextUnweighed(): boolean;
 	cycleBench(): void;
 	inserting: number | null;
@@ -56,13 +61,28 @@ function emptyBlockAt(state: EditorState): number | null {
 	return $from.before();
 }
 
+/** Enter on a block that has fields opens them. */
+function opening(targets: KeyTargets): Command {
+	return ({ selection }) =>
+		selection instanceof NodeSelection && targets.forms.change(selection.from);
+}
+
+function moving(direction: 'up' | 'down'): Command {
+	return (state, dispatch) => {
+		const { $from, from } = state.selection;
+		const moved = moveBlock(state.tr, $from.depth > 0 ? $from.before(1) : from, direction);
+		if (moved) dispatch?.(closeHistory(moved));
+		return true;
+	};
+}
+
 export function manuscriptKeys(targets: KeyTargets): Plugin[] {
 	return [
 		new Plugin({
 			props: {
 				handleKeyDown(view, event) {
 					if (event.ctrlKey || event.metaKey || event.altKey || event.isComposing) return false;
-					// Typing on a selected slider or chart goes on after it, and doesn't replace it.
+					// Typing on a selected control or chart goes on after it, and doesn't replace it.
 					const { selection } = view.state;
 					if (
 						selection instanceof NodeSelection &&
@@ -72,8 +92,10 @@ export function manuscriptKeys(targets: KeyTargets): Plugin[] {
 						createParagraphNear(view.state, view.dispatch);
 					}
 					if (event.key === '=') {
+						if (!view.editable) return false;
 						const number = focusedNumber(view.state);
-						if (!number || number.control !== null || !view.editable) return false;
+						if (!number && !view.state.selection.empty) return targets.tieSelection();
+						if (!number || number.control !== null) return false;
 						targets.openTie(number);
 						return true;
 					}
@@ -89,6 +111,9 @@ export function manuscriptKeys(targets: KeyTargets): Plugin[] {
 		}),
 		keymap({
 			'Mod-Home': toStart,
+			'Alt-ArrowUp': moving('up'),
+			'Alt-ArrowDown': moving('down'),
+			'Alt-Enter': () => targets.lint.takeHere(),
 			'Mod-z': undo,
 			'Mod-y': redo,
 			'Shift-Mod-z': redo,
@@ -102,7 +127,14 @@ export function manuscriptKeys(targets: KeyTargets): Plugin[] {
 				targets.goToNextUnweighed();
 				return true;
 			},
-			Enter: chainCommands(nextLine, newlineInCode, createParagraphNear, liftEmptyBlock, splitBlock)
+			Enter: chainCommands(
+				opening(targets),
+				nextLine,
+				newlineInCode,
+				createParagraphNear,
+				liftEmptyBlock,
+				splitBlock
+			)
 		}),
 		keymap(baseKeymap)
 	];

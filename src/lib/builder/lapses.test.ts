@@ -15,11 +15,12 @@ const paragraph = (words: string, claim: string): Block => ({
 });
 
 const signedDocument: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: 'First light',
 	point: '',
+	formulas: [],
 	steps: [
 		{
 			id: 'line',

@@ -7,11 +7,12 @@ import { toDocument, toManuscript } from './convert.ts';
 import { looseEnds, remove, type PrintedWords, type Removed } from './loosen.ts';
 
 const document: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: 'First light',
 	point: '',
+	formulas: [],
 	steps: [
 		{
 			id: 'age',
@@ -60,8 +61,10 @@ const document: WidgetDocument = {
 			id: 'dial',
 			kind: 'chart',
 			title: 'On the dial',
-			x: { control: 'wave-age', label: 'Age' },
-			y: { reading: { step: 'line', output: 'frequency' }, unit: 'MHz', label: 'Frequency' },
+			form: 'line',
+			x: { control: 'wave-age', label: 'Age', scale: 'linear' },
+			y: { unit: 'MHz', label: 'Frequency', scale: 'linear', from: 'data' },
+			series: [{ id: 'line', reading: { step: 'line', output: 'frequency' }, label: '' }],
 			bands: [],
 			source: '',
 			description: ''
@@ -116,7 +119,7 @@ describe('taking away what is in use', () => {
 		expect(looseEnds(doc, { control: 'wave-age' }, catalogue, printed)).toEqual([
 			'“Age after the Big Bang” of Age or distance to redshift would go back to a fixed value.',
 			'“180 million years” would stay as words and no longer move.',
-			'The slider would be taken out of the copy.',
+			'The control would be taken out of the copy.',
 			'The chart “On the dial” would be taken out.'
 		]);
 	});

@@ -1,17 +1,27 @@
-/** Taking a calculator or a slider away: what would come loose, in words, and the one change that does it. */
+/** Taking a calculator or a control away: what would come loose, in words, and the one change that does it. */
 import type { Node } from 'prosemirror-model';
 import type { Transaction } from 'prosemirror-state';
 import { resolveUnit, type CalculatorSet } from '../physics/calculator.ts';
 import { convert } from '../physics/units/units.ts';
+import { controlsNamed, shownReadings } from '../widget/block-readings.ts';
+import { settingFrom } from '../widget/control-grid.ts';
 import type { Claim, ReadingRef, SettingSource, Step } from '../widget/document.ts';
+import { formulaCalculatorId } from '../widget/formula-id.ts';
 import { fixedSettings } from '../widget/tie-units.ts';
-import { claimsInCopy } from './convert.ts';
-import { claimOf, schema, wiringOf, type ChartFields } from './schema.ts';
+import { blockOf, claimsInCopy } from './convert.ts';
+import {
+	BLOCK_WORDS,
+	claimOf,
+	isFieldBlockKind,
+	schema,
+	wiringOf,
+	type FieldsOf
+} from './schema.ts';
 import { firstSource, settingLabel } from './wiring.ts';
 
 export type Removed = { step: string } | { control: string };
 
-/** The words a claim or a slider's value stands as now; live numbers turn into them when they come loose. */
+/** The words a claim or a control's value stands as now; live numbers turn into them when they come loose. */
 export interface PrintedWords {
 	live(claimId: string): string;
 	setting(controlId: string): string;
@@ -64,11 +74,12 @@ export function looseEnds(
 		}
 	}
 	doc.descendants((node) => {
-		if (node.type === schema.nodes.chart && chartHangsOn(node, removed)) {
-			ends.push(`The chart “${(node.attrs.fields as ChartFields).title}” would be taken out.`);
+		if (fieldsHangOn(node, removed)) {
+			ends.push(`The ${BLOCK_WORDS[blockOf(node).kind]}${titleOf(node)} would be taken out.`);
 		}
 		if (!('control' in removed) || node.attrs.control !== removed.control) return;
-		if (node.type === schema.nodes.control) ends.push('The slider would be taken out of the copy.');
+		if (node.type === schema.nodes.control)
+			ends.push('The control would be taken out of the copy.');
 		if (node.type === schema.nodes.setting) {
 			ends.push(`“${printed.setting(removed.control)}” would stay as words and no longer move.`);
 		}
@@ -76,9 +87,19 @@ export function looseEnds(
 	return ends;
 }
 
-function chartHangsOn(node: Node, removed: Removed): boolean {
-	const { x, y } = node.attrs.fields as ChartFields;
-	return hangsOn(y.reading, removed) || hangsOn({ control: x.control }, removed);
+/** A block drawn from fields can't stand without what it draws; presets only forget the control. */
+function fieldsHangOn(node: Node, removed: Removed): boolean {
+	if (!isFieldBlockKind(node.type.name) || node.type === schema.nodes.presets) return false;
+	const block = blockOf(node);
+	return (
+		shownReadings(block).some(({ reading }) => hangsOn(reading, removed)) ||
+		controlsNamed(block).some((control) => hangsOn({ control }, removed))
+	);
+}
+
+function titleOf(node: Node): string {
+	const { title = '' } = node.attrs.fields as { title?: string };
+	return title ? ` “${title}”` : '';
 }
 
 /** Takes it away and loosens all that hung on it, in one undoable change. */
@@ -92,6 +113,15 @@ export function remove(
 	const wiring = wiringOf(doc);
 	const loose = new Set(looseClaims(doc, removed).map(({ id }) => id));
 
+	doc.descendants((node, pos) => {
+		if (node.type !== schema.nodes.presets || !('control' in removed)) return;
+		const fields = node.attrs.fields as FieldsOf<'presets'>;
+		transaction.setNodeAttribute(pos, 'fields', {
+			...fields,
+			presets: without(fields, removed.control)
+		});
+	});
+
 	const atoms: { pos: number; size: number; words: string | null }[] = [];
 	doc.descendants((node, pos) => {
 		const claim = claimOf(node);
@@ -101,7 +131,7 @@ export function remove(
 		if (node.type === schema.nodes.live && loose.has(node.attrs.claim as string)) {
 			atoms.push({ pos, size: 1, words: printed.live(node.attrs.claim as string) });
 		}
-		if (node.type === schema.nodes.chart && chartHangsOn(node, removed)) {
+		if (fieldsHangOn(node, removed)) {
 			atoms.push({ pos, size: node.nodeSize, words: null });
 		}
 		if (!('control' in removed) || node.attrs.control !== removed.control) return;
@@ -119,6 +149,16 @@ export function remove(
 		.filter((step) => !('step' in removed && step.id === removed.step))
 		.map((step) => loosenStep(step, removed, calculators, doc));
 	transaction.setDocAttribute('steps', steps);
+	// A formula goes with the last step that works it.
+	const worked = (list: readonly Step[]) => new Set(list.map(({ calculator }) => calculator));
+	const [before, after] = [worked(wiring.steps), worked(steps)];
+	transaction.setDocAttribute(
+		'formulas',
+		wiring.formulas.filter(({ id }) => {
+			const calculator = formulaCalculatorId(id);
+			return after.has(calculator) || !before.has(calculator);
+		})
+	);
 	transaction.setDocAttribute(
 		'claims',
 		wiring.claims.filter(({ id }) => !loose.has(id))
@@ -132,18 +172,34 @@ export function remove(
 	return transaction;
 }
 
-/** A peg that loses its slider keeps the value the slider started at; one that loses a reading goes to its first value. */
+function without(
+	{ presets }: FieldsOf<'presets'>,
+	control: string
+): FieldsOf<'presets'>['presets'] {
+	return presets.map(({ values, ...preset }) => ({
+		...preset,
+		values: Object.fromEntries(Object.entries(values).filter(([id]) => id !== control))
+	}));
+}
+
+/** A peg that loses its control keeps the setting the control started at; one that loses a reading goes to its first value. */
 function loosenStep(step: Step, removed: Removed, calculators: CalculatorSet, doc: Node): Step {
 	const inputs = calculators.get(step.calculator)?.inputs ?? {};
 	const settings = Object.fromEntries(
-		Object.entries(step.settings).map(([key, source]): [string, SettingSource] => {
+		Object.entries(step.settings).flatMap(([key, source]): [string, SettingSource][] => {
 			const spec = inputs[key];
-			if (!feeds(source, removed) || !spec) return [key, source];
-			if (source.from !== 'control' || spec.kind !== 'number') return [key, firstSource(spec)];
+			if (!feeds(source, removed)) return [[key, source]];
+			// A part of a parameter set goes; the set itself stands beside it.
+			if (!spec) return [];
+			if (source.from !== 'control') return [[key, firstSource(spec)]];
 			const control = wiringOf(doc).controls.find(({ id }) => id === source.control);
-			if (!control) return [key, firstSource(spec)];
+			const value = control && settingFrom(control, control.initial);
+			if (spec.kind === 'choice' && typeof value === 'string')
+				return [[key, { from: 'fixed', value }]];
+			if (!control || spec.kind !== 'number' || typeof value !== 'number')
+				return [[key, firstSource(spec)]];
 			const unit = resolveUnit(spec.unit, fixedSettings(step));
-			return [key, { from: 'fixed', value: convert(control.initial, control.unit, unit) }];
+			return [[key, { from: 'fixed', value: convert(value, control.unit, unit) }]];
 		})
 	);
 	return { ...step, settings };

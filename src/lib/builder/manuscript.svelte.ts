@@ -9,26 +9,38 @@ import {
 	type EditorState,
 	type Transaction
 } from 'prosemirror-state';
-import { EditorView } from 'prosemirror-view';
+import type { EditorView } from 'prosemirror-view';
 import { judgeClaims } from '../factcheck/judge.ts';
+import { loadLexicon } from '../factcheck/lexicon/load.ts';
+import { hasLexicon } from '../factcheck/lexicon/shelf.ts';
 import type { Calculator, CalculatorSet } from '../physics/calculator.ts';
 import { LiveWidget } from '../renderer/live-widget.svelte.ts';
-import type { Control, Step, WidgetDocument } from '../widget/document.ts';
+import { officeParts } from '../typeset/office-parts.svelte.ts';
+import { benchSet } from '../widget/bench-set.ts';
+import type { Control, FormulaStep, Step, WidgetDocument } from '../widget/document.ts';
+import type { Language } from '../widget/language.ts';
 import { evaluate, type Evaluation } from '../widget/evaluate.ts';
-import { MediaQuery } from 'svelte/reactivity';
+import { formulaCalculatorId } from '../widget/formula-id.ts';
 import { parseDocument, type Issue } from '../widget/parse.ts';
 import { claimPlaces, wordsAt, type ClaimPlace, type Words } from '../widget/places.ts';
 import type { QueryView } from '../workflow/piece.ts';
 import { mayCompose, type VettingState } from '../workflow/vetting.ts';
+import { BenchDrawer } from './bench-drawer.svelte.ts';
+import { Bringing } from './bring-in/bringing.svelte.ts';
+import { BlockForms } from './block-forms.svelte.ts';
 import { benchReadings, sameRef, type BenchReading } from './bench-readings.ts';
 import { toDocument, toManuscript } from './convert.ts';
 import { createState } from './editor-state.ts';
+import { withFormula } from './formula/keep-formula.ts';
+import { formulaState } from './formula/formula-state.ts';
 import { bringsWholeDocument, type HeadLine } from './head-limits.ts';
-import { changeChart, insertChart, insertControl } from './insert.ts';
+import { insertControl } from './insert.ts';
+import { takeIn, writeInto } from './keep-merged.ts';
 import { looseEnds, remove, type PrintedWords, type Removed } from './loosen.ts';
-import { BlockView, InlineView } from './node-views.svelte.ts';
-import { isUndeclared, type NumberInCopy } from './quantities.ts';
-import { wiringOf, type ChartFields } from './schema.ts';
+import { LintDesk } from './lint/lint-desk.svelte.ts';
+import { mountEditor } from './mount-editor.ts';
+import { isUndeclared, numberByHand, type NumberInCopy } from './quantities.ts';
+import { wiringOf } from './schema.ts';
 import {
 	focusedNumber,
 	NOTHING_WEIGHED,
@@ -42,8 +54,6 @@ import {
 /** Typing rests this long before the document is read and weighed again. */
 const REST_MS = 200;
 
-export type BenchHeight = 'closed' | 'half' | 'full';
-
 export interface ManuscriptParts {
 	document: WidgetDocument;
 	calculators: CalculatorSet;
@@ -52,11 +62,16 @@ export interface ManuscriptParts {
 	readOnly: boolean;
 	/** Open queries on the newest proof. */
 	queries: readonly QueryView[];
+	/** Digests of formulas that are vetted. */
+	vettedFormulas: readonly string[];
+	/** Whose desk it is, and which piece: what isn't in the document yet is kept in this browser under both. */
+	personId: string;
+	slug: string;
 	/** Told of every change of words or wiring. */
 	changed: () => void;
 }
 
-export class Manuscript {
+export class Manuscript extends BenchDrawer {
 	state: EditorState;
 	/** The newest document that hangs together. */
 	document: WidgetDocument;
@@ -70,33 +85,38 @@ export class Manuscript {
 
 	/** The line that would have grown too long by the last change, which wasn't made. */
 	heldBack = $state.raw<HeadLine | null>(null);
-	bench = $state<BenchHeight>('closed');
 	/** Key of the number whose list of readings is open. */
 	tying = $state<string | null>(null);
 	/** Position of the block at which something is to be inserted. */
 	inserting = $state<number | null>(null);
-	/** The chart whose fields are open: a new one at a block, or one that stands there. */
-	charting = $state.raw<{ pos: number; fields: ChartFields | null } | null>(null);
-	/** The search for a calculator is open on the bench. */
-	searching = $state(false);
+	readonly forms: BlockForms = new BlockForms(this);
+	readonly bringing: Bringing = new Bringing(this);
+	readonly lint: LintDesk;
+	/** Words that were selected to be marked by hand. */
+	byHand = $state.raw<NumberInCopy | null>(null);
 	/** Key of the number whose note is raised from below, where there is no margin. */
 	raised = $state<string | null>(null);
 
-	readonly calculators: CalculatorSet;
+	readonly personId: string;
+	readonly slug: string;
+	readonly #house: CalculatorSet;
+	readonly #vettedFormulas: ReadonlySet<string>;
 	readonly #states: Readonly<Record<string, VettingState>>;
 	readonly readOnly: boolean;
 	readonly queries: readonly QueryView[];
 	readonly widget: LiveWidget;
-
-	/** On a phone the copy can be edited; the bench is for looking at. */
-	readonly #phone = new MediaQuery('width < 640px', false);
 
 	#changed: () => void;
 	#view: EditorView | null = null;
 	#settleTimer: ReturnType<typeof setTimeout> | undefined;
 
 	constructor(parts: ManuscriptParts) {
-		this.calculators = parts.calculators;
+		super();
+		this.personId = parts.personId;
+		this.slug = parts.slug;
+		this.lint = new LintDesk(this, parts.personId, parts.slug);
+		this.#house = parts.calculators;
+		this.#vettedFormulas = new Set(parts.vettedFormulas);
 		this.#states = parts.states;
 		this.readOnly = parts.readOnly;
 		this.queries = parts.queries;
@@ -105,12 +125,18 @@ export class Manuscript {
 		this.state = $state.raw(createState(toManuscript(parts.document), this));
 		this.widget = new LiveWidget(
 			() => this.document,
-			() => parts.calculators
+			() => this.calculators,
+			null,
+			officeParts(() => this.calculators)
 		);
 	}
 
 	vettingOf(calculatorId: string): VettingState {
-		return this.#states[calculatorId] ?? 'vetted';
+		const formula = this.document.formulas.find(
+			({ id }) => formulaCalculatorId(id) === calculatorId
+		);
+		if (!formula) return this.#states[calculatorId] ?? 'vetted';
+		return formulaState(formula, this.calculators, this.#vettedFormulas);
 	}
 
 	/** The calculators that may be hung on the bench: what was superseded or withdrawn stays where it hangs, and is not offered. */
@@ -120,9 +146,11 @@ export class Manuscript {
 
 	// What follows from the state
 
+	/** The house's calculators, and the piece's own formulas in front of them. */
+	calculators: CalculatorSet = $derived.by(() => benchSet(this.document, this.#house));
 	focused = $derived.by(() => focusedNumber(this.state));
 	wiring = $derived.by(() => wiringOf(this.state.doc));
-	/** Readings as the sliders stand now, for the bench. */
+	/** Readings as the controls stand now, for the bench. */
 	readings: BenchReading[] = $derived.by(() =>
 		benchReadings(this.document, this.widget.evaluation, this.calculators)
 	);
@@ -131,7 +159,7 @@ export class Manuscript {
 	firstReadings: BenchReading[] = $derived.by(() =>
 		benchReadings(this.document, this.firstEvaluation, this.calculators)
 	);
-	/** The words of any inline as the sliders stand now. */
+	/** The words of any inline as the controls stand now. */
 	words: Words = $derived.by(() =>
 		wordsAt(this.document, this.widget.evaluation, this.calculators)
 	);
@@ -160,44 +188,15 @@ export class Manuscript {
 
 	mount(target: HTMLElement, label: string): () => void {
 		const isFresh = !this.readOnly && this.document.blocks.length === 0;
-		const view = new EditorView(
-			{ mount: target },
-			{
-				state: this.state,
-				editable: () => !this.readOnly,
-				// Cells of a pasted table have no place here; their words must not run together into other numbers.
-				transformPastedHTML: (html) => html.replace(/<\/t[dh]\s*>/gi, ' $&'),
-				// The bench lies over the sheet's foot: a line one goes to must stand above it.
-				get scrollMargin() {
-					const bench = document.querySelector('.bench-and-foot');
-					return { top: 24, right: 0, bottom: (bench?.clientHeight ?? 0) + 32, left: 0 };
-				},
-				get scrollThreshold() {
-					return this.scrollMargin;
-				},
-				attributes: {
-					role: 'textbox',
-					'aria-multiline': 'true',
-					'aria-label': label,
-					'aria-readonly': String(this.readOnly),
-					// The router gives the focus of a new page to what asks for it.
-					...(isFresh ? { autofocus: '' } : {}),
-					spellcheck: 'true'
-				},
-				nodeViews: {
-					control: (node) => new BlockView(node, this),
-					chart: (node) => new BlockView(node, this),
-					live: (node) => new InlineView(node, this),
-					setting: (node) => new InlineView(node, this)
-				},
-				dispatchTransaction: (transaction) => this.#apply(transaction)
-			}
+		const view = mountEditor(target, this, { label, isFresh }, (transaction) =>
+			this.#apply(transaction)
 		);
 		this.#view = view;
 		this.settle();
 		if (isFresh) this.#startWriting();
 		return () => {
 			clearTimeout(this.#settleTimer);
+			this.lint.stop();
 			this.#view = null;
 			view.destroy();
 		};
@@ -210,10 +209,6 @@ export class Manuscript {
 		const at = title.content.size === 0 ? 1 : title.nodeSize + 1;
 		this.#apply(this.state.tr.setSelection(TextSelection.create(doc, at)));
 		this.focus();
-	}
-
-	get isPhone(): boolean {
-		return this.#phone.current;
 	}
 
 	get benchReadOnly(): boolean {
@@ -231,6 +226,8 @@ export class Manuscript {
 		this.state = next;
 		if (next.doc === before) return;
 		this.heldBack = null;
+		this.forms.notYet = null;
+		this.byHand = null;
 		this.#changed();
 		clearTimeout(this.#settleTimer);
 		this.#settleTimer = setTimeout(() => this.settle(), REST_MS);
@@ -240,8 +237,10 @@ export class Manuscript {
 	settle(): void {
 		clearTimeout(this.#settleTimer);
 		this.#settleTimer = undefined;
-		this.numbers = numbersOf(this.state.doc);
-		const parsed = parseDocument(toDocument(this.state.doc), this.calculators);
+		const { language } = this.wiring;
+		if (!hasLexicon(language)) void this.#fetchLanguage(language);
+		this.numbers = this.#withByHand(numbersOf(this.state.doc));
+		const parsed = parseDocument(toDocument(this.state.doc), this.#house);
 		if (parsed.ok) {
 			this.document = parsed.document;
 			this.issues = [];
@@ -251,8 +250,36 @@ export class Manuscript {
 				queried: new Set(this.queries.filter(({ closedAt }) => !closedAt).map(({ claim }) => claim))
 			};
 			this.#apply(this.state.tr.setMeta(weighingKey, this.weighing).setMeta('addToHistory', false));
+			this.lint.later(parsed.document, this.state.doc);
 		} else this.issues = parsed.issues;
 		this.laidOut += 1;
+	}
+
+	#withByHand(numbers: readonly NumberInCopy[]): readonly NumberInCopy[] {
+		const { byHand } = this;
+		if (!byHand) return numbers;
+		const apart = numbers.filter(({ from, to }) => to <= byHand.from || from >= byHand.to);
+		return [...apart, byHand].sort((a, b) => a.from - b.from);
+	}
+
+	/** Another language for words, numbers and print; its lexicon comes first. */
+	async setLanguage(language: Language): Promise<void> {
+		await loadLexicon(language);
+		this.change((transaction) => transaction.setDocAttribute('language', language));
+	}
+
+	/** A version of the piece in a language that isn't at hand yet. */
+	async #fetchLanguage(language: Language): Promise<void> {
+		await loadLexicon(language);
+		if (this.#view) this.settle();
+	}
+
+	pasteHtml(html: string): void {
+		void this.bringing.paste(html);
+	}
+
+	bringFile(file: File): void {
+		void this.bringing.file(file);
 	}
 
 	#tags(document: WidgetDocument): Map<string, string> {
@@ -321,18 +348,26 @@ export class Manuscript {
 		this.tying = number.key;
 	}
 
+	/** Marks the selected words as a number, whatever the detector makes of them; false where they can't be one. */
+	tieSelection(): boolean {
+		const { from, to } = this.state.selection;
+		const number = numberByHand(this.state.doc, from, to);
+		if (!number || this.readOnly) return false;
+		if (this.#settleTimer !== undefined) this.settle();
+		this.byHand = number;
+		this.numbers = this.#withByHand(this.numbers);
+		this.laidOut += 1;
+		this.tying = number.key;
+		return true;
+	}
+
 	closeTie(): void {
 		this.tying = null;
+		if (this.byHand) {
+			this.byHand = null;
+			this.numbers = numbersOf(this.state.doc);
+		}
 		this.focus();
-	}
-
-	openSearch(): void {
-		if (this.bench === 'closed') this.bench = 'half';
-		this.searching = true;
-	}
-
-	cycleBench(): void {
-		this.bench = this.bench === 'closed' ? 'half' : 'closed';
 	}
 
 	/** Takes another version of the whole piece; undo brings the old one back. */
@@ -347,12 +382,15 @@ export class Manuscript {
 		});
 	}
 
-	/** Takes the server's own version: there is nothing to keep. */
-	loadWithoutSaving(document: WidgetDocument): void {
-		const changed = this.#changed;
-		this.#changed = () => undefined;
-		this.replaceDocument(document);
-		this.#changed = changed;
+	/** Takes in what a merge made of this sheet and another's, block by block: undo goes on over it. */
+	takeIn(document: WidgetDocument): void {
+		this.#apply(takeIn(this.state, document));
+		this.settle();
+	}
+
+	/** Turns the sheet into this document in one undoable change that leaves alone what is the same. */
+	rewrite(document: WidgetDocument): void {
+		this.change((transaction) => writeInto(transaction, document));
 	}
 
 	/** The document as typed, whether or not it hangs together yet. */
@@ -368,6 +406,19 @@ export class Manuscript {
 		);
 	}
 
+	/**
+	 * Hangs a formula on the bench, or puts it in the place of what it was, with all that hangs on it. Says why it can't be
+	 * so; '' when it is done.
+	 */
+	keepFormula(formula: FormulaStep, renamed: ReadonlyMap<string, string>): string {
+		const next = withFormula(this.state.tr, formula, renamed);
+		const parsed = parseDocument(toDocument(next.doc), this.#house);
+		if (!parsed.ok && this.issues.length === 0)
+			return parsed.issues.map(({ message }) => message).join(' ');
+		this.change((transaction) => withFormula(transaction, formula, renamed));
+		return '';
+	}
+
 	replaceStep(step: Step): void {
 		this.change((transaction) =>
 			transaction.setDocAttribute(
@@ -377,14 +428,16 @@ export class Manuscript {
 		);
 	}
 
-	/** Adds a slider and hangs a calculator's setting on it in the same change. */
-	addControl(control: Control, step: Step): void {
-		this.change((transaction) =>
-			transaction.setDocAttribute('controls', [...this.wiring.controls, control]).setDocAttribute(
+	/** Adds a control and hangs a calculator's setting on it, and puts it into the copy at `pos`, in one change. */
+	addControl(control: Control, step: Step, pos: number | null = null): void {
+		this.change((transaction) => {
+			const { controls, steps } = this.wiring;
+			transaction.setDocAttribute('controls', [...controls, control]).setDocAttribute(
 				'steps',
-				this.wiring.steps.map((other) => (other.id === step.id ? step : other))
-			)
-		);
+				steps.map((other) => (other.id === step.id ? step : other))
+			);
+			return pos === null ? transaction : insertControl(transaction, pos, control.id);
+		});
 	}
 
 	replaceControl(control: Control): void {
@@ -398,19 +451,6 @@ export class Manuscript {
 
 	insertControl(control: string, pos: number = this.state.selection.from): void {
 		this.change((transaction) => insertControl(transaction, pos, control));
-	}
-
-	/** Puts the chart whose fields were open into the copy, or changes the one that stands there. */
-	keepChart(fields: ChartFields): void {
-		const open = this.charting;
-		if (!open) return;
-		this.charting = null;
-		this.change((transaction) =>
-			open.fields
-				? changeChart(transaction, open.pos, fields)
-				: insertChart(transaction, open.pos, fields)
-		);
-		this.focus();
 	}
 
 	looseEnds(removed: Removed): string[] {

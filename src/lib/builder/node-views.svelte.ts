@@ -3,7 +3,9 @@ import type { Node } from 'prosemirror-model';
 import type { NodeView, ViewMutationRecord } from 'prosemirror-view';
 import { mount, unmount } from 'svelte';
 import type { LiveWidget } from '../renderer/live-widget.svelte.ts';
+import type { Control } from '../widget/document.ts';
 import type { Words } from '../widget/places.ts';
+import { atomName } from './atom-name.ts';
 import BlockHost from './BlockHost.svelte';
 import { schema } from './schema.ts';
 
@@ -11,6 +13,7 @@ import { schema } from './schema.ts';
 export interface ViewHome {
 	widget: LiveWidget;
 	words: Words;
+	wiring: { controls: readonly Control[] };
 }
 
 /** A node as a component sees it: replaced when the text changes. */
@@ -21,17 +24,21 @@ export class ShownNode {
 	}
 }
 
-/** A slider or a chart at its true width, working. */
+/** A control or a chart at its true width, working. */
 export class BlockView implements NodeView {
 	readonly dom: HTMLElement;
 	#shown: ShownNode;
 	#component: Record<string, unknown>;
+	#home: ViewHome;
 
 	constructor(node: Node, home: ViewHome) {
+		this.#home = home;
 		this.#shown = new ShownNode(node);
 		this.dom = document.createElement('div');
 		this.dom.dataset.kind = node.type.name;
 		this.dom.contentEditable = 'false';
+		this.dom.setAttribute('role', 'group');
+		this.#name(node);
 		this.#component = mount(BlockHost, {
 			target: this.dom,
 			props: { shown: this.#shown, widget: home.widget }
@@ -41,7 +48,12 @@ export class BlockView implements NodeView {
 	update(node: Node): boolean {
 		if (node.type !== this.#shown.current.type) return false;
 		this.#shown.current = node;
+		this.#name(node);
 		return true;
+	}
+
+	#name(node: Node): void {
+		this.dom.setAttribute('aria-label', atomName(node, this.#home.wiring.controls));
 	}
 
 	selectNode(): void {
@@ -69,7 +81,7 @@ export class BlockView implements NodeView {
 	}
 }
 
-/** A number that the widget prints; it follows the sliders. */
+/** A number that the widget prints; it follows the controls. */
 export class InlineView implements NodeView {
 	readonly dom: HTMLElement;
 	#shown: ShownNode;

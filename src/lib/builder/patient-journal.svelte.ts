@@ -2,7 +2,8 @@
  * A journal that never stands in the way: a browser that keeps no data, is full, or never answers makes it say
  * `works === false`, and everything else goes on.
  */
-import type { Journal, JournalEntry } from './journal.ts';
+import type { Journal, JournalEntry, LeftEntry } from './journal.ts';
+import type { OpenAsk } from './keep-asks.ts';
 
 /** A browser that blocks its store may leave a request without any answer. */
 const LONGEST_WAIT_MS = 2_000;
@@ -19,8 +20,12 @@ export class PatientJournal {
 		this.#journal = journal;
 	}
 
-	read(): Promise<JournalEntry | null> {
-		return this.#patiently(() => this.#journal.read(), null);
+	read(): Promise<LeftEntry[]> {
+		return this.#patiently(() => this.#journal.read(), []);
+	}
+
+	letGo(left: LeftEntry): Promise<void> {
+		return this.#patiently(() => this.#journal.letGo(left), undefined);
 	}
 
 	write(entry: JournalEntry): Promise<void> {
@@ -29,6 +34,22 @@ export class PatientJournal {
 
 	clear(): Promise<void> {
 		return this.#patiently(() => this.#journal.clear(), undefined);
+	}
+
+	keepAsk(ask: OpenAsk): Promise<void> {
+		return this.#patiently(() => this.#journal.keepAsk(ask), undefined);
+	}
+
+	listAsks(): Promise<OpenAsk[]> {
+		return this.#patiently(() => this.#journal.listAsks(), []);
+	}
+
+	dropAsk(id: string): Promise<void> {
+		return this.#patiently(() => this.#journal.dropAsk(id), undefined);
+	}
+
+	close(): void {
+		this.#journal.close();
 	}
 
 	/** Sets words aside; they stay listed here even where the browser couldn't keep them. */

@@ -26,7 +26,7 @@ const line: Step = {
 };
 
 function offered(steps: Step[], step: Step, unit: string): string[] {
-	const document = { steps, controls: [] };
+	const document = { steps, formulas: [], controls: [] };
 	const readings = benchReadings(document, evaluate(document, {}, catalogue), catalogue);
 	return readingsForPeg(document, step, unit, readings, catalogue).map(({ ref }) =>
 		'output' in ref ? `${ref.step} ${ref.output}` : ''

@@ -1,6 +1,7 @@
-/** What a peg can be fed from: readings and sliders in units that convert, and never a ring. */
+/** What a peg can be fed from: readings and controls in units that convert, and never a ring. */
 import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
 import { commensurable, units, type Unit } from '../physics/units/units.ts';
+import { hasOptions, type Option } from '../widget/control.ts';
 import type { Control, SettingSource, Step, WidgetDocument } from '../widget/document.ts';
 import { wiringOf } from '../widget/graph.ts';
 import { fixedSettings, unitOfRef } from '../widget/tie-units.ts';
@@ -20,7 +21,7 @@ export function unitsLike(symbol: string): readonly Unit[] {
 
 /** By the units that the wiring brings, so that a reading which is refused just now can be tied all the same. */
 export function readingsForPeg(
-	document: Pick<WidgetDocument, 'steps' | 'controls'>,
+	document: Pick<WidgetDocument, 'formulas' | 'steps' | 'controls'>,
 	step: Step,
 	unit: string,
 	readings: readonly BenchReading[],
@@ -34,8 +35,24 @@ export function readingsForPeg(
 	});
 }
 
+/** Controls whose settings are numbers of this kind. */
 export function controlsForPeg(controls: readonly Control[], unit: string): Control[] {
-	return controls.filter((control) => commensurable(control.unit, unit));
+	return controls.filter((control) => !offersWords(control) && commensurable(control.unit, unit));
+}
+
+/** Controls that offer none but these words. */
+export function controlsOfWords(
+	controls: readonly Control[],
+	options: readonly Option[]
+): Control[] {
+	const known = new Set(options.map(({ value }) => value));
+	return controls.filter(
+		(control) => hasOptions(control) && control.options.every(({ value }) => known.has(value))
+	);
+}
+
+function offersWords(control: Control): boolean {
+	return hasOptions(control) && control.options.some(({ value }) => typeof value === 'string');
 }
 
 /** One string for each source, for a list to choose from. */

@@ -9,7 +9,12 @@ import { isUndeclared, type NumberInCopy } from './quantities.ts';
 export interface Missing {
 	key: string;
 	says: string;
-	go: { number: NumberInCopy } | { block: string } | { step: string } | { title: true };
+	go:
+		| { number: NumberInCopy }
+		| { block: string }
+		| { formula: string }
+		| { step: string }
+		| { title: true };
 }
 
 export function missingForProof(
@@ -46,6 +51,7 @@ function missingOf(
 	const number = numbers.find(({ claim }) => claim !== null && claim.id === at.claim);
 	if (number) return { key, says, go: { number } };
 	if (at.block) return { key, says, go: { block: at.block } };
+	if (at.formula) return { key, says, go: { formula: at.formula } };
 	if (at.step) return { key, says, go: { step: at.step } };
 	return { key, says, go: { title: true } };
 }

@@ -18,11 +18,12 @@ const LEVEL: Verdict = {
 };
 
 const document: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: 'First light, at 21 centimetres',
 	point: '',
+	formulas: [],
 	steps: [],
 	controls: [
 		{

@@ -2,7 +2,9 @@
 import type { Node } from 'prosemirror-model';
 import { detectQuantities, type DetectedQuantity } from '../factcheck/detect.ts';
 import { wantsWeighing } from '../factcheck/undeclared.ts';
+import { hasLexicon } from '../factcheck/lexicon/shelf.ts';
 import type { Claim } from '../widget/document.ts';
+import type { Language } from '../widget/language.ts';
 import { claimOf, schema, wiringOf } from './schema.ts';
 
 export interface NumberInCopy {
@@ -18,22 +20,26 @@ export interface NumberInCopy {
 	claim: Claim | null;
 	/** The number as detected; null for live numbers and for words nobody reads as a number. */
 	quantity: DetectedQuantity | null;
-	/** The slider whose value is printed here. */
+	/** The control whose value is printed here. */
 	control: string | null;
 }
 
 /** Inline atoms count as one character, so offsets in the text are positions in the block. */
 const ATOM = '\ufffc';
+/** As many characters as the words of a claim may have. */
+const LONGEST_CLAIM = 400;
 
-const detected = new WeakMap<Node, DetectedQuantity[]>();
+const detected = new WeakMap<Node, { language: Language; found: DetectedQuantity[] }>();
 
 /** Quantities of one block of text. Blocks never change, so an untouched one is read once. */
-export function quantitiesOf(block: Node): DetectedQuantity[] {
+export function quantitiesOf(block: Node, language: Language): DetectedQuantity[] {
 	const known = detected.get(block);
-	if (known) return known;
+	if (known?.language === language) return known.found;
+	// Its lexicon is on the way; then the copy is read again.
+	if (!hasLexicon(language)) return [];
 	const text = block.textBetween(0, block.content.size, undefined, ATOM);
-	const found = detectQuantities(text, 'en').filter(wantsWeighing);
-	detected.set(block, found);
+	const found = detectQuantities(text, language).filter(wantsWeighing);
+	detected.set(block, { language, found });
 	return found;
 }
 
@@ -57,7 +63,8 @@ export function claimRuns(block: Node): Run[] {
 }
 
 export function numbersInCopy(doc: Node): NumberInCopy[] {
-	const claims = new Map(wiringOf(doc).claims.map((claim) => [claim.id, claim]));
+	const { language, claims: entries } = wiringOf(doc);
+	const claims = new Map(entries.map((claim) => [claim.id, claim]));
 	const numbers: NumberInCopy[] = [];
 	doc.forEach((block, offset) => {
 		if (
@@ -66,14 +73,19 @@ export function numbersInCopy(doc: Node): NumberInCopy[] {
 			block.type === schema.nodes.point
 		)
 			return;
-		numbers.push(...numbersOf(block, offset + 1, claims));
+		numbers.push(...numbersOf(block, offset + 1, claims, language));
 	});
 	return numbers;
 }
 
-function numbersOf(block: Node, start: number, claims: ReadonlyMap<string, Claim>): NumberInCopy[] {
+function numbersOf(
+	block: Node,
+	start: number,
+	claims: ReadonlyMap<string, Claim>,
+	language: Language
+): NumberInCopy[] {
 	const blockId = block.attrs.id as string;
-	const quantities = quantitiesOf(block);
+	const quantities = quantitiesOf(block, language);
 	const runs = claimRuns(block);
 	const overlaps = (quantity: DetectedQuantity, run: Run) =>
 		quantity.start < run.end && quantity.end > run.start;
@@ -129,6 +141,38 @@ export function numberAt(
 			from === to ? number.from < from && from <= number.to : number.from <= from && to <= number.to
 		) ?? null
 	);
+}
+
+/** Words that are selected within one block, to be marked by hand; null over claims, printed numbers and the title. */
+export function numberByHand(doc: Node, from: number, to: number): NumberInCopy | null {
+	const $from = doc.resolve(from);
+	const block = $from.parent;
+	const { title, point } = schema.nodes;
+	if (from === to || !block.inlineContent || !$from.sameParent(doc.resolve(to))) return null;
+	if (block.type === title || block.type === point) return null;
+	const start = $from.start();
+	let isPlain = true;
+	doc.nodesBetween(from, to, (node) => {
+		if (node.isInline && (!node.isText || claimOf(node) !== null)) isPlain = false;
+	});
+	const words = doc.textBetween(from, to);
+	const lead = words.length - words.trimStart().length;
+	const trimmed = words.trim();
+	if (!isPlain || trimmed === '' || trimmed.length > LONGEST_CLAIM) return null;
+	const [first, last] = [from + lead, from + lead + trimmed.length];
+	const quantity = quantitiesOf(block, wiringOf(doc).language).find(
+		(each) => start + each.start < last && start + each.end > first
+	);
+	return {
+		key: `hand ${first}`,
+		from: first,
+		to: last,
+		blockId: block.attrs.id as string,
+		words: trimmed,
+		claim: null,
+		quantity: quantity ?? null,
+		control: null
+	};
 }
 
 /** Not declared by anyone: neither tied nor named as no claim. */

@@ -5,11 +5,12 @@ import { parseDocument } from '../widget/parse.ts';
 import { refusedWords } from './refused-words.ts';
 
 const EMPTY: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: '',
 	point: '',
+	formulas: [],
 	steps: [],
 	controls: [],
 	blocks: [],

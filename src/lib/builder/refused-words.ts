@@ -67,7 +67,7 @@ function blockPlace(
 ): string | null {
 	if (!block) return null;
 	if (block.kind === 'chart') return `The ${field ?? ''} of the chart ${opening(block.title)}`;
-	if (!isTextBlock(block)) return 'A slider in the copy';
+	if (!isTextBlock(block)) return `The ${BLOCK_WORDS[block.kind]} in the copy`;
 	const words = block.content.map((inline) => ('text' in inline ? inline.text : '')).join('');
 	return `The ${BLOCK_WORDS[block.kind]} ${opening(words)}`;
 }

@@ -3,36 +3,72 @@
  * number is tied to) stands in the top node's attributes, so that one undo covers words and wiring alike.
  */
 import { Schema, type DOMOutputSpec, type Node } from 'prosemirror-model';
-import type { ChartBlock, Claim, Control, Step } from '../widget/document.ts';
+import {
+	TEXT_KINDS,
+	type Block,
+	type BlockKind,
+	type Claim,
+	type Control,
+	type FormulaStep,
+	type Step,
+	type TextBlock,
+	type WidgetDocument
+} from '../widget/document.ts';
 
 /** What the top node carries beside the text. */
 export interface Wiring {
+	language: WidgetDocument['language'];
 	constants: string;
+	formulas: readonly FormulaStep[];
 	steps: readonly Step[];
 	controls: readonly Control[];
 	claims: readonly Claim[];
 }
 
-export type ChartFields = Omit<ChartBlock, 'id' | 'kind'>;
+export const TEXT_BLOCKS = TEXT_KINDS;
+export type TextBlockKind = TextBlock['kind'];
 
-export const TEXT_BLOCKS = ['paragraph', 'heading', 'result', 'limits', 'caution'] as const;
-export type TextBlockKind = (typeof TEXT_BLOCKS)[number];
-export type BlockKind = TextBlockKind | 'control' | 'chart';
+/** Blocks that the widget draws from fields, and that have no text of their own to write in. */
+export const FIELD_BLOCKS = [
+	'chart',
+	'table',
+	'equation',
+	'picture',
+	'guess',
+	'presets',
+	'sources'
+] as const satisfies readonly BlockKind[];
+export type FieldBlockKind = (typeof FIELD_BLOCKS)[number];
+export type FieldBlock = Extract<Block, { kind: FieldBlockKind }>;
+
+type Fields<B> = B extends FieldBlock ? Omit<B, 'id' | 'kind'> : never;
+/** What a block of a kind says of itself, beside its id. */
+export type FieldsOf<K extends FieldBlockKind> = Fields<Extract<FieldBlock, { kind: K }>>;
+export type { BlockKind };
+export type ChartFields = FieldsOf<'chart'>;
 
 /** What each block is called in the margin and in the insert list. */
 export const BLOCK_WORDS: Record<BlockKind, string> = {
 	paragraph: 'paragraph',
 	heading: 'heading',
+	aside: 'aside',
 	result: 'result sentence',
 	limits: 'what this can’t tell you',
 	caution: 'caution',
 	control: 'control',
-	chart: 'chart'
+	chart: 'chart',
+	table: 'table of readings',
+	equation: 'equation',
+	picture: 'picture',
+	guess: 'guess first',
+	presets: 'settings to try',
+	sources: 'sources'
 };
 
 const ELEMENTS: Record<TextBlockKind, string> = {
 	paragraph: 'p',
 	heading: 'h2',
+	aside: 'p',
 	result: 'p',
 	limits: 'p',
 	caution: 'p'
@@ -55,6 +91,16 @@ function textBlock(kind: TextBlockKind) {
 	};
 }
 
+/** It is moved within a piece, never pasted from elsewhere: its fields don't travel as HTML. */
+function fieldBlock(kind: FieldBlockKind) {
+	return {
+		group: 'block',
+		atom: true,
+		attrs: { id: { default: '' }, fields: { default: null } },
+		toDOM: (): DOMOutputSpec => ['div', { 'data-kind': kind }]
+	};
+}
+
 /** A single line of plain words above the blocks. */
 function headLine(kind: 'title' | 'point', element: string) {
 	return {
@@ -72,7 +118,9 @@ export const schema = new Schema({
 		doc: {
 			content: 'title point block+',
 			attrs: {
+				language: { default: 'en' },
 				constants: { default: '' },
+				formulas: { default: [] },
 				steps: { default: [] },
 				controls: { default: [] },
 				claims: { default: [] }
@@ -83,6 +131,7 @@ export const schema = new Schema({
 		paragraph: textBlock('paragraph'),
 		heading: textBlock('heading'),
 		result: textBlock('result'),
+		aside: textBlock('aside'),
 		limits: textBlock('limits'),
 		caution: textBlock('caution'),
 		control: {
@@ -100,13 +149,13 @@ export const schema = new Schema({
 				{ 'data-kind': 'control', 'data-control': node.attrs.control as string }
 			]
 		},
-		chart: {
-			group: 'block',
-			atom: true,
-			attrs: { id: { default: '' }, fields: { default: null } },
-			// A chart is moved within a piece, never pasted from elsewhere: its fields don't travel as HTML.
-			toDOM: (): DOMOutputSpec => ['div', { 'data-kind': 'chart' }]
-		},
+		chart: fieldBlock('chart'),
+		table: fieldBlock('table'),
+		equation: fieldBlock('equation'),
+		picture: fieldBlock('picture'),
+		guess: fieldBlock('guess'),
+		presets: fieldBlock('presets'),
+		sources: fieldBlock('sources'),
 		live: {
 			group: 'inline',
 			inline: true,
@@ -173,6 +222,10 @@ export function wiringOf(doc: Node): Wiring {
 
 export function isTextBlockKind(name: string): name is TextBlockKind {
 	return (TEXT_BLOCKS as readonly string[]).includes(name);
+}
+
+export function isFieldBlockKind(name: string): name is FieldBlockKind {
+	return (FIELD_BLOCKS as readonly string[]).includes(name);
 }
 
 /** Finds a claim's id on a text node, or null. */

@@ -1,12 +1,13 @@
 /** The short list that `=` opens: readings to tie to, then what else a number can be. */
 import type { Verdict } from '../factcheck/verdict.ts';
 import { weigh } from '../factcheck/weigh.ts';
-import { printStated, statedValue, stateReading } from '../widget/stated.ts';
+import { printStated, statedValue, stateReading, type LiveFormat } from '../widget/stated.ts';
 import { sameRef, type BenchReading } from './bench-readings.ts';
 import type { NumberInCopy } from './quantities.ts';
 import { rankReadings } from './rank-readings.ts';
 import { readIn, wordsOf } from './short-reading.ts';
-import { liveFormat, scaledUnit, type LiveFormat } from './tie.ts';
+import type { Language } from '../widget/language.ts';
+import { liveFormat, scaledUnit } from './tie.ts';
 
 export interface TieOption {
 	reading: BenchReading;
@@ -21,7 +22,11 @@ export interface TieOption {
 	isTied: boolean;
 }
 
-export function tieOptions(number: NumberInCopy, readings: readonly BenchReading[]): TieOption[] {
+export function tieOptions(
+	number: NumberInCopy,
+	readings: readonly BenchReading[],
+	language: Language
+): TieOption[] {
 	const { quantity, claim } = number;
 	const current = claim && claim.form !== 'exempt' ? claim.reading : null;
 	const stated = quantity?.stated ?? null;
@@ -41,9 +46,12 @@ export function tieOptions(number: NumberInCopy, readings: readonly BenchReading
 			{
 				reading,
 				value: wordsOf(readIn({ value, unit, uncertainty }, shownUnit)),
-				verdict: stated ? weigh(stated, { ...outcome.reading, value }) : null,
+				verdict: stated ? weigh(stated, { ...outcome.reading, value }, language) : null,
 				format: { unit: format.unit, figures: format.figures, hedge: format.hedge },
-				printed: printStated(stateReading(value, unit, format)),
+				printed: printStated(
+					stateReading(value, unit, format, outcome.reading.quantity, language, uncertainty),
+					language
+				),
 				isTied: current !== null && sameRef(current, reading.ref)
 			}
 		];

@@ -16,11 +16,12 @@ import {
 } from './tie.ts';
 
 const document: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: '',
 	point: '',
+	formulas: [],
 	steps: [],
 	controls: [
 		{

@@ -2,6 +2,7 @@
 import type { Transaction } from 'prosemirror-state';
 import type { DetectedQuantity } from '../factcheck/detect.ts';
 import { commensurable, unitOf, units } from '../physics/units/units.ts';
+import type { LiveFormat } from '../widget/stated.ts';
 import type { Claim, ReadingRef } from '../widget/document.ts';
 import { newId } from './ids.ts';
 import type { NumberInCopy } from './quantities.ts';
@@ -19,7 +20,7 @@ function declare(transaction: Transaction, number: NumberInCopy, entry: Entry): 
 		.setDocAttribute('claims', [...others, { ...entry, id } as Claim]);
 }
 
-/** Words tied to a slider would go false as soon as it moves, so the slider's own value is printed in their place. */
+/** Words tied to a control would go false as soon as it moves, so the control's own value is printed in their place. */
 export function tie(
 	transaction: Transaction,
 	number: NumberInCopy,
@@ -49,7 +50,7 @@ export function untie(transaction: Transaction, number: NumberInCopy, words: str
 	return transaction.setDocAttribute('claims', claims);
 }
 
-/** Puts a number that the widget prints in place of the words. A slider's value is a setting, not a claim. */
+/** Puts a number that the widget prints in place of the words. A control's value is a setting, not a claim. */
 export function printLive(
 	transaction: Transaction,
 	number: NumberInCopy,
@@ -66,7 +67,7 @@ export function printLive(
 		]);
 }
 
-/** A slider's value in place of the words. It is a setting, and no claim: an entry that stood for the words goes. */
+/** A control's value in place of the words. It is a setting, and no claim: an entry that stood for the words goes. */
 function printSetting(
 	transaction: Transaction,
 	number: NumberInCopy,
@@ -85,12 +86,6 @@ export function replaceClaim(transaction: Transaction, claim: Claim): Transactio
 		other.id === claim.id ? claim : other
 	);
 	return transaction.setDocAttribute('claims', claims);
-}
-
-export interface LiveFormat {
-	unit: string;
-	figures: number;
-	hedge: 'none' | 'about';
 }
 
 /** The format the writer's own words ask for: their unit and scale, as many figures, the same hedge. */

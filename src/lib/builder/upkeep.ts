@@ -19,7 +19,8 @@ export function upkeep(): Plugin {
 /** Block ids after a split or a paste, claims that stand twice, claims of another piece, and hedges typed later. */
 export function mend(state: EditorState): Transaction {
 	const transaction = state.tr;
-	const claims = new Map(wiringOf(state.doc).claims.map((claim) => [claim.id, claim]));
+	const { language, claims: entries } = wiringOf(state.doc);
+	const claims = new Map(entries.map((claim) => [claim.id, claim]));
 	const controls = new Set(wiringOf(state.doc).controls.map(({ id }) => id));
 	const blockIds = new Set<string>();
 	const placed = new Set<string>();
@@ -50,7 +51,7 @@ export function mend(state: EditorState): Transaction {
 		if (!block.inlineContent) return;
 
 		const start = offset + 1;
-		const quantities = quantitiesOf(block);
+		const quantities = quantitiesOf(block, language);
 		for (const run of claimRuns(block)) {
 			const id = idFor(run.claim);
 			const from = start + run.start;

@@ -21,7 +21,7 @@ export interface WeighedWords {
 interface Home {
 	document: WidgetDocument;
 	calculators: CalculatorSet;
-	/** Stated words are weighed at the first settings, live ones where the sliders stand. */
+	/** Stated words are weighed at the first settings, live ones where the controls stand. */
 	firstEvaluation: Evaluation;
 	widget: { evaluation: Evaluation };
 }
@@ -44,7 +44,7 @@ export function weighedWords(home: Home, number: NumberInCopy): WeighedWords | n
 	return {
 		stated,
 		reading,
-		words: number.words || printStated(stated),
+		words: number.words || printStated(stated, document.language),
 		reads: readsOnBeam(stated, reading)
 	};
 }

@@ -2,11 +2,11 @@ import { describe, expect, test } from 'vitest';
 import { catalogue } from '../physics/calculators/index.ts';
 import type { Calculator } from '../physics/calculator.ts';
 import { evaluate } from '../widget/evaluate.ts';
+import { suggestRange } from './control-draft.ts';
 import {
 	freshStep,
 	pegsOf,
 	settingLabel,
-	suggestControl,
 	tagLetter,
 	typedNumber,
 	withChoice,
@@ -22,7 +22,7 @@ function shelf(id: string): Calculator {
 describe('a calculator on the bench', () => {
 	test.each([...catalogue.keys()])('%s gives readings as it comes off the shelf', (id) => {
 		const step = freshStep(shelf(id));
-		const { steps } = evaluate({ steps: [step], controls: [] }, {}, catalogue);
+		const { steps } = evaluate({ steps: [step], formulas: [], controls: [] }, {}, catalogue);
 		expect(steps[step.id]).toMatchObject({ ok: true });
 	});
 
@@ -53,7 +53,7 @@ describe('a calculator on the bench', () => {
 	});
 });
 
-describe('a slider made of a setting', () => {
+describe('a control made of a setting', () => {
 	test.each(
 		[...catalogue.values()].flatMap((calculator) =>
 			Object.entries(calculator.inputs).flatMap(([key, spec]) =>
@@ -63,7 +63,7 @@ describe('a slider made of a setting', () => {
 			)
 		)
 	)('$name: ends, step and start fit together', ({ spec, unit }) => {
-		const fields = suggestControl('x', spec, unit, unit, spec.initial);
+		const fields = suggestRange({ what: 'number', ...spec, unit }, unit, spec.initial);
 		expect(fields.min).toBeLessThan(fields.max);
 		expect(fields.min).toBeGreaterThanOrEqual(spec.min);
 		expect(fields.max).toBeLessThanOrEqual(spec.max);

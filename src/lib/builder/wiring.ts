@@ -1,8 +1,6 @@
 /** Changes to what hangs on the bench, as plain values; the manuscript puts them into one undoable step. */
 import { resolveUnit, type Calculator, type InputSpec } from '../physics/calculator.ts';
-import { convert } from '../physics/units/units.ts';
-import type { Control, SettingSource, Step } from '../widget/document.ts';
-import { largestOnGrid, snapToGrid } from '../widget/grid.ts';
+import type { SettingSource, Step } from '../widget/document.ts';
 import { plainDecimal, roundToFigures } from '../widget/stated.ts';
 import { fixedSettings } from '../widget/tie-units.ts';
 import { newId } from './ids.ts';
@@ -108,48 +106,19 @@ export function typedNumber(text: string): number | null {
 	return Number.isFinite(value) ? value : null;
 }
 
-/** A slider's range to start from: where the model is good, in the unit asked for, in round steps. */
-export function suggestControl(
-	label: string,
-	spec: Extract<InputSpec, { kind: 'number' }>,
-	ownUnit: string,
-	unit: string,
-	initial: number
-): Omit<Control, 'id' | 'kind'> {
-	const inUnit = (value: number) => convert(value, ownUnit, unit);
-	const low = inUnit(spec.good?.min ?? spec.min);
-	const high = inUnit(spec.good?.max ?? spec.max);
-	const first = inUnit(initial);
-	// A range of many decades makes a useless slider: start with a stretch around the first value.
-	const wide = first > 0 && high / Math.max(low, first / 1e3) > 100;
-	const from = wide ? Math.max(low, roundDown(first / 2)) : low;
-	const to = wide ? Math.min(high, roundUp(first * 3)) : high;
-	const step = roundDown((to - from) / 40) || (to - from) / 40;
-	const grid = { min: tidy(from), max: tidy(to), step: tidy(step) };
-	return {
-		label,
-		unit,
-		...grid,
-		max: largestOnGrid(grid),
-		initial: snapToGrid(first, grid)
-	};
-}
-
-function roundDown(value: number): number {
+/** 1, 2 or 5 times a power of ten, at most `value`; nought for what isn't above it. */
+export function roundDown(value: number): number {
 	if (value <= 0) return 0;
 	const power = 10 ** Math.floor(Math.log10(value));
 	const lead = value / power;
 	return (lead >= 5 ? 5 : lead >= 2 ? 2 : 1) * power;
 }
 
-function roundUp(value: number): number {
+/** 1, 2, 5 or 10 times a power of ten, at least `value`, which is above nought. */
+export function roundUp(value: number): number {
 	const power = 10 ** Math.floor(Math.log10(value));
 	const lead = value / power;
 	return (lead <= 1 ? 1 : lead <= 2 ? 2 : lead <= 5 ? 5 : 10) * power;
-}
-
-function tidy(value: number): number {
-	return Number(value.toPrecision(12));
 }
 
 /** A, B … Z, AA, AB …: the tag on a hook. */

@@ -1,5 +1,6 @@
 /** The two sides of one claim at some settings: what it states, and what is read. For pictures and sentences about it. */
 import type { CalculatorSet } from '../physics/calculator.ts';
+import { benchSet } from '../widget/bench-set.ts';
 import type { Claim, WidgetDocument } from '../widget/document.ts';
 import { readingAt, type Evaluation } from '../widget/evaluate.ts';
 import { readingWithUncertainty } from '../widget/evaluate-uncertainty.ts';
@@ -17,9 +18,10 @@ export function weighingOf(
 	evaluation: Evaluation,
 	claim: Claim,
 	words: string,
-	calculators: CalculatorSet
+	house: CalculatorSet
 ): { stated: Stated; reading: WeighedReading } | null {
 	if (claim.form === 'exempt') return null;
+	const calculators = benchSet(document, house);
 	const read = claim.form === 'live' ? readingAt : readingWithUncertainty;
 	const outcome = read(document, evaluation, claim.reading, calculators);
 	if (!outcome.ok || typeof outcome.reading.value !== 'number') return null;

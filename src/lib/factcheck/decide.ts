@@ -4,6 +4,7 @@ import { unitOf } from '../physics/units/units.ts';
 import type { Stated } from '../widget/stated.ts';
 import { bands } from './bands.ts';
 import { signOf } from './decimal.ts';
+import { isReadTwoWays } from './hedges.ts';
 import { rules } from './rules.ts';
 import type { Severity, Verdict } from './verdict.ts';
 import {
@@ -85,10 +86,10 @@ function outcomeOf(weighing: Weighing) {
 	return rules[weighing.stated.hedge].weigh(weighing);
 }
 
-/** Readers split on the side that “nearly −20” names, and lay copy seldom needs a fourth figure: both are asked about. */
+/** Readers split on the side that “nearly −20” names, lay copy seldom needs a fourth figure: both are asked about. */
 function severityOf({ stated, reading, v, figures }: Weighing): Severity {
 	const sideOfNegative = rules[stated.hedge].oneSided && signOf(v) < 0;
 	const manyFigures =
 		figures > bands.figures && (reading.uncertainty !== 'exact' || stated.hedge === 'around');
-	return sideOfNegative || manyFigures ? 'ask' : 'none';
+	return sideOfNegative || manyFigures || isReadTwoWays(stated.hedgeWord) ? 'ask' : 'none';
 }

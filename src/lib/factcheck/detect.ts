@@ -3,44 +3,20 @@
  * ordinals and names with digits are left alone. Time grows with the length of the text and no faster.
  */
 import type { Stated } from '../widget/stated.ts';
-import { unitOf } from '../physics/units/units.ts';
+import type { Language } from '../widget/language.ts';
+import { printWordsOf } from '../widget/languages/print-words.ts';
+import type { DetectedQuantity, QuantityForm } from './detected.ts';
 import { readHedge, type Hedge } from './hedge-before.ts';
-import { lexiconOf, plainPhrase, type Language } from './hedges.ts';
-import { isName, isYear, skippedSpans } from './not-quantities.ts';
-import { readAt, readNumber, type NumberRead } from './numbers.ts';
-import { endsCleanly, stands, valueOf, withUnit, type Part } from './parts.ts';
+import { lexiconOf } from './lexicon/shelf.ts';
+import { isLabel, isName, isYear, skippedSpans } from './not-quantities.ts';
+import type { NumberRead } from './number-read.ts';
+import { readNumber } from './numbers.ts';
+import { stands, valueOf, withUnit, type Part } from './parts.ts';
 import { compile, type Patterns } from './patterns.ts';
+import { readRange, type Attempt } from './ranges.ts';
+import { readAt, sticky, GAP } from './text-patterns.ts';
 
-export type QuantityForm =
-	| 'number'
-	| 'fraction'
-	| 'multiple'
-	| 'range'
-	| 'percent'
-	| 'power'
-	| 'uncertainty'
-	| 'order-word'
-	| 'small-word';
-
-export interface DetectedQuantity {
-	/** UTF-16 offsets of `surface`, from the hedge to the unit. */
-	start: number;
-	end: number;
-	surface: string;
-	kind: QuantityForm;
-	/** In `unit`; null where the words name no one number. */
-	value: number | null;
-	/** Both ends of a range, in `unit`. */
-	ends?: readonly [low: number, high: number];
-	/** A symbol of the unit table; '' for a plain number. */
-	unit: string;
-	/** The hedge as written; '' when bare. */
-	hedge: string;
-	/** Two hedges on one number, “about up to 15”. */
-	doubleHedge: boolean;
-	/** What is weighed; null for kinds that no rule in the house weighs yet. */
-	stated: Stated | null;
-}
+export type { DetectedQuantity, QuantityForm } from './detected.ts';
 
 const compiled = new Map<Language, Patterns>();
 
@@ -72,15 +48,19 @@ export function detectQuantities(text: string, language: Language): DetectedQuan
 	}
 }
 
-function nextTrigger({ trigger }: Patterns, text: string, from: number): number | null {
+/** The next digit, or the next word that may begin a number. */
+function nextTrigger(patterns: Patterns, text: string, from: number): number | null {
+	const { trigger, beginnings, lexicon, foldEnding } = patterns;
 	trigger.lastIndex = from;
-	return trigger.exec(text)?.index ?? null;
-}
-
-interface Attempt {
-	quantity: DetectedQuantity | null;
-	/** Where to go on. */
-	resume: number;
+	for (let match = trigger.exec(text); match; match = trigger.exec(text)) {
+		const [token] = match;
+		if (!/\p{L}/u.test(token)) return match.index;
+		const word = token.toLowerCase();
+		const begins =
+			beginnings.has(word) || lexicon.compound?.(word) != null || foldEnding.test(word);
+		if (begins && !/[\p{L}\p{N}]/u.test(text[match.index - 1] ?? '')) return match.index;
+	}
+	return null;
 }
 
 function readQuantity(patterns: Patterns, text: string, at: number, floor: number): Attempt {
@@ -115,26 +95,32 @@ function isQuantity(patterns: Patterns, text: string, part: Part, hedge: Hedge):
 	const alone = unit === '' && number.scale === 1;
 	switch (number.form) {
 		case 'article':
-			return unit !== '' && hedge.family !== 'bare';
+			return unit !== '' && (hedge.family !== 'bare' || !isLoose(patterns, unit));
 		case 'word':
-			if (alone && Number(number.numeral) < 2) return false;
-			return !(alone && isName(patterns, text, number));
+			if (!alone) return true;
+			if (['0', '1'].includes(number.numeral) || readAt(patterns.clockAfter, text, number.end))
+				return false;
+			return !isName(patterns, text, number);
 		case 'fraction':
-			return !patterns.halfNounBefore.test(
+			return !patterns.fractionNounBefore.test(
 				text.slice(Math.max(0, number.start - 24), number.start)
 			);
 		case 'numeral':
 			if (!alone) return true;
-			if (isYear(patterns, text, number, hedge.family, hedge.start)) return false;
-			return !isName(patterns, text, number);
+			if (isYear(patterns, text, number, hedge) || isName(patterns, text, number)) return false;
+			return hedge.family !== 'bare' || part.negative || !isLabel(patterns, text, number);
 		default:
 			return true;
 	}
 }
 
+function isLoose({ lexicon: { loosely } }: Patterns, unit: string): boolean {
+	return loosely === 'all' || loosely.includes(unit);
+}
+
 function quantityOf(patterns: Patterns, text: string, part: Part, hedge: Hedge): DetectedQuantity {
 	const { number, unit } = part;
-	const kind = kindOf(patterns, part);
+	const kind = kindOf(patterns, text, part);
 	const numeral = (part.negative ? '-' : '') + number.numeral;
 	const weighed = kind !== 'order-word' && kind !== 'small-word' && kind !== 'uncertainty';
 	const quantity = quantityWord(patterns, text, part.end);
@@ -145,7 +131,7 @@ function quantityOf(patterns: Patterns, text: string, part: Part, hedge: Hedge):
 				numeral,
 				scale: number.scale,
 				unit,
-				...unitWord(part),
+				...unitWord(patterns, part),
 				...(number.fraction ? { fraction: number.fraction } : {}),
 				...(quantity ? { quantity } : {})
 			}
@@ -163,87 +149,33 @@ function quantityOf(patterns: Patterns, text: string, part: Part, hedge: Hedge):
 	};
 }
 
-function unitWord({ unit, unitWord: word }: Part): Pick<Stated, 'unitWord'> {
-	const words = unitOf(unit)?.words;
-	return !word || word === words?.one || word === words?.many ? {} : { unitWord: word };
+function unitWord({ lexicon }: Patterns, { unit, unitWord: word }: Part): Pick<Stated, 'unitWord'> {
+	const printed = printWordsOf(lexicon.language).units(unit);
+	return !word || printed?.includes(word) ? {} : { unitWord: word };
 }
 
-function quantityWord(patterns: Patterns, text: string, at: number): string | undefined {
-	const word = readAt(patterns.quantityWord, text, at)?.groups?.word;
-	return word && patterns.lexicon.quantities[plainPhrase(word)];
+const SPACES = sticky(GAP);
+
+function quantityWord({ quantityWords }: Patterns, text: string, at: number): string | undefined {
+	const gap = readAt(SPACES, text, at);
+	return gap ? quantityWords.read(text, at + gap[0].length)?.value : undefined;
 }
 
-function kindOf({ lexicon }: Patterns, { number, unit }: Part): QuantityForm {
+function kindOf(patterns: Patterns, text: string, { number, unit }: Part): QuantityForm {
 	switch (number.form) {
 		case 'numeral':
 		case 'word':
 		case 'article':
-			return unit === '%' ? 'percent' : unit === lexicon.times ? 'multiple' : 'number';
+			if (unit === '%') return 'percent';
+			return unit === 'times' || (unit === '' && isFactor(patterns, text, number))
+				? 'multiple'
+				: 'number';
 		default:
 			return number.form;
 	}
 }
 
-/** “2–3 km”, “between 2 and 3 km”, “from 2 to 3 km”: unit and scale once, at the end, stand for both. */
-function readRange(patterns: Patterns, text: string, first: Part, floor: number): Attempt | null {
-	const ahead = text.slice(Math.max(floor, first.start - 16), first.start);
-	const lead = patterns.betweenBefore.exec(ahead) ?? patterns.fromBefore.exec(ahead);
-	const isBetween = lead !== null && patterns.betweenBefore.test(ahead);
-	const joint =
-		(first.number.form === 'numeral' && readAt(patterns.rangeDash, text, first.end)) ||
-		(isBetween && readAt(patterns.rangeAnd, text, first.end)) ||
-		readAt(patterns.rangeTo, text, first.end);
-	if (!joint || !isCount(first)) return null;
-	const second = readSecond(patterns, text, first.end + joint[0].length);
-	if (!second || !isCount(second)) return null;
-	const isWords = first.number.form === 'word' || second.number.form === 'word';
-	const hasUnit = first.unit !== '' || second.unit !== '';
-	if (isWords && !lead && !hasUnit) return null;
-	const areYears =
-		!hasUnit &&
-		[first, second].every(({ number }) => number.bareDigits && /^[12]\d{3}$/.test(number.numeral));
-	if (areYears) return { quantity: null, resume: second.end };
-
-	const unit = second.unit || first.unit;
-	const scaled =
-		first.number.scale === 1 && first.unit === ''
-			? { ...first.number, scale: second.number.scale }
-			: first.number;
-	const low = valueOf({ ...first, number: scaled });
-	const high = valueOf(second);
-	const hedge = aroundOnly(readHedge(patterns, text, first.start, floor), first.start);
-	const start = lead ? first.start - lead[0].length : hedge.start;
-	const quantity: DetectedQuantity = {
-		start,
-		end: second.end,
-		surface: text.slice(start, second.end),
-		kind: 'range',
-		value: null,
-		...(low === null || high === null ? {} : { ends: [low, high] as const }),
-		unit,
-		hedge: lead ? '' : hedge.word,
-		doubleHedge: false,
-		stated: null
-	};
-	return { quantity, resume: second.end };
-}
-
-/** “About 2–3 km” hedges a range; “over 2–3 km” only says where. */
-function aroundOnly(hedge: Hedge, start: number): Hedge {
-	return hedge.family === 'around' ? hedge : { family: 'bare', word: '', start, double: false };
-}
-
-function isCount({ number }: Part): boolean {
-	return number.form === 'numeral' || number.form === 'word' || number.form === 'power';
-}
-
-/** The far end of a range, with its own sign. */
-function readSecond(patterns: Patterns, text: string, at: number): Part | null {
-	const sign = readAt(patterns.sign, text, at)?.[0] ?? '';
-	const number = readNumber(patterns, text, at + sign.length);
-	if (!number || number.form === 'article') return null;
-	const part = withUnit(patterns, text, number, at + sign.length);
-	return endsCleanly(patterns, text, part)
-		? { ...part, negative: sign !== '' && sign !== '+' }
-		: null;
+/** “a factor of 8”. */
+function isFactor({ factorBefore }: Patterns, text: string, { start }: NumberRead): boolean {
+	return factorBefore.test(text.slice(Math.max(0, start - 24), start));
 }

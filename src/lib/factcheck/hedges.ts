@@ -1,31 +1,18 @@
 /** Hedge words and the families the rules know them by. */
+import type { Language } from '../widget/language.ts';
 import type { HedgeFamily } from '../widget/stated.ts';
-import { english } from './lexicon/en.ts';
 import type { Lexicon } from './lexicon/lexicon.ts';
+import { lexiconOf } from './lexicon/shelf.ts';
+import { plainPhrase } from './text-patterns.ts';
 
-/** Languages whose lexicon is in the house. */
-export const LANGUAGES = ['en'] as const;
-export type Language = (typeof LANGUAGES)[number];
-
-const LEXICONS: Readonly<Record<Language, Lexicon>> = { en: english };
-
-export function lexiconOf(language: Language): Lexicon {
-	return LEXICONS[language];
-}
-
-/** The family of a hedge written alone; '' and “bare” are no hedge, and an unknown word is undefined. */
+/**
+ * The family of a hedge written alone; '' and “bare” are no hedge, and an unknown word is undefined.
+ * @throws {RangeError} as `lexiconOf` does.
+ */
 export function hedgeFamily(word: string, language: Language): HedgeFamily | undefined {
 	const plain = plainPhrase(word);
 	if (plain === '' || plain === 'bare') return 'bare';
-	return hedgeWords(LEXICONS[language]).get(plain);
-}
-
-/** Small letters, single spaces, so that a phrase compares as the lexicon writes it. */
-export function plainPhrase(phrase: string): string {
-	return phrase
-		.trim()
-		.toLowerCase()
-		.replace(/[\s\u00a0\u202f\u2009]+/gu, ' ');
+	return hedgeWords(lexiconOf(language)).get(plain);
 }
 
 /** Every hedge word with its family. */
@@ -35,4 +22,11 @@ export function hedgeWords(lexicon: Lexicon): ReadonlyMap<string, HedgeFamily> {
 			([family, words]) => words.map((word) => [word, family] as const)
 		)
 	);
+}
+
+/** “cerca de” is read as “about” by some and as “just below” by others: it weighs as around, and is asked about. */
+const READ_TWO_WAYS: ReadonlySet<string> = new Set(['cerca de', 'cerca del']);
+
+export function isReadTwoWays(hedgeWord: string): boolean {
+	return READ_TWO_WAYS.has(plainPhrase(hedgeWord));
 }

@@ -64,11 +64,12 @@ const output = { step: 'twice', output: 'length' };
 
 function documentOf(content: Inline[], claims: Claim[], control = slider): WidgetDocument {
 	return {
-		version: 1,
+		version: 2,
 		language: 'en',
 		constants: '2026.1',
 		title: 'Twice as long',
 		point: 'A length and its double.',
+		formulas: [],
 		steps: [
 			{
 				id: 'twice',
@@ -274,6 +275,7 @@ describe('the uncertainty behind stated words', () => {
 			[{ kind: 'claim', claim: 'it', text: 'nearly 14 billion years' }],
 			[{ id: 'it', form: 'stated', reading: { step: 'now', output: 'age' } }]
 		),
+		formulas: [],
 		steps: [
 			{
 				id: 'now',

@@ -1,6 +1,7 @@
 /** Weighs every claim of a document: stated words as they stand, live numbers at every setting that matters. */
 import type { CalculatorSet } from '../physics/calculator.ts';
 import { commensurable } from '../physics/units/units.ts';
+import { benchSet } from '../widget/bench-set.ts';
 import type { Claim, Control, ControlValues, WidgetDocument } from '../widget/document.ts';
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
 import { readingWithUncertainty } from '../widget/evaluate-uncertainty.ts';
@@ -12,7 +13,7 @@ import { ATOM, ownWords, quantityInPlace, type FoundQuantity } from './own-words
 import {
 	controlsReaching,
 	rank,
-	settingWords,
+	reachWords,
 	tryThroughout,
 	worstOf,
 	type Trial
@@ -27,10 +28,8 @@ type Evaluated = (values: ControlValues) => Evaluation;
  * The verdict on each claim, by id. Stated words are weighed at the first settings. What the widget prints is weighed
  * from end to end of every slider that reaches its reading, and the worst verdict counts.
  */
-export function judgeClaims(
-	document: WidgetDocument,
-	calculators: CalculatorSet
-): Map<string, Verdict> {
+export function judgeClaims(document: WidgetDocument, house: CalculatorSet): Map<string, Verdict> {
+	const calculators = benchSet(document, house);
 	const evaluated = evaluateOnce(document, calculators);
 	const places = new Map(claimPlaces(document, ownWords).map((place) => [place.claim.id, place]));
 	return new Map(
@@ -116,7 +115,9 @@ function judgeStated(
 			readingWithUncertainty(document, evaluated(values), claim.reading, calculators, { draws })
 		);
 	const start = weighAt({}, true);
-	const suggestions = start.stated ? suggestWordings(start.stated, start.reading) : [];
+	const suggestions = start.stated
+		? suggestWordings(start.stated, start.reading, document.language)
+		: [];
 	// Draws take their time, so the many settings along a slider make do with the straight line.
 	const worst = moves(document, place)
 		? worstOf(tryThroughout(document, claim.reading, (values) => weighAt(values, false).decision))
@@ -182,7 +183,7 @@ function judgeLive(
 	const worst = worstOf(trials);
 	const controls = controlsReaching(document, claim.reading);
 	if (!worst || rank(worst.decision) <= rank(start))
-		return { ...told(start, trials, controls), suggestions: [] };
+		return { ...told(document, start, trials, controls), suggestions: [] };
 	return {
 		...worst.decision,
 		reason: `At ${worst.setting}: ${worst.decision.reason}`,
@@ -191,13 +192,15 @@ function judgeLive(
 }
 
 /** The first settings are as bad as it gets: their own reason, and for level numbers how far that was tried. */
-function told(start: Decision, trials: readonly Trial[], controls: readonly Control[]): Decision {
+function told(
+	document: WidgetDocument,
+	start: Decision,
+	trials: readonly Trial[],
+	controls: readonly Control[]
+): Decision {
 	const [control] = controls;
 	if (start.verdict !== 'level' || !control) return start;
-	const reach =
-		controls.length === 1
-			? `from ${settingWords(control, control.min, false)} to ${settingWords(control, control.max, false)}`
-			: 'of its sliders';
+	const reach = controls.length === 1 ? reachWords(control, document.language) : 'of its sliders';
 	return {
 		...start,
 		reason: `The number printed fits at all ${trials.length} settings tried, ${reach}.`

@@ -1,8 +1,8 @@
 /** A number with its sign and the unit that follows it. */
-import { unitOf } from '../physics/units/units.ts';
-import { plainPhrase } from './hedges.ts';
-import { readAt, type NumberRead } from './numbers.ts';
+import { addParts, type NumberRead } from './number-read.ts';
 import type { Patterns } from './patterns.ts';
+import { readAt } from './text-patterns.ts';
+import { readUnitName, readUnitSymbol } from './unit-read.ts';
 
 export interface Part {
 	number: NumberRead;
@@ -22,45 +22,57 @@ export function withUnit(
 	number: NumberRead,
 	floor: number
 ): Part {
-	const of = number.form === 'order-word' ? readAt(patterns.of, text, number.end) : null;
-	const unit = readUnit(patterns, text, number.end + (of?.[0].length ?? 0));
+	const unit = number.unit === undefined ? readUnit(patterns, text, number) : null;
+	const half = unit && halfAfter(patterns, text, number, unit.end);
 	const before = text.slice(Math.max(floor, number.start - 12), number.start);
 	const minus = patterns.minusBefore.exec(before);
-	const sign = minus ? minus[0].replace(/^[\s(~≈<>≥≤“"–](?=[-−])/u, '') : '';
+	const sign = minus ? minus[0].replace(/^[\s\u00a0\u202f(~≈<>≥≤“"–](?=[-−])/u, '') : '';
 	return {
-		number,
+		number: half ? half.number : number,
 		negative: Boolean(minus),
-		unit: unit?.symbol ?? '',
+		unit: number.unit ?? unit?.symbol ?? '',
 		unitWord: unit?.word ?? '',
 		start: number.start - sign.length,
-		end: unit?.end ?? number.end
+		end: half?.end ?? unit?.end ?? number.end
+	};
+}
+
+/** “a year and a half”: the half stands after the unit. */
+function halfAfter({ andAHalf }: Patterns, text: string, number: NumberRead, at: number) {
+	const isWhole = /^\d+$/.test(number.numeral) && number.scale === 1;
+	const match =
+		isWhole && ['word', 'article', 'numeral'].includes(number.form) && readAt(andAHalf, text, at);
+	if (!match) return null;
+	const form = number.form === 'article' ? 'word' : number.form;
+	return {
+		number: { ...number, form, numeral: addParts(number.numeral, [1, 2]) },
+		end: at + match[0].length
 	};
 }
 
 /** A unit right after the number, by name or by symbol, whichever is longer. */
-function readUnit(patterns: Patterns, text: string, at: number) {
-	const named = readAt(patterns.unitName, text, at);
-	const name = named?.groups?.name;
+function readUnit(patterns: Patterns, text: string, number: NumberRead) {
+	const { end: at, form } = number;
+	const between = betweenUnit(patterns, text, number);
 	const byName =
-		named && name
-			? { symbol: patterns.unitByName.get(plainPhrase(name)), length: named[0].length, word: name }
-			: null;
-	const bySymbol = readSymbol(patterns, text, at);
-	const best = (byName?.length ?? 0) >= (bySymbol?.length ?? 0) ? byName : bySymbol;
-	return best?.symbol === undefined
-		? null
-		: { symbol: best.symbol, word: best.word, end: at + best.length };
+		readUnitName(patterns, text, at + between) ??
+		(between ? readUnitName(patterns, text, at) : null);
+	const bySymbol = readUnitSymbol(patterns, text, at + between);
+	const best = (byName?.end ?? 0) >= (bySymbol?.end ?? 0) ? byName : bySymbol;
+	if (best?.symbol === undefined) return null;
+	// After a number word a few small letters are rather a word than a symbol: “drei mag er”.
+	const isSymbol = best === bySymbol && best !== byName;
+	return isSymbol && form === 'word' && /^\p{Ll}{3,}$/u.test(best.word) ? null : best;
 }
 
-function readSymbol(patterns: Patterns, text: string, at: number) {
-	const match = readAt(patterns.unitSymbol, text, at);
-	const { gap = '', symbol = '' } = match?.groups ?? {};
-	if (!match) return null;
-	const isWordLike = /\p{L}$/u.test(symbol);
-	if (isWordLike && /^[\p{L}\p{N}]/u.test(text.slice(at + match[0].length))) return null;
-	// “5K” and “1990s” are more often a name than a quantity; “5km” is a slip for “5 km”.
-	if (gap === '' && /^\p{L}$/u.test(symbol)) return null;
-	return { symbol: unitOf(symbol)?.symbol, length: match[0].length, word: symbol };
+/** The length of “of” before what is counted, where the number may have one. */
+function betweenUnit({ of, afterScale }: Patterns, text: string, number: NumberRead): number {
+	const { form, scale, numeral } = number;
+	if (form === 'order-word' || form === 'small-word' || scale === 12) {
+		return readAt(of, text, number.end)?.[0].length ?? 0;
+	}
+	const isLarge = scale >= 1e6 || (numeral.length > 6 && /^\d+0{6}$/.test(numeral));
+	return isLarge ? (readAt(afterScale, text, number.end)?.[0].length ?? 0) : 0;
 }
 
 /** The number stands by itself: not inside a name, an ordinal or a longer token. */

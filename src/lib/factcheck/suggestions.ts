@@ -1,5 +1,7 @@
 /** Wordings that would be level: tried one by one on the same weigh, so that none is offered that doesn't hold. */
-import { printStated, type HedgeFamily, type Stated } from '../widget/stated.ts';
+import type { Language } from '../widget/language.ts';
+import { printWordsOf, type PrintedHedge } from '../widget/languages/print-words.ts';
+import { printStated, type Stated } from '../widget/stated.ts';
 import { decide } from './decide.ts';
 import { decimalOf, divide, firstPlace, roundSize, signOf, toText } from './decimal.ts';
 import { inUnit, sameDimension, type WeighedReading } from './weighing.ts';
@@ -11,8 +13,7 @@ const SMALLEST = 1e-300;
 const SNUG_PERCENT = 10;
 
 interface Wording {
-	hedge: HedgeFamily;
-	hedgeWord: string;
+	hedge: 'bare' | PrintedHedge;
 	way: 'nearest' | 'up' | 'down';
 	/** Lengths in significant figures, tried in this order until one is level. */
 	figures: readonly number[];
@@ -20,22 +21,26 @@ interface Wording {
 
 /** Best first: round and honest, then one-sided, then bare. */
 const WORDINGS: readonly Wording[] = [
-	{ hedge: 'around', hedgeWord: 'about', way: 'nearest', figures: [2, 3, 1] },
-	{ hedge: 'below', hedgeWord: 'nearly', way: 'up', figures: [1, 2, 3] },
-	{ hedge: 'more-than', hedgeWord: 'more than', way: 'down', figures: [1, 2, 3] },
-	{ hedge: 'bare', hedgeWord: '', way: 'nearest', figures: [3, 2, 1] },
-	{ hedge: 'around', hedgeWord: 'about', way: 'nearest', figures: [1, 3] }
+	{ hedge: 'around', way: 'nearest', figures: [2, 3, 1] },
+	{ hedge: 'below', way: 'up', figures: [1, 2, 3] },
+	{ hedge: 'more-than', way: 'down', figures: [1, 2, 3] },
+	{ hedge: 'bare', way: 'nearest', figures: [3, 2, 1] },
+	{ hedge: 'around', way: 'nearest', figures: [1, 3] }
 ];
 
 /** Up to three wordings that weigh level, other than the one given; none when the two can't be compared. */
-export function suggestWordings(stated: Stated, reading: WeighedReading): string[] {
+export function suggestWordings(
+	stated: Stated,
+	reading: WeighedReading,
+	language: Language = 'en'
+): string[] {
 	if (!Number.isFinite(reading.value) || !sameDimension(reading.unit, stated.unit)) return [];
 	const value = inUnit(reading, stated.unit);
 	if (!(Math.abs(value) > SMALLEST && Math.abs(value) < Infinity)) return [];
-	const said = new Set([printStated(stated)]);
+	const said = new Set([printStated(stated, language)]);
 	for (const wording of WORDINGS) {
 		if (said.size > MOST) break;
-		const text = firstLevel(wording, stated, value, reading, said);
+		const text = firstLevel(wording, stated, value, reading, said, language);
 		if (text) said.add(text);
 	}
 	return [...said].slice(1);
@@ -46,13 +51,16 @@ function firstLevel(
 	stated: Stated,
 	value: number,
 	reading: WeighedReading,
-	said: ReadonlySet<string>
+	said: ReadonlySet<string>,
+	language: Language
 ): string | undefined {
 	// One-sided words on negative numbers are a question of their own; none is suggested.
 	if (value < 0 && wording.way !== 'nearest') return undefined;
 	const level = wording.figures
-		.map((figures) => word(wording, stated, value, figures))
-		.filter((candidate) => candidate.numeral.length <= 12 && !said.has(printStated(candidate)))
+		.map((figures) => word(wording, stated, value, figures, language))
+		.filter(
+			(candidate) => candidate.numeral.length <= 12 && !said.has(printStated(candidate, language))
+		)
 		.map((candidate) => ({ candidate, decision: decide(candidate, reading) }))
 		.filter(({ decision }) => decision.verdict === 'level' && decision.severity === 'none')
 		// “About” before the very number says less than is known.
@@ -61,17 +69,23 @@ function firstLevel(
 		({ decision }) => Math.abs(decision.departurePercent ?? 0) <= SNUG_PERCENT
 	);
 	const chosen = snug ?? level[0];
-	return chosen && printStated(chosen.candidate);
+	return chosen && printStated(chosen.candidate, language);
 }
 
-function word(wording: Wording, stated: Stated, value: number, figures: number): Stated {
+function word(
+	{ hedge, way }: Wording,
+	stated: Stated,
+	value: number,
+	figures: number,
+	language: Language
+): Stated {
 	const scale = scaleFor(value, stated.scale);
 	const scaled = divide(decimalOf(value), decimalOf(scale));
-	const rounded = roundSize(scaled, firstPlace(scaled) - figures + 1, wording.way);
+	const rounded = roundSize(scaled, firstPlace(scaled) - figures + 1, way);
 	const sign = signOf(scaled) < 0 && signOf(rounded) !== 0 ? '-' : '';
 	return {
-		hedge: wording.hedge,
-		hedgeWord: wording.hedgeWord,
+		hedge,
+		hedgeWord: hedge === 'bare' ? '' : printWordsOf(language).hedges[hedge],
 		numeral: sign + toText(rounded),
 		scale,
 		unit: stated.unit,

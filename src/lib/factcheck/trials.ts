@@ -1,6 +1,9 @@
 /** Weighing over the settings a reader can reach: which are tried, and which of them is worst. */
+import { hasOptions } from '../widget/control.ts';
+import { optionAt, settingsAcross } from '../widget/control-grid.ts';
 import type { Control, ControlValues, ReadingRef, WidgetDocument } from '../widget/document.ts';
 import { wiringOf } from '../widget/graph.ts';
+import type { Language } from '../widget/language.ts';
 import { plainDecimal, printStated } from '../widget/stated.ts';
 import type { Decision } from './decide.ts';
 import type { Severity } from './verdict.ts';
@@ -40,7 +43,9 @@ export function tryThroughout(
 		setting: controls
 			.flatMap((control) => {
 				const value = values[control.id];
-				return value === undefined ? [] : [settingWords(control, value, controls.length > 1)];
+				return value === undefined
+					? []
+					: [settingWords(control, value, controls.length > 1, document.language)];
 			})
 			.join(' and ')
 	}));
@@ -48,13 +53,18 @@ export function tryThroughout(
 
 function corners(controls: readonly Control[]): Record<string, number>[] {
 	return controls.reduce<Record<string, number>[]>(
-		(found, { id, min, max }) =>
-			found.flatMap((values) => [
-				{ ...values, [id]: min },
-				{ ...values, [id]: max }
-			]),
+		(found, control) =>
+			found.flatMap((values) =>
+				endsOf(control).map((value) => ({ ...values, [control.id]: value }))
+			),
 		[{}]
 	);
+}
+
+function endsOf(control: Control): number[] {
+	return hasOptions(control)
+		? control.options.map((_, index) => index)
+		: [control.min, control.max];
 }
 
 export function worstOf(trials: readonly Trial[]): Trial | null {
@@ -72,20 +82,36 @@ export function rank({ verdict, severity }: Decision): number {
 	return Math.max(VERDICT_RANK[verdict], SEVERITY_RANK[severity]);
 }
 
-/** From end to end on the slider's own steps, and where it starts. A slider of few steps is tried at each. */
+/** From end to end on the control's own steps, and where it starts; every one of them where they are few. */
 export function settingsOf(control: Control): number[] {
-	const { min, max, step, initial } = control;
-	const evenly = Array.from({ length: SETTINGS }, (_, index) => {
-		const steps = Math.round(((max - min) * index) / (SETTINGS - 1) / step);
-		return index === SETTINGS - 1
-			? max
-			: Math.min(max, Number((min + steps * step).toPrecision(12)));
-	});
-	return [...new Set([...evenly, initial])].sort((a, b) => a - b);
+	return settingsAcross(control, SETTINGS);
 }
 
-export function settingWords({ label, unit }: Control, value: number, named: boolean): string {
+/** What a control stands at, in words; `named` says whose setting it is as well. */
+export function settingWords(
+	control: Control,
+	value: number,
+	named: boolean,
+	language: Language
+): string {
+	const printed = valueWords(control, value, language);
+	return named ? `${printed} (${control.label})` : printed;
+}
+
+function valueWords(control: Control, value: number, language: Language): string {
+	const option = optionAt(control, value);
+	if (option) return `“${option.label}”`;
 	const numeral = plainDecimal(Number(value.toPrecision(12)));
-	const printed = printStated({ hedge: 'bare', hedgeWord: '', numeral, scale: 1, unit });
-	return named ? `${printed} (${label})` : printed;
+	return printStated(
+		{ hedge: 'bare', hedgeWord: '', numeral, scale: 1, unit: control.unit },
+		language
+	);
+}
+
+/** “from 100 to 500 million years”, or what it offers. */
+export function reachWords(control: Control, language: Language): string {
+	if (hasOptions(control))
+		return `for ${control.options.map(({ label }) => `“${label}”`).join(', ')}`;
+	const { min, max } = control;
+	return `from ${settingWords(control, min, false, language)} to ${settingWords(control, max, false, language)}`;
 }

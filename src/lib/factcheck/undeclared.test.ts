@@ -49,7 +49,7 @@ describe('numbers nobody answers for', () => {
 		const captioned = structuredClone(firstLight);
 		captioned.controls[0]!.label = 'Signal at 999 MHz';
 		for (const block of captioned.blocks) {
-			if (block.kind !== 'chart') continue;
+			if (block.kind !== 'chart' || block.form !== 'line') continue;
 			block.description = 'From 5 MHz up.';
 			block.bands = [{ from: 1, to: 2, label: 'TV at 300 GHz' }];
 		}

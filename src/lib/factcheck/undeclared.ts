@@ -1,4 +1,6 @@
 /** Numbers that nobody answers for yet: neither tied to a reading nor named as no claim. They hold a proof back. */
+import { blockCaptions } from '../widget/block-captions.ts';
+import { hasOptions } from '../widget/control.ts';
 import { isTextBlock, type WidgetDocument } from '../widget/document.ts';
 import type { Finding } from '../widget/findings.ts';
 import { blockText } from '../widget/places.ts';
@@ -71,25 +73,18 @@ function captions(document: WidgetDocument): Pick<Line, 'blockId' | 'caption' | 
 	return [
 		{ blockId: 'title', caption: 'the title', text: document.title },
 		{ blockId: 'point', caption: 'the point', text: document.point },
-		...document.controls.map(({ id, label }) => ({
-			blockId: id,
-			caption: 'a slider’s label',
-			text: label
-		})),
+		...document.controls.flatMap((control) => [
+			{ blockId: control.id, caption: 'a slider’s label', text: control.label },
+			...(hasOptions(control)
+				? control.options.map(({ label }) => ({
+						blockId: control.id,
+						caption: 'an option’s label',
+						text: label
+					}))
+				: [])
+		]),
 		...document.blocks.flatMap((block) =>
-			block.kind === 'chart'
-				? [
-						{ blockId: block.id, caption: 'the chart’s title', text: block.title },
-						{ blockId: block.id, caption: 'the chart’s level axis', text: block.x.label },
-						{ blockId: block.id, caption: 'the chart’s upright axis', text: block.y.label },
-						{ blockId: block.id, caption: 'the chart’s description', text: block.description },
-						...block.bands.map(({ label }) => ({
-							blockId: block.id,
-							caption: 'the name of the chart’s band',
-							text: label
-						}))
-					]
-				: []
+			blockCaptions(block).map((words) => ({ blockId: block.id, ...words }))
 		)
 	];
 }

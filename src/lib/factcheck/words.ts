@@ -1,4 +1,5 @@
 /** A weighing told in sentences: what the copy says, what the calculator reads, what the rule allows. */
+import type { Language } from '../widget/language.ts';
 import {
 	printAfterNumeral,
 	printNumeral,
@@ -46,34 +47,43 @@ export function verdictSentence(
 	reading: WeighedReading,
 	verdict: Pick<Verdict, 'verdict' | 'reason'>,
 	audience: Audience = 'office',
-	words: string = printStated(stated)
+	words?: string,
+	language: Language = 'en'
 ): string {
-	const says = `The copy says ${words}.`;
+	const says = `The copy says ${words ?? printStated(stated, language)}.`;
 	const end = ENDINGS[audience][verdict.verdict];
 	if (!Number.isFinite(reading.value)) return [says, verdict.reason, end].join(' ');
 	const departure = sameDimension(reading.unit, stated.unit) ? departureWords(stated, reading) : '';
-	const reads = `The calculator reads ${[readsInWords(stated, reading), departure].filter(Boolean).join(', ')}.`;
+	const reads = `The calculator reads ${[readsInWords(stated, reading, language), departure].filter(Boolean).join(', ')}.`;
 	const why = verdict.verdict === 'level' ? allowance(stated, reading) : verdict.reason;
 	return [says, reads, why, end].join(' ');
 }
 
 /** The reading in the claim's unit and scale, with its uncertainty: “13.786 ± 0.020 billion years”. */
-export function readsInWords(stated: Stated, reading: WeighedReading): string {
+export function readsInWords(
+	stated: Stated,
+	reading: WeighedReading,
+	language: Language = 'en'
+): string {
 	if (!sameDimension(reading.unit, stated.unit)) {
-		return readsInWords({ ...bareIn(reading.unit), scale: 1 }, reading);
+		return readsInWords({ ...bareIn(reading.unit), scale: 1 }, reading, language);
 	}
 	const value = inUnit(reading, stated.unit);
 	const scale = value === 0 ? 1 : scaleFor(value, stated.scale);
 	const u = uncertaintyIn(reading, stated.unit);
-	const { numeral, spread } = digitsOf(value / scale, u === null ? null : u / scale);
+	const { numeral, spread } = digitsOf(value / scale, u === null ? null : u / scale, language);
 	const printed: Stated = { ...stated, numeral, scale };
-	return printNumeral(numeral) + spread + printAfterNumeral(printed);
+	return printNumeral(numeral, language) + spread + printAfterNumeral(printed, language);
 }
 
 /** The reading as it stands beside the rider: “13.786 ± 0.020 billion years, −1.5 %”. */
-export function readsOnBeam(stated: Stated, reading: WeighedReading): string {
+export function readsOnBeam(
+	stated: Stated,
+	reading: WeighedReading,
+	language: Language = 'en'
+): string {
 	const percent = percentOf(stated, reading);
-	const words = readsInWords(stated, reading);
+	const words = readsInWords(stated, reading, language);
 	if (percent === null) return words;
 	const printed = printPercent(percent);
 	return `${words}, ${percent > 0 && printed !== '0' ? '+' : ''}${printed}${NO_BREAK}%`;
@@ -126,7 +136,11 @@ function bareIn(unit: string): Stated {
 }
 
 /** Digits down to the second one of the uncertainty, as long as that isn't too many to read. */
-function digitsOf(value: number, u: number | null): { numeral: string; spread: string } {
+function digitsOf(
+	value: number,
+	u: number | null,
+	language: Language
+): { numeral: string; spread: string } {
 	if (value === 0) return { numeral: '0', spread: '' };
 	const first = firstPlace(decimalOf(value));
 	const plain = (figures: number) => ({
@@ -139,7 +153,7 @@ function digitsOf(value: number, u: number | null): { numeral: string; spread: s
 	if (figures < 1 || figures > EXACT_FIGURES) return plain(UNKNOWN_FIGURES);
 	return {
 		numeral: roundToFigures(value, figures),
-		spread: `${NO_BREAK}±${NO_BREAK}${printNumeral(roundToFigures(u, 2))}`
+		spread: `${NO_BREAK}±${NO_BREAK}${printNumeral(roundToFigures(u, 2), language)}`
 	};
 }
 

@@ -2,11 +2,13 @@
 import { z } from 'zod';
 import { PassProof, ReleaseProof, SignClaim } from './check.ts';
 import { VetCalculator, WithdrawCalculator } from './house-calculator.ts';
+import { VetFormula } from './vet-formula.ts';
 
 const passphrase = z.string().max(200, 'A passphrase has at most 200 characters.').default('');
 
 export const ConfirmedSignature = SignClaim.extend({ passphrase });
 export const ConfirmedPass = PassProof.extend({ passphrase });
 export const ConfirmedRelease = ReleaseProof.extend({ passphrase });
+export const ConfirmedFormula = VetFormula.extend({ passphrase });
 export const ConfirmedVetting = VetCalculator.extend({ passphrase });
 export const ConfirmedWithdrawal = WithdrawCalculator.extend({ passphrase });

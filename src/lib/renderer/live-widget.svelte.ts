@@ -6,20 +6,51 @@
 import { createContext } from 'svelte';
 import type { CalculatorSet, Refusal } from '../physics/calculator.ts';
 import { commensurable } from '../physics/units/units.ts';
-import type { Claim, Control, ReadingRef, WidgetDocument } from '../widget/document.ts';
+import type {
+	Claim,
+	Control,
+	ControlValues,
+	PictureBlock,
+	ReadingRef,
+	WidgetDocument
+} from '../widget/document.ts';
 import { evaluate, readingAt, type Evaluation, type ReadingOutcome } from '../widget/evaluate.ts';
-import { settingStated } from '../widget/places.ts';
-import { printStated, stateReading } from '../widget/stated.ts';
-import { snapToGrid } from '../widget/grid.ts';
+import { settingWords } from '../widget/places.ts';
+import {
+	plainDecimal,
+	printNumeral,
+	printStated,
+	statedValue,
+	stateReading,
+	type LiveFormat
+} from '../widget/stated.ts';
+import type { SetMath } from './math-node.ts';
+import { readerWords, type ReaderWords } from './reader-words.ts';
+import { nearestSetting } from '../widget/control-grid.ts';
 import type { ClaimRecord } from './records.ts';
 import type { Released } from './release.ts';
 
 /** What stands where a number is printed: its words, or the sentence that says why there is none. */
 export type Printed = { ok: true; words: string } | { ok: false; refusal: Refusal };
 
+type PictureFile = PictureBlock['files'][number];
+
+const ENDINGS: Record<PictureFile['type'], string> = {
+	'image/webp': 'webp',
+	'image/jpeg': 'jpg',
+	'image/png': 'png'
+};
+
+/** What the office brings, where nothing has been printed yet. */
+export interface OfficeParts {
+	math(key: string): SetMath | undefined;
+	pictureAddress(file: PictureFile): string;
+}
+
 export class LiveWidget {
 	#document: () => WidgetDocument;
 	#calculators: () => CalculatorSet;
+	readonly #office: OfficeParts | null;
 
 	/** What the reader moved, by control id; a control that is missing stands at its first setting. */
 	values = $state<Record<string, number>>({});
@@ -36,8 +67,10 @@ export class LiveWidget {
 		document: () => WidgetDocument,
 		calculators: () => CalculatorSet,
 		/** What was worked out when the piece was released; null in the office, where everything is worked out anew. */
-		readonly released: Released | null = null
+		readonly released: Released | null = null,
+		office: OfficeParts | null = null
 	) {
+		this.#office = office;
 		this.#document = document;
 		this.#calculators = calculators;
 	}
@@ -75,11 +108,32 @@ export class LiveWidget {
 	/** Takes the nearest value the control can have. Unknown controls and values that aren't finite change nothing. */
 	setValue(controlId: string, value: number): void {
 		const control = this.control(controlId);
-		if (control && Number.isFinite(value)) this.values[controlId] = snapToGrid(value, control);
+		if (control && Number.isFinite(value)) this.values[controlId] = nearestSetting(control, value);
 	}
 
 	reset(): void {
 		this.values = {};
+	}
+
+	/** Sets the given controls, and all others back to where they start. */
+	setAll(values: ControlValues): void {
+		this.reset();
+		for (const [id, value] of Object.entries(values)) this.setValue(id, value);
+	}
+
+	/** What the widget itself says, in the language of the piece. */
+	get words(): ReaderWords {
+		return readerWords(this.document.language);
+	}
+
+	/** An equation as set on the server; undefined until it is there. */
+	math(key: string): SetMath | undefined {
+		return this.#office?.math(key) ?? this.released?.math[key];
+	}
+
+	/** Where a picture's file is: beside the release for readers, behind the door for the office. */
+	pictureAddress(file: PictureFile): string {
+		return this.#office?.pictureAddress(file) ?? `/press/${file.digest}.${ENDINGS[file.type]}`;
 	}
 
 	reading(ref: ReadingRef): ReadingOutcome {
@@ -92,25 +146,46 @@ export class LiveWidget {
 		if (!outcome.ok) return outcome;
 		const { value, unit, quantity } = outcome.reading;
 		if (typeof value === 'string') return { ok: true, words: value };
-		if (!Number.isFinite(value)) return noNumber('There is no number to give at this setting.');
+		if (!Number.isFinite(value)) return noNumber(this.words.noNumberAtSetting);
 		if (!commensurable(unit, claim.unit))
 			return noNumber(`This reading can’t be given in ${claim.unit || 'plain numbers'}.`);
-		return { ok: true, words: printStated(stateReading(value, unit, claim, quantity)) };
+		const { language } = this.document;
+		const stated = stateReading(
+			value,
+			unit,
+			claim,
+			quantity,
+			language,
+			outcome.reading.uncertainty
+		);
+		return { ok: true, words: printStated(stated, language) };
+	}
+
+	/** A reading by a format, in words; the sentence that says why there is none where it is refused. */
+	printReading(ref: ReadingRef, format: LiveFormat): string {
+		return this.printOutcome(this.reading(ref), format, 'words');
+	}
+
+	/** `number` leaves the unit out, where a row or an axis has said it. */
+	printOutcome(outcome: ReadingOutcome, format: LiveFormat, as: 'words' | 'number'): string {
+		if (!outcome.ok) return as === 'words' ? outcome.refusal.message : '–';
+		const { value, unit, quantity } = outcome.reading;
+		if (typeof value === 'string') return value;
+		if (!Number.isFinite(value) || !commensurable(unit, format.unit)) return '–';
+		const { language } = this.document;
+		const stated = stateReading(value, unit, format, quantity, language);
+		if (as === 'words') return printStated(stated, language);
+		return printNumeral(plainDecimal(statedValue(stated)), language);
 	}
 
 	/** A control's value in words: “180 million years”. */
 	printSetting(controlId: string): string {
-		return this.#printValue(controlId, this.evaluation);
+		return settingWords(this.document, this.evaluation, controlId);
 	}
 
 	/** The value a control starts at, in words. */
 	printFirstSetting(controlId: string): string {
-		return this.#printValue(controlId, { values: {}, steps: {} });
-	}
-
-	#printValue(controlId: string, evaluation: Evaluation): string {
-		const stated = settingStated(this.document, evaluation, controlId);
-		return stated ? printStated(stated) : '';
+		return settingWords(this.document, { values: {} }, controlId);
 	}
 }
 

@@ -14,18 +14,20 @@ const age: Control = {
 };
 
 test('a link sets a control', () => {
-	expect(settingsInLink('#wave-age=270', [age])).toEqual({
+	expect(settingsInLink('#wave-age=270', { controls: [age], language: 'en' })).toEqual({
 		values: { 'wave-age': 270 },
 		notice: ''
 	});
 });
 
 test('a link between steps takes the nearest', () => {
-	expect(settingsInLink('#wave-age=273.9', [age]).values).toEqual({ 'wave-age': 270 });
+	expect(settingsInLink('#wave-age=273.9', { controls: [age], language: 'en' }).values).toEqual({
+		'wave-age': 270
+	});
 });
 
 test('a link past the end stands at the end, and says so', () => {
-	const { values, notice } = settingsInLink('#wave-age=9000', [age]);
+	const { values, notice } = settingsInLink('#wave-age=9000', { controls: [age], language: 'en' });
 	expect(values).toEqual({ 'wave-age': 500 });
 	expect(notice).toBe(
 		'The link you followed asks for 9000\u00a0million years. The slider goes from 100 to 500\u00a0million years, so it stands at 500.'
@@ -43,5 +45,8 @@ test.each([
 	'#other=3',
 	'#%'
 ])('%s sets nothing', (fragment) => {
-	expect(settingsInLink(fragment, [age])).toEqual({ values: {}, notice: '' });
+	expect(settingsInLink(fragment, { controls: [age], language: 'en' })).toEqual({
+		values: {},
+		notice: ''
+	});
 });

@@ -75,3 +75,11 @@ export function readEnv(source: Record<string, string | undefined> = process.env
 		})
 	);
 }
+
+/**
+ * Lets the adapter take bodies as large as the largest upload; it reads this when its handler is loaded, and knows one
+ * limit for all. `http/body-limit.ts` holds every other route to less.
+ */
+export function takeUploads(largestBytes: number): void {
+	process.env.BODY_SIZE_LIMIT = String(largestBytes);
+}

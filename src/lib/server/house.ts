@@ -6,9 +6,13 @@ import { newId } from './db/ids.ts';
 import { seed } from './db/seed.ts';
 import { readEnv, type Env } from './env.ts';
 import { startSender, type Sender } from './jobs/sender.ts';
+import { startSweeper, type Sweeper } from './jobs/sweeper.ts';
 import { logLine } from './log.ts';
 import { openMailTransport } from './mail/transport.ts';
+import { sweepPictures } from './pictures/keep.ts';
+import { sweepDrafts } from './services/history.ts';
 import { restockShelf } from './services/restock-shelf.ts';
+import { shelveThemes } from './services/themes.ts';
 import { shelfOf } from './shelf/shelf.ts';
 import { openObjectStore } from './store/object-store.ts';
 
@@ -38,8 +42,10 @@ export async function openHouse(env: Env): Promise<House> {
 		houseName: env.HOUSE_NAME
 	});
 	let sender: Sender | null = null;
+	const sweepers: Sweeper[] = [];
 	const close = async () => {
 		await sender?.stop();
+		for (const sweeper of sweepers) await sweeper.stop();
 		transport.close();
 		store.close();
 		await database.close();
@@ -57,6 +63,7 @@ export async function openHouse(env: Env): Promise<House> {
 	try {
 		await seed(fixtures, env.STEELYARD_SEED);
 		const restocked = await restockShelf(fixtures);
+		await shelveThemes(fixtures);
 		if (restocked.missing.length > 0) logLine('error', 'releases-missing', { ...restocked });
 		sender = startSender({
 			db: database.db,
@@ -65,6 +72,24 @@ export async function openHouse(env: Env): Promise<House> {
 			clock: () => new Date(),
 			report: (message) => logLine('warn', 'mail', { message })
 		});
+		const clock = () => new Date();
+		sweepers.push(
+			startSweeper({
+				sweep: (now) => sweepPictures(fixtures, now),
+				removedSentence: (removed) =>
+					`Interrupted uploads had left ${removed} files; they are removed.`,
+				failed: 'Pictures couldn’t be swept',
+				clock,
+				report: (message) => logLine('warn', 'pictures', { message })
+			}),
+			startSweeper({
+				sweep: (now) => sweepDrafts(fixtures, now),
+				removedSentence: (removed) => `${removed} drafts older than ninety days are let go.`,
+				failed: 'Earlier drafts couldn’t be swept',
+				clock,
+				report: (message) => logLine('info', 'drafts', { message })
+			})
+		);
 		// The decoy for unknown accounts is made now, so that the first one doesn't take longer.
 		await passphraseFits(null, newId());
 		return { origin: env.ORIGIN, fixtures, close };

@@ -22,6 +22,14 @@ test('source past the limits is told in words alone', () => {
 	});
 });
 
+test('so is one that takes too many steps to set', () => {
+	const rounds = Array.from({ length: 60 }, () => '\\operatorname{round}\\left(x\\right)');
+	expect(typeset({ tex: rounds.join(' + '), says: 'Rounded.' })).toEqual({
+		html: null,
+		says: 'Rounded.'
+	});
+});
+
 test('nothing in the source becomes a link', () => {
 	expect(typeset({ tex: '\\href{javascript:alert(1)}{x}', says: '' }).html).not.toMatch(
 		/<a\b|href=/

@@ -12,14 +12,25 @@ export interface SetEquation {
 
 export function typeset({ tex, says }: { tex: string; says: string }): SetEquation {
 	if (tex.length > LONGEST_SOURCE) return { html: null, says };
-	const html = katex.renderToString(tex, {
-		displayMode: true,
-		output: 'htmlAndMathml',
-		throwOnError: true,
-		strict: 'error',
-		trust: false,
-		maxExpand: 100,
-		maxSize: 20
-	});
-	return { html: html.length > LONGEST_OUTPUT ? null : html, says };
+	const html = set(tex);
+	return { html: html === null || html.length > LONGEST_OUTPUT ? null : html, says };
+}
+
+/** Null when setting it takes more steps than any equation worth showing. */
+function set(tex: string): string | null {
+	try {
+		return katex.renderToString(tex, {
+			displayMode: true,
+			output: 'htmlAndMathml',
+			throwOnError: true,
+			strict: 'error',
+			trust: false,
+			maxExpand: 100,
+			maxSize: 20
+		});
+	} catch (error) {
+		if (error instanceof katex.ParseError && error.message.includes('Too many expansions'))
+			return null;
+		throw error;
+	}
 }

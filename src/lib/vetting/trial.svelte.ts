@@ -1,7 +1,8 @@
-/** The form tried out by the house a moment after each change: its problems, its check values, a first run. */
+/** A form tried out by the house a moment after each change: its problems, and whatever else its address answers. */
 import type { Result } from '../physics/calculator.ts';
 import type { HouseProblem } from '../physics/house/definition.ts';
 
+/** What is said of a house calculator. */
 export interface TrialAnswer {
 	problems: HouseProblem[];
 	checks: {
@@ -17,18 +18,19 @@ export interface TrialAnswer {
 /** How long the form rests before it is tried. */
 const REST_MS = 350;
 
-const NOTHING: TrialAnswer = { problems: [], checks: [], preview: null };
+export const NOTHING_TRIED: TrialAnswer = { problems: [], checks: [], preview: null };
 
-export class Trial {
-	answer = $state.raw<TrialAnswer>(NOTHING);
+export class Trial<Answer extends { problems: HouseProblem[] } = TrialAnswer> {
+	answer: Answer;
 	/** Why it couldn't be tried; '' when it could. */
 	away = $state('');
 	#address: string;
 	#timer: ReturnType<typeof setTimeout> | undefined;
 	#asked: AbortController | undefined;
 
-	constructor(address: string) {
+	constructor(address: string, nothing: Answer) {
 		this.#address = address;
+		this.answer = $state.raw(nothing);
 	}
 
 	/** Tries this once nothing has changed for a moment. */
@@ -36,6 +38,12 @@ export class Trial {
 		clearTimeout(this.#timer);
 		const body = JSON.stringify(draft);
 		this.#timer = setTimeout(() => void this.#ask(body), REST_MS);
+	}
+
+	/** Tries this at once; null when there was no answer, or something else was tried meanwhile. */
+	async now(draft: unknown): Promise<Answer | null> {
+		clearTimeout(this.#timer);
+		return this.#ask(JSON.stringify(draft));
 	}
 
 	/** Problems that came with a refused proposal stand until the next trial. */
@@ -52,7 +60,7 @@ export class Trial {
 		this.#asked?.abort();
 	}
 
-	async #ask(body: string): Promise<void> {
+	async #ask(body: string): Promise<Answer | null> {
 		this.#asked?.abort();
 		const asked = new AbortController();
 		this.#asked = asked;
@@ -65,15 +73,16 @@ export class Trial {
 			});
 			const answer: unknown = await response.json();
 			if (response.ok) {
-				this.answer = answer as TrialAnswer;
+				this.answer = answer as Answer;
 				this.away = '';
-			} else {
-				const { error } = answer as { error: { message: string; help?: string } };
-				this.away = [error.message, error.help].filter(Boolean).join(' ');
+				return this.answer;
 			}
+			const { error } = answer as { error: { message: string; help?: string } };
+			this.away = [error.message, error.help].filter(Boolean).join(' ');
 		} catch (error) {
-			if (asked.signal.aborted) return;
+			if (asked.signal.aborted) return null;
 			this.away = `The house doesn’t answer, so this isn’t tried yet: ${error instanceof Error ? error.message : 'no connection'}.`;
 		}
+		return null;
 	}
 }

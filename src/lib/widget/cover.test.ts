@@ -64,7 +64,7 @@ describe('a signature lapses', () => {
 
 	test('when the range of a control behind it changes', () => {
 		const wider = structuredClone(firstLight);
-		wider.controls[0]!.max = 600;
+		wider.controls[0] = { ...wider.controls[0], max: 600 } as (typeof wider.controls)[0];
 		expect(lapsed(firstLight, wider)).toEqual(['stretch', 'frequency', 'crest']);
 	});
 

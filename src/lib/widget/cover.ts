@@ -3,6 +3,7 @@
  * covers with one hash are the same promise; any difference lapses the signature, and nothing else does.
  */
 import type { CalculatorSet } from '../physics/calculator.ts';
+import { benchSet } from './bench-set.ts';
 import type { Claim, Control, Step, WidgetDocument } from './document.ts';
 import { digestOf } from './freeze.ts';
 import { wiringOf } from './graph.ts';
@@ -39,8 +40,9 @@ export function claimCover(
 /** Covers of all claims, by claim id. */
 export function claimCovers(
 	document: WidgetDocument,
-	calculators: CalculatorSet
+	house: CalculatorSet
 ): Map<string, ClaimCover> {
+	const calculators = benchSet(document, house);
 	const moving = new Set(
 		document.blocks.filter(({ kind }) => kind === 'result').map(({ id }) => id)
 	);

@@ -27,6 +27,7 @@ const planck = fixed({ set: 'Planck18' });
 /** An age in Gyr to a redshift, and the redshift to everything, both in Planck 2018. */
 function chain(ageGyr: number, cosmology = planck): Wired {
 	return {
+		formulas: [],
 		controls: [],
 		steps: [
 			step('redshift', 'cosmo.inverse', {
@@ -66,6 +67,7 @@ describe('a chain whose steps share a parameter set', () => {
 	// Time since then = age now − the age put in, so it is as uncertain as the age now: 0.0219 Gyr from this fit.
 	test('the time since an exact age is as uncertain as the age now', () => {
 		const now: Wired = {
+			formulas: [],
 			controls: [],
 			steps: [step('universe', 'cosmo.at_z', { cosmology: planck, z: fixed(1e-9) })]
 		};
@@ -101,6 +103,7 @@ describe('a chain whose steps share a parameter set', () => {
 		// Step by step: the distance at a fixed redshift, and the redshift's own share, as if they had nothing in common.
 		const z = valueOf(chain(1), { step: 'redshift', output: 'z' });
 		const at = (redshift: number): Wired => ({
+			formulas: [],
 			controls: [],
 			steps: [step('universe', 'cosmo.at_z', { cosmology: planck, z: fixed(redshift) })]
 		});
@@ -117,6 +120,7 @@ describe('the published age', () => {
 
 	test('goes on through a chain with its published uncertainty', () => {
 		const wired: Wired = {
+			formulas: [],
 			controls: [],
 			steps: [
 				now,
@@ -134,7 +138,7 @@ describe('the published age', () => {
 	});
 
 	test('stands alone too, and is never 0.11 Gyr', () => {
-		const wired: Wired = { controls: [], steps: [now] };
+		const wired: Wired = { formulas: [], controls: [], steps: [now] };
 		const outcome = readingWithUncertainty(wired, evaluate(wired, {}, catalogue), age, catalogue);
 		expect(outcome).toMatchObject({ ok: true, reading: { uncertainty: 0.02 } });
 	});
@@ -142,6 +146,7 @@ describe('the published age', () => {
 	test('gives way to the fit where the chain takes more of it', () => {
 		// The redshift at which the universe was as old as it is now: 0, however the parameters move.
 		const wired: Wired = {
+			formulas: [],
 			controls: [],
 			steps: [
 				now,
@@ -174,6 +179,7 @@ describe('what can’t be carried says why', () => {
 			[measured('test.good', 0.01), measured('test.fine', 1e-6)].map((one) => [one.id, one])
 		);
 		const wired = (first: string): Wired => ({
+			formulas: [],
 			controls: [],
 			steps: [
 				step('first', first, { x: fixed(2) }),

@@ -56,7 +56,11 @@ export function evaluateUncertainty(
 	if ('control' in ref) return { uncertainty: 'exact' };
 	if ('setting' in ref) return ofSetting(document, evaluation, ref, calculators, { draws });
 
-	const upstream = { controls: document.controls, steps: wiringOf(document.steps, ref).steps };
+	const upstream = {
+		formulas: document.formulas,
+		controls: document.controls,
+		steps: wiringOf(document.steps, ref).steps
+	};
 	const worked = workPlainly(upstream, evaluation, calculators);
 	const sources = sourcesOf(upstream.steps, ref, worked, calculators);
 	if (!sources.ok) return { uncertainty: 'not-available', uncertaintyNote: sources.reason };

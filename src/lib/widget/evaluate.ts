@@ -19,10 +19,12 @@ import {
 import { runCalculator } from '../physics/calculators/run.ts';
 import type { QuantityKind } from '../physics/units/quantities.ts';
 import { commensurable, convertQuantity } from '../physics/units/units.ts';
+import { hasOptions } from './control-kind.ts';
+import { settingFrom, settleValue } from './control-grid.ts';
 import type {
-	ChartBlock,
 	Control,
 	ControlValues,
+	LineChart,
 	ReadingRef,
 	SettingSource,
 	Step,
@@ -40,7 +42,7 @@ export interface Evaluation {
 
 export type ReadingOutcome = { ok: true; reading: Reading } | { ok: false; refusal: Refusal };
 
-export type Wired = Pick<WidgetDocument, 'steps' | 'controls'>;
+export type Wired = Pick<WidgetDocument, 'formulas' | 'steps' | 'controls'>;
 
 /** Works one step on inputs that its settings came to; `evaluateUncertainty` puts its own in place of the plain one. */
 export type RunStep = (
@@ -75,12 +77,6 @@ function settleValues(controls: readonly Control[], values: ControlValues): Reco
 	return Object.fromEntries(
 		controls.map((control) => [control.id, settleValue(control, values[control.id])])
 	);
-}
-
-/** A value a control may take: inside its range, its first setting where none or no number is given. */
-export function settleValue(control: Control, value: number | undefined): number {
-	if (value === undefined || !Number.isFinite(value)) return control.initial;
-	return Math.min(control.max, Math.max(control.min, value));
 }
 
 function evaluateStep(
@@ -134,7 +130,9 @@ function settingValue(
 			const control = document.controls.find(({ id }) => id === source.control);
 			if (!control)
 				return refuse('missing-control', 'The control of this setting isn’t in the piece.');
-			return toUnit(values[control.id] ?? control.initial, control.unit, unitIn(spec, inputs));
+			const value = settingFrom(control, values[control.id] ?? control.initial);
+			if (typeof value === 'string') return { ok: true, value };
+			return toUnit(value, control.unit, unitIn(spec, inputs));
 		}
 		case 'reading': {
 			const outcome = outputOf(results[source.step], source.output);
@@ -198,7 +196,10 @@ export function readingAt(
 		const control = document.controls.find(({ id }) => id === ref.control);
 		if (!control)
 			return refuse('missing-control', 'The control of this number isn’t in the piece.');
-		return exact(evaluation.values[control.id] ?? control.initial, control.unit);
+		const value = settingFrom(control, evaluation.values[control.id] ?? control.initial);
+		if (typeof value === 'string')
+			return refuse('not-a-number', 'This control offers words, not numbers.');
+		return exact(value, control.unit);
 	}
 	if ('output' in ref) return outputOf(evaluation.steps[ref.step], ref.output);
 	return settingReading(document, evaluation, ref, calculators);
@@ -254,27 +255,40 @@ export interface ChartPoint {
 	y: number | null;
 }
 
-/** A chart's line over its control's range, in the chart's units; only what the reading hangs on is worked. */
+/**
+ * A chart's lines over its control's range, in the chart's units and in the order of its series. Points lie evenly on
+ * the axis as it is drawn; only what the readings hang on is worked.
+ */
 export function sampleChart(
 	document: Wired,
 	values: ControlValues,
-	chart: Pick<ChartBlock, 'x' | 'y'>,
+	chart: Pick<LineChart, 'x' | 'y' | 'series'>,
 	calculators: CalculatorSet,
 	points = CHART_POINTS
-): ChartPoint[] {
+): ChartPoint[][] {
 	const control = document.controls.find(({ id }) => id === chart.x.control);
-	if (!control) return [];
-	const upstream = {
-		controls: document.controls,
-		steps: wiringOf(document.steps, chart.y.reading).steps
-	};
-	return Array.from({ length: points }, (_, index) => {
-		const x = control.min + ((control.max - control.min) * index) / (points - 1);
-		const evaluation = evaluate(upstream, { ...values, [control.id]: x }, calculators);
-		return {
-			x,
-			y: valueIn(readingAt(upstream, evaluation, chart.y.reading, calculators), chart.y.unit)
+	if (!control || hasOptions(control)) return chart.series.map(() => []);
+	const along = xValues(control.min, control.max, chart.x.scale === 'log', points);
+	return chart.series.map(({ reading }) => {
+		const upstream = {
+			formulas: document.formulas,
+			controls: document.controls,
+			steps: wiringOf(document.steps, reading).steps
 		};
+		return along.map((x) => {
+			const evaluation = evaluate(upstream, { ...values, [control.id]: x }, calculators);
+			return { x, y: valueIn(readingAt(upstream, evaluation, reading, calculators), chart.y.unit) };
+		});
+	});
+}
+
+/** Where a chart's points lie; evenly by the logarithm when both ends lie above nought. */
+export function xValues(min: number, max: number, log: boolean, points = CHART_POINTS): number[] {
+	const ratio = log && min > 0 ? max / min : null;
+	return Array.from({ length: points }, (_, index) => {
+		if (index === points - 1) return max;
+		const share = index / (points - 1);
+		return ratio === null ? min + (max - min) * share : min * ratio ** share;
 	});
 }
 

@@ -1,8 +1,16 @@
 /** What a piece still lacks before a proof can be pulled: each a sentence, with the place to mend it. */
 import type { CalculatorSet } from '../physics/calculator.ts';
-import { isTextBlock, type ChartBlock, type WidgetDocument } from './document.ts';
+import { benchSet } from './bench-set.ts';
+import { blockFindings } from './block-findings.ts';
+import { shownReadings } from './block-readings.ts';
+import { chartFindings } from './chart-findings.ts';
+import { isTextBlock, type Control, type WidgetDocument } from './document.ts';
 import { evaluate, readingAt } from './evaluate.ts';
+import { hasOptions } from './control.ts';
+import { nearestSetting } from './control-grid.ts';
+import { formulaFindings } from './formula-findings.ts';
 import { gridProblem } from './grid.ts';
+import { plainDecimal } from './stated.ts';
 import { pinnedLineFindings } from './pinned-lines.ts';
 import { blockText, tokenWords } from './places.ts';
 
@@ -10,15 +18,20 @@ export interface Finding {
 	code: string;
 	/** What is missing and how to mend it. */
 	says: string;
-	/** The block, claim or step to go to. */
-	at: { block?: string; claim?: string; step?: string };
+	/** The block, claim, step or formula to go to. */
+	at: { block?: string; claim?: string; step?: string; formula?: string };
 }
 
-export function findings(document: WidgetDocument, calculators: CalculatorSet): Finding[] {
+export function findings(document: WidgetDocument, house: CalculatorSet): Finding[] {
+	const calculators = benchSet(document, house);
 	return [
 		...wordFindings(document),
-		...document.blocks.flatMap((block) => (block.kind === 'chart' ? chartFindings(block) : [])),
+		...document.blocks.flatMap((block) =>
+			block.kind === 'chart' ? chartFindings(block, document, calculators) : []
+		),
+		...document.blocks.flatMap((block) => blockFindings(block, document)),
 		...controlFindings(document),
+		...formulaFindings(document, calculators),
 		...readingFindings(document, calculators),
 		...pinnedLineFindings(document, calculators)
 	];
@@ -42,30 +55,13 @@ function wordFindings(document: WidgetDocument): Finding[] {
 	return found;
 }
 
-function chartFindings(chart: ChartBlock): Finding[] {
-	const wanted: [string, string, string][] = [
-		[chart.title, 'no-chart-title', 'Give the chart a title.'],
-		[chart.x.label, 'no-x-label', 'Say which quantity the level axis shows.'],
-		[chart.y.label, 'no-y-label', 'Say which quantity the upright axis shows.'],
-		[chart.source, 'no-chart-source', 'Say where the chart’s line comes from.'],
-		[
-			chart.description,
-			'no-description',
-			'Describe the chart for those who can’t see it: its ends and its trend.'
-		]
-	];
-	return wanted.flatMap(([text, code, says]) =>
-		text.trim() ? [] : [{ code, says, at: { block: chart.id } }]
-	);
-}
-
 /** A control that moves nothing a reader can see, or that has no name, isn't ready. */
 function controlFindings(document: WidgetDocument): Finding[] {
 	const shown = new Set(
 		document.blocks.flatMap((block) => (block.kind === 'control' ? [block.control] : []))
 	);
 	return document.controls.flatMap((control) => {
-		const { id, label, initial } = control;
+		const { id, label } = control;
 		const block = document.blocks.find(
 			(candidate) => candidate.kind === 'control' && candidate.control === id
 		);
@@ -79,7 +75,7 @@ function controlFindings(document: WidgetDocument): Finding[] {
 				}
 			];
 		}
-		const offGrid = gridProblem(control, initial);
+		const offGrid = settingProblem(control);
 		return [
 			...(label.trim()
 				? []
@@ -91,6 +87,16 @@ function controlFindings(document: WidgetDocument): Finding[] {
 	});
 }
 
+/** Why no step of a control leads to its ends or its first setting; '' when a reader can reach them all. */
+function settingProblem(control: Control): string {
+	if (hasOptions(control) || control.kind === 'number') return '';
+	if (control.kind !== 'log-slider') return gridProblem(control, control.initial);
+	const near = nearestSetting(control, control.initial);
+	return near === control.initial
+		? ''
+		: `No whole step leads to ${plainDecimal(control.initial)}; the nearest is ${plainDecimal(near)}.`;
+}
+
 /** Readings in use must not be refused at the first settings. */
 function readingFindings(document: WidgetDocument, calculators: CalculatorSet): Finding[] {
 	const evaluation = evaluate(document, {}, calculators);
@@ -99,7 +105,7 @@ function readingFindings(document: WidgetDocument, calculators: CalculatorSet): 
 			claim.form === 'exempt' ? [] : [{ ref: claim.reading, at: { claim: claim.id } }]
 		),
 		...document.blocks.flatMap((block) =>
-			block.kind === 'chart' ? [{ ref: block.y.reading, at: { block: block.id } }] : []
+			shownReadings(block).map(({ reading }) => ({ ref: reading, at: { block: block.id } }))
 		)
 	];
 	return inUse.flatMap(({ ref, at }) => {

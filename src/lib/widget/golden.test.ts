@@ -1,6 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import { catalogue } from '../physics/calculators/index.ts';
+import { benchSet } from './bench-set.ts';
 import { DOCUMENT_VERSION } from './document.ts';
 import { evaluate } from './evaluate.ts';
 import { parseDocument } from './parse.ts';
@@ -22,7 +23,7 @@ describe.each(documents)('$name', ({ stored }) => {
 	test('opens in the newest version with every reading', () => {
 		const parsed = parseDocument(stored, catalogue);
 		if (!parsed.ok) throw new Error(JSON.stringify(parsed.issues));
-		const { steps } = evaluate(parsed.document, {}, catalogue);
+		const { steps } = evaluate(parsed.document, {}, benchSet(parsed.document, catalogue));
 		expect(Object.values(steps).filter(({ ok }) => !ok)).toEqual([]);
 	});
 });

@@ -84,7 +84,9 @@ describe('what is broken is named', () => {
 			'a chart in a unit of another kind',
 			(d) => ({
 				...d,
-				blocks: d.blocks.map((b) => (b.kind === 'chart' ? { ...b, y: { ...b.y, unit: 'm' } } : b))
+				blocks: d.blocks.map((b) =>
+					b.kind === 'chart' && b.form === 'line' ? { ...b, y: { ...b.y, unit: 'm' } } : b
+				)
 			}),
 			/can’t be printed in m/
 		],

@@ -6,18 +6,21 @@
 import { resolveUnit, type Calculator, type CalculatorSet } from '../physics/calculator.ts';
 import { edition, editions } from '../physics/constants/index.ts';
 import { commensurable, unitOf } from '../physics/units/units.ts';
+import { benchSet } from './bench-set.ts';
+import { controlsNamed, shownReadings } from './block-readings.ts';
+import { hasOptions } from './control.ts';
 import {
 	DOCUMENT_VERSION,
 	isTextBlock,
-	upgrades,
 	WidgetDocument,
 	type Control,
 	type ReadingRef,
 	type SettingSource,
-	type Step,
-	type Stored
+	type Step
 } from './document.ts';
+import { formulaIssues } from './formula-issues.ts';
 import { orderSteps } from './graph.ts';
+import { upgrades, type Stored } from './upgrades.ts';
 import { fixedSettings, unitOfRef } from './tie-units.ts';
 
 export interface Issue {
@@ -38,10 +41,14 @@ export function parseDocument(stored: unknown, calculators: CalculatorSet): Pars
 			issues: shaped.error.issues.map(({ path, message }) => ({ path: path.join('.'), message }))
 		};
 	}
+	const formulas = ownFormulaIssues(shaped.data);
 	const issues = [
 		...editionIssues(shaped.data),
 		...idIssues(shaped.data),
-		...wiringIssues(shaped.data, calculators)
+		// What hangs on a broken formula can't be judged before it is mended.
+		...(formulas.length > 0
+			? formulas
+			: wiringIssues(shaped.data, benchSet(shaped.data, calculators)))
 	];
 	return issues.length > 0 ? { ok: false, issues } : { ok: true, document: shaped.data };
 }
@@ -85,7 +92,7 @@ function editionIssues({ constants }: WidgetDocument): Issue[] {
 /** Ids are unique in their kind, and every claim entry stands exactly once in the copy. */
 function idIssues(document: WidgetDocument): Issue[] {
 	const issues: Issue[] = [];
-	for (const kind of ['steps', 'controls', 'blocks', 'claims'] as const) {
+	for (const kind of ['formulas', 'steps', 'controls', 'blocks', 'claims'] as const) {
 		const seen = new Set<string>();
 		document[kind].forEach(({ id }, index) => {
 			if (seen.has(id))
@@ -99,8 +106,9 @@ function idIssues(document: WidgetDocument): Issue[] {
 	const placed = new Set<string>();
 	document.blocks.forEach((block, index) => {
 		const path = `blocks.${index}`;
-		if (block.kind === 'control' && !controls.has(block.control)) {
-			issues.push({ path, message: `There is no control “${block.control}”.` });
+		for (const control of controlsNamed(block)) {
+			if (!controls.has(control))
+				issues.push({ path, message: `There is no control “${control}”.` });
 		}
 		if (!isTextBlock(block)) return;
 		block.content.forEach((inline, place) => {
@@ -132,6 +140,15 @@ function idIssues(document: WidgetDocument): Issue[] {
 		}
 	});
 	return issues;
+}
+
+function ownFormulaIssues({ formulas }: WidgetDocument): Issue[] {
+	return formulas.flatMap((formula, index) =>
+		formulaIssues(formula).map(({ path, says, mend }) => ({
+			path: `formulas.${index}.${path}`,
+			message: `${says} ${mend}`.trim()
+		}))
+	);
 }
 
 function wiringIssues(document: WidgetDocument, calculators: CalculatorSet): Issue[] {
@@ -212,7 +229,9 @@ function sourceUnit(
 ): { unit: string } | 'missing-control' | 'missing-output' | null {
 	if (source.from === 'control') {
 		const control = document.controls.find(({ id }) => id === source.control);
-		return control ? { unit: control.unit } : 'missing-control';
+		if (!control) return 'missing-control';
+		const words = hasOptions(control) && typeof control.options[0]?.value === 'string';
+		return words ? null : { unit: control.unit };
 	}
 	if (source.from !== 'reading') return null;
 	const upstream = document.steps.find(({ id }) => id === source.step);
@@ -238,12 +257,11 @@ function refIssues(document: WidgetDocument, calculators: CalculatorSet): Issue[
 					]
 		),
 		...document.blocks.flatMap((block, index) =>
-			block.kind === 'chart'
-				? [
-						{ path: `blocks.${index}.y`, ref: block.y.reading, unit: block.y.unit },
-						{ path: `blocks.${index}.x`, ref: { control: block.x.control } }
-					]
-				: []
+			shownReadings(block).map(({ path, reading, unit }) => ({
+				path: `blocks.${index}.${path}`,
+				ref: reading,
+				unit
+			}))
 		)
 	];
 	return refs.flatMap(({ path, ref, unit }) => {

@@ -8,6 +8,9 @@ import {
 	type WidgetDocument
 } from './document.ts';
 import { readingAt, type Evaluation } from './evaluate.ts';
+import type { Language } from './language.ts';
+import { hasOptions } from './control-kind.ts';
+import { optionAt } from './control-grid.ts';
 import { plainDecimal, printStated, roundToFigures, stateReading, type Stated } from './stated.ts';
 
 export interface ClaimPlace {
@@ -43,13 +46,11 @@ export function wordsAt(
 			case 'text':
 			case 'claim':
 				return inline.text;
-			case 'setting': {
-				const stated = settingStated(document, evaluation, inline.control);
-				return stated ? printStated(stated) : NO_READING;
-			}
+			case 'setting':
+				return settingWords(document, evaluation, inline.control) || NO_READING;
 			case 'live': {
 				const stated = liveStated(document, evaluation, inline.claim, calculators);
-				return stated ? printStated(stated) : NO_READING;
+				return stated ? printStated(stated, document.language) : NO_READING;
 			}
 		}
 	};
@@ -78,27 +79,45 @@ export function liveStated(
 	const claim = document.claims.find(({ id }) => id === claimId);
 	if (claim?.form !== 'live') return null;
 	const outcome = readingAt(document, evaluation, claim.reading, calculators);
-	return outcome.ok ? stateLive(outcome.reading, claim) : null;
+	return outcome.ok ? stateLive(outcome.reading, claim, document.language) : null;
 }
 
-function stateLive(reading: Reading, claim: Extract<Claim, { form: 'live' }>): Stated | null {
-	return typeof reading.value === 'number'
-		? stateReading(reading.value, reading.unit, claim, reading.quantity)
+function stateLive(
+	reading: Reading,
+	claim: Extract<Claim, { form: 'live' }>,
+	language: Language
+): Stated | null {
+	const { value, unit, quantity, uncertainty } = reading;
+	return typeof value === 'number'
+		? stateReading(value, unit, claim, quantity, language, uncertainty)
 		: null;
 }
 
-/** A control's value as printed: all its digits, since a setting is exact. */
+/** A measured control's value as printed: all its digits, since a setting is exact. */
 export function settingStated(
-	document: WidgetDocument,
-	evaluation: Evaluation,
+	document: Pick<WidgetDocument, 'controls'>,
+	evaluation: Pick<Evaluation, 'values'>,
 	controlId: string
 ): Stated | null {
 	const control = document.controls.find(({ id }) => id === controlId);
-	if (!control) return null;
+	if (!control || hasOptions(control)) return null;
 	const value = evaluation.values[controlId] ?? control.initial;
 	// Twelve figures hide the binary dust of stepping by tenths, and no reader's setting has more.
 	const numeral = plainDecimal(Number(roundToFigures(value, 12)));
 	return { hedge: 'bare', hedgeWord: '', numeral, scale: 1, unit: control.unit };
+}
+
+/** A control's value in words: “180 million years”, or the label of the option that is chosen; '' for no control. */
+export function settingWords(
+	document: Pick<WidgetDocument, 'controls' | 'language'>,
+	evaluation: Pick<Evaluation, 'values'>,
+	controlId: string
+): string {
+	const control = document.controls.find(({ id }) => id === controlId);
+	const option = control && optionAt(control, evaluation.values[controlId] ?? control.initial);
+	if (option) return option.label;
+	const stated = settingStated(document, evaluation, controlId);
+	return stated ? printStated(stated, document.language) : '';
 }
 
 export function blockText(block: TextBlock, words: Words): string {

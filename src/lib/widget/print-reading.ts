@@ -3,7 +3,7 @@
  * significant figures where nobody knows it, and where it is exact as many as the place has room for.
  */
 import type { Reading, Uncertainty } from '../physics/calculator.ts';
-import { plainDecimal, printNumeral, roundToFigures } from './stated.ts';
+import { plainDecimal, printNumeral, roundToFigures, superscript } from './stated.ts';
 
 export interface PrintedReading {
 	/** The value alone: “68.14”, “1.989 × 10³⁰”, or the words of a text reading. */
@@ -87,10 +87,4 @@ function uncertaintyWords(uncertainty: Uncertainty, unit: string): string {
 /** An exact 6000 isn't “6000.00000000”. */
 function withoutIdleZeros(numeral: string): string {
 	return numeral.includes('.') ? numeral.replace(/\.?0+$/, '') : numeral;
-}
-
-function superscript(exponent: number): string {
-	const digits = '⁰¹²³⁴⁵⁶⁷⁸⁹';
-	const sign = exponent < 0 ? '⁻' : '';
-	return sign + [...String(Math.abs(exponent))].map((digit) => digits[Number(digit)]).join('');
 }

@@ -1,9 +1,17 @@
 /**
  * A stated quantity: the hedge, the numeral as written, the scale word and the unit. The fact-check weighs it and
- * the widget prints it, so what is printed is what is weighed. English; other languages join in their own file.
+ * the widget prints it, so what is printed is what is weighed. A language other than English must have been loaded
+ * (`languages/load.ts`); printing in one that isn't throws a RangeError.
  */
+import type { Uncertainty } from '../physics/calculator.ts';
 import type { QuantityKind } from '../physics/units/quantities.ts';
-import { convertQuantity, unitOf } from '../physics/units/units.ts';
+import { convertDifference, convertQuantity, unitOf } from '../physics/units/units.ts';
+import { fittingWording } from './fitting-hedge.ts';
+import type { Language } from './language.ts';
+import { printWordsOf, type PrintWords } from './languages/print-words.ts';
+import { roundToFigures, shiftPoint } from './rounding.ts';
+
+export { plainDecimal, roundToFigures } from './rounding.ts';
 
 /** Families are what the rules know; the word as written is kept beside it. */
 export type HedgeFamily =
@@ -41,9 +49,10 @@ export interface Stated {
 
 export interface LiveFormat {
 	unit: string;
-	/** Significant figures printed. */
+	/** Significant figures printed; a fitting hedge may ask for more where so few can't be level. */
 	figures: number;
-	hedge: 'none' | 'about';
+	/** `fitting`: whichever hedge the rules find for the reading at hand. */
+	hedge: 'none' | 'about' | 'fitting';
 }
 
 const NO_BREAK = '\u00a0';
@@ -56,48 +65,129 @@ export function statedValue(stated: Stated): number {
 	return (over / under) * stated.scale;
 }
 
+/** Numbers from here on get a scale word or a power of ten; copy has no use for rows of noughts. */
+const WORDS_FROM = 1e6;
+const POWERS_FROM = 1e15;
+const POWERS_BELOW = 1e-6;
+/** Units with a scale word in their names, “million years”, bear no second one. */
+const SCALED_UNIT = /^(?:thousand|million|billion) /;
+
 /**
  * States a reading by a live format: converts first, rounds once, last. Rounds half to even on the shortest decimal
- * string that round-trips the double (ISO 80000-1:2009 annex B rule A), as the number rules ask.
+ * string that round-trips the double (ISO 80000-1:2009 annex B rule A), as the number rules ask. `uncertainty` is the
+ * reading's, in `unit`; a fitting hedge says “nearly” only where it leaves no doubt of the side.
  */
 export function stateReading(
 	value: number,
 	unit: string,
 	format: LiveFormat,
-	quantity: QuantityKind = 'number'
+	quantity: QuantityKind = 'number',
+	language: Language = 'en',
+	uncertainty: Uncertainty = 'not-available'
 ): Stated {
+	const converted = convertQuantity(value, unit, format.unit, quantity);
+	const hedges = printWordsOf(language).hedges;
+	if (format.hedge === 'fitting') {
+		const u =
+			typeof uncertainty === 'number'
+				? Math.abs(convertDifference(uncertainty, unit, format.unit))
+				: uncertainty;
+		const { family, numeral, figures } = fittingWording(converted, u, format.figures);
+		const hedgeWord = family === 'bare' ? '' : hedges[family];
+		return {
+			hedge: family,
+			hedgeWord,
+			...scaled(numeral, figures, format.unit),
+			unit: format.unit
+		};
+	}
+	const isAbout = format.hedge === 'about';
 	return {
-		hedge: format.hedge === 'about' ? 'around' : 'bare',
-		hedgeWord: format.hedge === 'about' ? 'about' : '',
-		numeral: roundToFigures(convertQuantity(value, unit, format.unit, quantity), format.figures),
-		scale: 1,
+		hedge: isAbout ? 'around' : 'bare',
+		hedgeWord: isAbout ? hedges.around : '',
+		...scaled(roundToFigures(converted, format.figures), format.figures, format.unit),
 		unit: format.unit
 	};
 }
 
+/** A rounded numeral with the scale word or power of ten that keeps it short. */
+function scaled(numeral: string, figures: number, unit: string): Pick<Stated, 'numeral' | 'scale'> {
+	const size = Math.abs(Number(numeral));
+	const power = size === 0 ? 0 : powerFor(size, SCALED_UNIT.test(unitOf(unit)?.words.many ?? ''));
+	if (power === 0) return { numeral, scale: 1 };
+	const [whole = '', rest = ''] = shiftPoint(numeral, -power).split('.');
+	const kept = rest.slice(0, Math.max(0, figures - whole.replace('-', '').length));
+	return { numeral: kept ? `${whole}.${kept}` : whole, scale: Number(`1e${power}`) };
+}
+
+function powerFor(size: number, isScaled: boolean): number {
+	if (size >= POWERS_FROM || size < POWERS_BELOW) return Number(size.toExponential().split('e')[1]);
+	if (size < WORDS_FROM || isScaled) return 0;
+	return size < 1e9 ? 6 : size < 1e12 ? 9 : 12;
+}
+
 /** “about 68 megahertz”: numeral and unit keep together, the minus is a real one, long numerals are grouped. */
-export function printStated(stated: Stated): string {
-	return [stated.hedgeWord, printNumeral(stated.numeral) + printAfterNumeral(stated)]
+export function printStated(stated: Stated, language: Language = 'en'): string {
+	return [
+		stated.hedgeWord,
+		printNumeral(stated.numeral, language) + printAfterNumeral(stated, language)
+	]
 		.filter(Boolean)
 		.join(' ');
 }
 
 /** Scale word and unit with the space before them: what follows the numeral. '' for a plain number. */
-export function printAfterNumeral({ numeral, scale, unit, unitWord: written }: Stated): string {
-	const words = written ?? unitWord(unit, numeral);
-	const tail = [scaleWord(scale), words].filter(Boolean).join(' ');
-	return tail && (CLOSED_UP.test(tail) ? tail : NO_BREAK + tail);
+export function printAfterNumeral(
+	{ numeral, scale, unit, unitWord: written }: Stated,
+	language: Language = 'en'
+): string {
+	const words = printWordsOf(language);
+	const scaleWord = printScale(words, numeral, scale);
+	const unitWord = written ?? printUnitWord(words, unit, scale === 1 ? numeral : null);
+	if (!scaleWord) return unitWord && (words.closedUp.test(unitWord) ? '' : NO_BREAK) + unitWord;
+	// “millones de metros”, but “millones por metro cúbico”.
+	const after = scale >= 1e6 && words.scales[scale] && /^(?!por )\p{L}/u.test(unitWord);
+	return (
+		NO_BREAK +
+		[scaleWord, after ? words.afterScale : '', unitWord.replace(/^-/, '')].filter(Boolean).join(' ')
+	);
 }
 
-/** English closes up the per cent sign and the signs of angle, and no other unit. */
-const CLOSED_UP = /^(?:%|[°′″]$)/u;
-
-function scaleWord(scale: number): string {
+function printScale(words: PrintWords, numeral: string, scale: number): string {
 	if (scale === 1) return '';
-	return SCALE_WORDS[scale] ?? `× 10${superscript(Math.round(Math.log10(scale)))}`;
+	const named = words.scales[scale];
+	if (named) return named[isOne(words.language, numeral) ? 0 : 1];
+	return `${words.timesSign}${NO_BREAK}10${superscript(Math.round(Math.log10(scale)))}`;
 }
 
-function superscript(power: number): string {
+/** The numeral is null where a scale word stands between it and the unit. */
+function printUnitWord(words: PrintWords, symbol: string, numeral: string | null): string {
+	const unit = words.units(symbol);
+	if (!unit) return symbol;
+	if (numeral === null) return unit[1];
+	const joined = isExactMillions(words, numeral) ? `${words.afterScale} ${unit[1]}` : null;
+	return joined ?? unit[isOne(words.language, numeral) ? 0 : 1];
+}
+
+/** Spanish counts in an exact million as in a noun: “1 000 000 de años”. CLDR's category “many”. */
+function isExactMillions({ afterScale }: PrintWords, numeral: string): boolean {
+	return afterScale !== '' && /^-?[1-9]\d*0{6}$/.test(numeral);
+}
+
+const plurals = new Map<string, Intl.PluralRules>();
+
+/** “1 metre” but “1.0 metres”: CLDR's plural rules, by the digits that are seen. */
+function isOne(language: Language, numeral: string): boolean {
+	const digits = numeral.split('.')[1]?.length ?? 0;
+	const key = `${language} ${digits}`;
+	const rules =
+		plurals.get(key) ?? new Intl.PluralRules(language, { minimumFractionDigits: digits });
+	plurals.set(key, rules);
+	return rules.select(Math.abs(Number(numeral))) === 'one';
+}
+
+/** 10 to this power, as raised digits with a real minus. */
+export function superscript(power: number): string {
 	return [...String(power)].map((sign) => SUPERSCRIPTS[sign] ?? sign).join('');
 }
 
@@ -105,61 +195,10 @@ const SUPERSCRIPTS: Record<string, string> = Object.fromEntries(
 	[...'0123456789-'].map((sign, index) => [sign, [...'⁰¹²³⁴⁵⁶⁷⁸⁹⁻'][index] ?? sign])
 );
 
-export function printNumeral(numeral: string): string {
+/** The language's decimal mark, a real minus, and narrow no-break spaces between groups from five digits on. */
+export function printNumeral(numeral: string, language: Language = 'en'): string {
 	const [, sign, whole, rest] = /^(-?)(\d+)(.*)$/.exec(numeral) ?? ['', '', numeral, ''];
 	const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, GROUP) : whole;
-	return (sign && Number(numeral) !== 0 ? MINUS : '') + grouped + rest;
-}
-
-function unitWord(symbol: string, numeral: string): string {
-	const unit = unitOf(symbol);
-	if (!unit) return symbol;
-	return Math.abs(Number(numeral)) === 1 ? unit.words.one : unit.words.many;
-}
-
-const SCALE_WORDS: Record<number, string> = {
-	1e3: 'thousand',
-	1e6: 'million',
-	1e9: 'billion',
-	1e12: 'trillion'
-};
-
-/** Decimal digits of a finite double without exponent: “0.00012”, “1420405751.768”. */
-export function plainDecimal(value: number): string {
-	const text = String(value);
-	const [, sign = '', whole = '', fraction = '', exponent] =
-		/^(-?)(\d+)(?:\.(\d+))?(?:e([+-]\d+))?$/.exec(text) ?? [];
-	if (exponent === undefined) return text;
-	const digits = whole + fraction;
-	const point = whole.length + Number(exponent);
-	if (point <= 0) return `${sign}0.${'0'.repeat(-point)}${digits}`;
-	if (point >= digits.length) return sign + digits + '0'.repeat(point - digits.length);
-	return `${sign}${digits.slice(0, point)}.${digits.slice(point)}`;
-}
-
-/** Rounds to `figures` significant figures, half to even, in decimal; trailing zeros after the point are kept. */
-export function roundToFigures(value: number, figures: number): string {
-	if (value === 0) return '0';
-	const decimal = plainDecimal(Math.abs(value));
-	const [whole = '', fraction = ''] = decimal.split('.');
-	const digits = (whole + fraction).replace(/^0+/, '');
-	const magnitude = whole === '0' ? -(fraction.match(/^0*/)?.[0].length ?? 0) : whole.length;
-	return (value < 0 ? '-' : '') + roundDigits(digits, magnitude, figures);
-}
-
-/** `digits` × 10^(magnitude − digits.length), rounded to `figures` digits. */
-function roundDigits(digits: string, magnitude: number, figures: number): string {
-	let kept = BigInt(digits.slice(0, figures).padEnd(figures, '0'));
-	const rest = digits.slice(figures).replace(/0+$/, '');
-	const half = rest === '5';
-	if ((half && kept % 2n === 1n) || (!half && rest > '5')) kept += 1n;
-	let text = kept.toString();
-	let place = magnitude - figures; // power of ten of the last kept digit
-	if (text.length > figures) {
-		text = text.slice(0, figures);
-		place += 1;
-	}
-	if (place >= 0) return text + '0'.repeat(place);
-	const padded = text.padStart(-place + 1, '0');
-	return `${padded.slice(0, place)}.${padded.slice(place)}`;
+	const mark = printWordsOf(language).decimalMark;
+	return (sign && Number(numeral) !== 0 ? MINUS : '') + grouped + rest.replace('.', mark);
 }

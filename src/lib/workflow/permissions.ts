@@ -27,6 +27,8 @@ export const ACTIONS = [
 	'read-desk',
 	'create-piece',
 	'edit-draft',
+	'spike-piece',
+	'recover-piece',
 	'pull-proof',
 	'read-proof',
 	'sign-claim',
@@ -37,7 +39,15 @@ export const ACTIONS = [
 	'read-calculators',
 	'propose-calculator',
 	'vet-calculator',
-	'withdraw-calculator'
+	'withdraw-calculator',
+	'vet-formula',
+	'read-pictures',
+	'add-picture',
+	'record-picture',
+	'replace-picture',
+	'delete-picture',
+	'read-themes',
+	'edit-themes'
 ] as const;
 export type Action = (typeof ACTIONS)[number];
 
@@ -57,6 +67,8 @@ const RULES: Record<Action, Rule> = {
 	'read-desk': { roles: ['writer', 'scientist', 'editor', 'admin'] },
 	'create-piece': { roles: ['writer', 'editor'] },
 	'edit-draft': { roles: ['writer', 'editor'] },
+	'spike-piece': { roles: ['writer', 'editor'] },
+	'recover-piece': { roles: ['writer', 'editor'] },
 	'pull-proof': { roles: ['writer', 'editor'] },
 	'read-proof': { roles: ['writer', 'scientist', 'editor'] },
 	'sign-claim': { roles: ['scientist'], apart: notWriter },
@@ -67,7 +79,15 @@ const RULES: Record<Action, Rule> = {
 	'read-calculators': { roles: ['writer', 'scientist', 'editor', 'admin'] },
 	'propose-calculator': { roles: ['scientist'] },
 	'vet-calculator': { roles: ['scientist'], second: true },
-	'withdraw-calculator': { roles: ['scientist'] }
+	'withdraw-calculator': { roles: ['scientist'] },
+	'vet-formula': { roles: ['scientist'], apart: notWriter },
+	'read-pictures': { roles: ['writer', 'scientist', 'editor', 'admin'] },
+	'add-picture': { roles: ['writer', 'editor'] },
+	'record-picture': { roles: ['writer', 'editor'] },
+	'replace-picture': { roles: ['writer', 'editor'] },
+	'delete-picture': { roles: ['writer', 'editor'] },
+	'read-themes': { roles: ['writer', 'scientist', 'editor', 'admin'] },
+	'edit-themes': { roles: ['editor', 'admin'] }
 };
 
 export type Denial = 'not-permitted' | 'same-person-twice' | 'own-proposal';

@@ -1,6 +1,7 @@
 /** The shapes in which a piece travels from services to pages, and the states derived from its parts. */
 import type { Verdict } from '../factcheck/verdict.ts';
 import type { ReadingRef, WidgetDocument } from '../widget/document.ts';
+import type { Slip } from './slip.ts';
 
 /** How a claim stands on the newest proof. `lapsed`: it was signed, and what the signature covers has changed since. */
 export const CLAIM_STATES = ['unsigned', 'signed', 'lapsed', 'queried', 'exempt'] as const;
@@ -65,6 +66,16 @@ export interface ClaimView {
 	queries: QueryView[];
 }
 
+/** A formula that was written for the piece, on its proof. */
+export interface FormulaView {
+	id: string;
+	/** What a signature on it is about. */
+	digest: string;
+	vetted: boolean;
+	/** Oldest first. `counts`: not of someone who has become one of the proof's writers. */
+	signings: { by: PersonName; at: string; note: string; counts: boolean }[];
+}
+
 export interface ProofView {
 	id: string;
 	number: number;
@@ -77,6 +88,7 @@ export interface ProofView {
 	claims: ClaimView[];
 	/** Open queries on claims that this proof no longer holds. */
 	looseQueries: QueryView[];
+	formulas: FormulaView[];
 	passedBy: PersonName | null;
 	passedAt: string | null;
 }
@@ -105,9 +117,21 @@ export interface PieceSummary {
 	missing: string;
 }
 
+/** A piece on the spike. */
+export interface SpikedPiece {
+	slug: string;
+	title: string;
+	spikedBy: PersonName;
+	/** ISO 8601, UTC. */
+	spikedAt: string;
+}
+
 /** A piece with all that its rooms show. */
 export interface PieceView extends PieceSummary {
 	document: WidgetDocument;
+	slip: Slip;
+	/** Who discarded it and when; null for a piece on the desk. */
+	spiked: { by: PersonName; at: string } | null;
 	savedAt: string;
 	savedBy: PersonName;
 	/** Everyone who has changed the draft since the last release. */

@@ -18,6 +18,8 @@ export interface ObjectStoreOptions {
 	folder: string;
 	/** Requests signed with another key, or not signed, are refused. */
 	accessKey: string;
+	/** Asked before each request; what it says true to is answered as a fault of the store. */
+	fails?: (method: string, key: string) => boolean;
 }
 
 interface Kept {
@@ -270,7 +272,7 @@ async function answerBucket(
 async function answer(
 	request: IncomingMessage,
 	response: ServerResponse,
-	{ folder, accessKey }: ObjectStoreOptions
+	{ folder, accessKey, fails }: ObjectStoreOptions
 ): Promise<void> {
 	requireSignature(request, accessKey);
 	// Read by hand: `URL` would resolve the dots of a key such as `a/../b`.
@@ -285,6 +287,8 @@ async function answer(
 	}
 	const bucket = new Bucket(join(folder, name));
 	const key = decodeURIComponent(rest.join('/'));
+	if (fails?.(request.method ?? '', key))
+		throw new Refused(500, 'InternalError', 'The store has a fault.');
 	if (key === '') return answerBucket(request, response, bucket, name, new URLSearchParams(search));
 	if (!(await bucket.exists()))
 		throw new Refused(404, 'NoSuchBucket', 'There is no bucket of this name.');

@@ -2,6 +2,7 @@
 import type { Calculator, RawInputs } from '../../physics/calculator.ts';
 import { runCalculator } from '../../physics/calculators/run.ts';
 import { commensurable } from '../../physics/units/units.ts';
+import type { Language } from '../../widget/language.ts';
 import type { Stated } from '../../widget/stated.ts';
 import type { WeighedReading } from '../weighing.ts';
 import { factorTwo, reciprocal, scaleSlip } from './factors.ts';
@@ -14,7 +15,8 @@ export function findTraps(
 	stated: Stated,
 	calculator: Calculator,
 	inputs: RawInputs,
-	output: string
+	output: string,
+	language: Language = 'en'
 ): Trap[] {
 	const result = runCalculator(calculator, inputs);
 	const own = result.ok ? result.outputs[output] : undefined;
@@ -30,8 +32,8 @@ export function findTraps(
 			]
 		: [];
 	return [
-		siblingOutput(stated, calculator, result, output),
-		timeAsDistance(stated, calculator, result, output),
+		siblingOutput(stated, calculator, result, output, language),
+		timeAsDistance(stated, calculator, result, output, language),
 		...compared
 	].filter((trap) => trap !== null);
 }

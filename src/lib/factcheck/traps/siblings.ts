@@ -2,6 +2,7 @@
 import type { Calculator, Result } from '../../physics/calculator.ts';
 import { constants } from '../../physics/constants/index.ts';
 import { commensurable, convert } from '../../physics/units/units.ts';
+import type { Language } from '../../widget/language.ts';
 import { printStated, type Stated } from '../../widget/stated.ts';
 import { fits, standsAsWritten, type Trap, type TrapMatch } from './trap.ts';
 
@@ -12,7 +13,8 @@ export function siblingOutput(
 	stated: Stated,
 	calculator: Calculator,
 	result: Result,
-	output: string
+	output: string,
+	language: Language = 'en'
 ): Trap | null {
 	const others = otherReadings(stated, result, output);
 	const matches = others
@@ -22,7 +24,7 @@ export function siblingOutput(
 	if (!best) return null;
 	return {
 		code: 'sibling-output',
-		says: `${capital(printStated(stated))} doesn’t fit “${labelOf(calculator, output)}”, and fits “${best.label}”. Which of them do the words mean?`,
+		says: `${capital(printStated(stated, language))} doesn’t fit “${labelOf(calculator, output)}”, and fits “${best.label}”. Which of them do the words mean?`,
 		matches
 	};
 }
@@ -32,7 +34,8 @@ export function timeAsDistance(
 	stated: Stated,
 	calculator: Calculator,
 	result: Result,
-	output: string
+	output: string,
+	language: Language = 'en'
 ): Trap | null {
 	if (!commensurable(stated.unit, 'ly')) return null;
 	const matches = otherReadings(stated, result, output)
@@ -44,7 +47,7 @@ export function timeAsDistance(
 	if (!best) return null;
 	return {
 		code: 'time-as-distance',
-		says: `${capital(printStated(stated))} is “${best.label}” with light years for years. Space has grown meanwhile, so the distance is another one.`,
+		says: `${capital(printStated(stated, language))} is “${best.label}” with light years for years. Space has grown meanwhile, so the distance is another one.`,
 		matches
 	};
 }

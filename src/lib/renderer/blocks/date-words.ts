@@ -1,11 +1,14 @@
-const WORDS = new Intl.DateTimeFormat('en-GB', {
-	day: 'numeric',
-	month: 'long',
-	year: 'numeric',
-	timeZone: 'UTC'
-});
+import type { Language } from '../../widget/language.ts';
+
+const LOCALES: Record<Language, string> = { en: 'en-GB', de: 'de-DE', es: 'es-ES' };
 
 /** “24 November 2026”, in UTC, so that server and reader print one date. `iso` must be ISO 8601. */
-export function dateInWords(iso: string): string {
-	return WORDS.format(new Date(iso));
+export function dateInWords(iso: string, language: Language): string {
+	const words = new Intl.DateTimeFormat(LOCALES[language], {
+		day: 'numeric',
+		month: 'long',
+		year: 'numeric',
+		timeZone: 'UTC'
+	});
+	return words.format(new Date(iso));
 }

@@ -16,7 +16,14 @@ const KIND: Record<Block['kind'], GroupKind> = {
 	limits: 'aside',
 	paragraph: 'flow',
 	heading: 'flow',
-	caution: 'flow'
+	caution: 'flow',
+	aside: 'aside',
+	table: 'flow',
+	equation: 'flow',
+	picture: 'flow',
+	guess: 'flow',
+	presets: 'pair',
+	sources: 'flow'
 };
 
 /** Keeps the order of the copy; neighbours of one kind share a group. */

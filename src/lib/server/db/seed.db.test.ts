@@ -7,7 +7,8 @@ import { reword, SLUG } from '../../../../tests/support/desk.ts';
 import { Office } from '../../../../tests/support/office.ts';
 import { PRESS_FOLDER } from '../../../../tests/support/release.ts';
 import { firstLight } from '../demo/first-light.ts';
-import { createPiece, getPiece, listPieces, saveDraft } from '../services/pieces.ts';
+import { createPiece } from '../services/draft-start.ts';
+import { getPiece, listPieces, saveDraft } from '../services/pieces.ts';
 import { ReleaseShelf } from '../shelf/shelf.ts';
 import { seed } from './seed.ts';
 

@@ -5,6 +5,7 @@
  */
 import { eq } from 'drizzle-orm';
 import type { WidgetDocument } from '../../widget/document.ts';
+import { emptyDocument } from '../../widget/empty-document.ts';
 import { canonicalJson } from '../../widget/freeze.ts';
 import { hashPassphrase } from '../auth/passphrase.ts';
 import type { Context, Fixtures } from '../context.ts';
@@ -13,11 +14,12 @@ import { DEMO_PASSPHRASE, DEMO_PEOPLE } from '../demo/people.ts';
 import { sameDrop } from '../demo/same-drop.ts';
 import { signClaim } from '../services/claims.ts';
 import { addPerson, readActor } from '../services/people.ts';
-import { createPiece, emptyDocument, getPiece, listPieces, saveDraft } from '../services/pieces.ts';
+import { createPiece } from '../services/draft-start.ts';
+import { getPiece, saveDraft } from '../services/pieces.ts';
 import { passConditions, passProof, pullProof } from '../services/proofs.ts';
 import { releaseProof } from '../services/releases.ts';
 import { signWhatCame } from '../services/vettings.ts';
-import { people } from './schema/index.ts';
+import { people, pieces } from './schema/index.ts';
 
 export type Seed = 'none' | 'people' | 'demo';
 
@@ -81,10 +83,10 @@ async function seedPiece(
 ): Promise<void> {
 	const { slug, document } = piece;
 	const writer = await as(fixtures, ids[piece.writer]);
-	const made = (await listPieces(writer)).some((summary) => summary.slug === slug);
-	if (!made) await createPiece(writer, { title: document.title, slug });
-	const { version, releases, document: draft } = await getPiece(writer, slug);
-	if (releases.length > 0) return;
+	const made = await fixtures.db.$count(pieces, eq(pieces.slug, slug));
+	if (made === 0) await createPiece(writer, { title: document.title, slug });
+	const { version, releases, spiked, document: draft } = await getPiece(writer, slug);
+	if (releases.length > 0 || spiked) return;
 	// Someone has made the piece their own, or writes another one under this slug: it stays as they left it.
 	const untouched = [emptyDocument(document.title), document].some(
 		(left) => canonicalJson(left) === canonicalJson(draft)

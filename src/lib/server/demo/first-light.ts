@@ -2,12 +2,13 @@ import type { WidgetDocument } from '../../widget/document.ts';
 
 /** One note, lowered by the growth of space. Age → redshift → where hydrogen's 21 cm line arrives. */
 export const firstLight: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: 'First light on the dial',
 	point:
 		'Cold hydrogen sends one radio note. The growth of space lowers it, so the note we catch says when it left.',
+	formulas: [],
 	steps: [
 		{
 			id: 'age',
@@ -73,13 +74,11 @@ export const firstLight: WidgetDocument = {
 		{
 			id: 'dial',
 			kind: 'chart',
+			form: 'line',
 			title: 'Where the wave arrives on today’s radio dial',
-			x: { control: 'wave-age', label: 'Age of the Universe when the wave left' },
-			y: {
-				reading: { step: 'line', output: 'observedFrequency' },
-				unit: 'MHz',
-				label: 'frequency'
-			},
+			x: { control: 'wave-age', label: 'Age of the Universe when the wave left', scale: 'linear' },
+			y: { unit: 'MHz', label: 'frequency', scale: 'linear', from: 'data' },
+			series: [{ id: 'line', reading: { step: 'line', output: 'observedFrequency' }, label: '' }],
 			bands: [{ from: 87.5, to: 108, label: 'FM radio' }],
 			source:
 				'Growth of space from Planck Collaboration 2018 VI; the line from Hellwig and others 1970',

@@ -2,11 +2,12 @@ import type { WidgetDocument } from '../../widget/document.ts';
 
 /** The falling weight fixes how fast the stone arrives; the path it takes doesn't. */
 export const sameDrop: WidgetDocument = {
-	version: 1,
+	version: 2,
 	language: 'en',
 	constants: '2026.1',
 	title: 'Same drop, same blow',
 	point: 'The falling weight fixes how fast the stone arrives. The path it takes doesn’t.',
+	formulas: [],
 	steps: [
 		{
 			id: 'weight',
@@ -99,9 +100,11 @@ export const sameDrop: WidgetDocument = {
 		{
 			id: 'speed',
 			kind: 'chart',
+			form: 'line',
 			title: 'How fast the stone reaches the wall top',
-			x: { control: 'drop', label: 'Fall of the weight' },
-			y: { reading: { step: 'flat', output: 'impactSpeed' }, unit: 'm/s', label: 'speed' },
+			x: { control: 'drop', label: 'Fall of the weight', scale: 'linear' },
+			y: { unit: 'm/s', label: 'speed', scale: 'linear', from: 'data' },
+			series: [{ id: 'line', reading: { step: 'flat', output: 'impactSpeed' }, label: '' }],
 			bands: [],
 			source: 'Conservation of energy; standard gravity 9.80665 m/s²',
 			description:

@@ -81,6 +81,7 @@ describe('a request that changes something', () => {
 test.each([
 	['/(desk)/desk', 'page'],
 	['/(desk)/pieces/[slug]/check', 'page'],
+	['/(strip)/pieces/[slug]/galley/strip', 'page'],
 	['/api/pieces/[slug]/draft', 'api'],
 	['/api/anything-new', 'api'],
 	['/api/v1/calculators/[id]', 'public-api'],

@@ -17,8 +17,15 @@ export function failureOf({ code }: SteelyardError): Failure {
 /** Details are for the services. What of them a client needs is listed here, and nothing else leaves the house. */
 const TOLD: Partial<Record<ErrorCode, readonly string[]>> = {
 	'version-conflict': ['version', 'savedAt', 'savedBy', 'document'],
+	'slip-changed': ['slip'],
 	'document-broken': ['issues'],
-	'input-broken': ['issues']
+	'input-broken': ['issues'],
+	'picture-refused': ['why', 'says', 'mend'],
+	'picture-not-ready': ['findings'],
+	'picture-used': ['uses'],
+	'picture-changed': ['picture'],
+	'word-file-refused': ['why', 'says', 'mend'],
+	'theme-fails': ['problems']
 };
 
 function toldOf({ code, details }: SteelyardError): Record<string, unknown> {

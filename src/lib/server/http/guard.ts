@@ -6,5 +6,5 @@ export function guardOf(routeId: string | null): Guard {
 	if (routeId === null) return 'open';
 	if (routeId.startsWith('/api/v1/')) return 'public-api';
 	if (routeId.startsWith('/api/')) return 'api';
-	return routeId.startsWith('/(desk)') ? 'page' : 'open';
+	return routeId.startsWith('/(desk)') || routeId.startsWith('/(strip)') ? 'page' : 'open';
 }

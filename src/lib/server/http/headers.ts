@@ -12,6 +12,8 @@ export interface Answer {
 	/** The answer depends on who asked. */
 	personal: boolean;
 	requestId: string;
+	/** May stand in a frame of our own pages, and of nobody else's: a strip of the galley. */
+	framedByUs?: boolean;
 }
 
 /** The response with all headers in place; copies it when its headers can't be changed, as with redirects. */
@@ -29,8 +31,12 @@ export function withSecurityHeaders(response: Response, answer: Answer): Respons
 		set.push(['Referrer-Policy', page ? 'strict-origin-when-cross-origin' : 'no-referrer']);
 	}
 	if (page) set.push(['Cross-Origin-Opener-Policy', 'same-origin']);
-	if (!response.headers.has('content-security-policy'))
-		set.push(['Content-Security-Policy', NOT_A_PAGE]);
+	const policy = response.headers.get('content-security-policy');
+	if (policy === null) set.push(['Content-Security-Policy', NOT_A_PAGE]);
+	else if (answer.framedByUs && page) {
+		const ours = policy.replace("frame-ancestors 'none'", "frame-ancestors 'self'");
+		set.push(['Content-Security-Policy', ours], ['X-Frame-Options', 'SAMEORIGIN']);
+	}
 	if (answer.secure) set.push(['Strict-Transport-Security', 'max-age=63072000; includeSubDomains']);
 	if (answer.personal) set.push(['Cache-Control', 'no-store']);
 	if (/^(text\/|application\/json)/.test(type) && !/charset=/i.test(type)) {

@@ -3,7 +3,8 @@ import type { ZodType } from 'zod';
 import { SteelyardError } from '../../errors.ts';
 
 export const BODY_LIMIT_BYTES = 512 * 1024;
-const DEEPEST = 32;
+/** A document with the deepest formula that may stand in it, and some. */
+const DEEPEST = 80;
 
 /** Throws `input-broken` or `too-large`, never a parser's error. */
 export async function readJson(request: Request): Promise<unknown> {

@@ -10,9 +10,10 @@ import { readsInWords } from '../../factcheck/words.ts';
 import type { CalculatorSet } from '../../physics/calculator.ts';
 import type { ClaimRecord, ClaimRecords } from '../../renderer/records.ts';
 import { isTextBlock, type TextBlock, type WidgetDocument } from '../../widget/document.ts';
+import { benchSet } from '../../widget/bench-set.ts';
 import { evaluate, type Evaluation } from '../../widget/evaluate.ts';
-import { blockText, claimPlaces, settingStated, wordsAt, type Words } from '../../widget/places.ts';
-import { printStated } from '../../widget/stated.ts';
+import { isFormulaId } from '../../widget/formula-id.ts';
+import { blockText, claimPlaces, settingWords, wordsAt, type Words } from '../../widget/places.ts';
 
 /** One part of the piece as plain text, at its first settings. */
 export interface CopyPart {
@@ -54,17 +55,18 @@ export interface PublicAccount {
 	makers: Makers;
 	/** The constants edition. */
 	constants: string;
-	/** In the order they hang on the bench. */
+	/** In the order they hang on the bench; of a formula, that it is one of the piece's own. */
 	calculators: { title: string; revision: string }[];
 	sources: string[];
 }
 
 export function accountOf(
 	document: WidgetDocument,
-	calculators: CalculatorSet,
+	house: CalculatorSet,
 	records: ClaimRecords,
 	makers: Makers
 ): PublicAccount {
+	const calculators = benchSet(document, house);
 	const evaluation = evaluate(document, {}, calculators);
 	const words = wordsAt(document, evaluation, calculators);
 	const used = [...new Set(document.steps.map(({ calculator }) => calculator))];
@@ -78,7 +80,9 @@ export function accountOf(
 		constants: document.constants,
 		calculators: used.flatMap((id) => {
 			const calculator = calculators.get(id);
-			return calculator ? [{ title: calculator.title, revision: calculator.revision }] : [];
+			if (!calculator) return [];
+			const { title, revision } = calculator;
+			return [{ title, revision: isFormulaId(id) ? 'a formula of this piece' : revision }];
 		}),
 		sources: [...new Set(Object.values(records).flatMap(({ restsOn }) => restsOn))]
 	};
@@ -92,11 +96,10 @@ function copyOf(document: WidgetDocument, evaluation: Evaluation, words: Words):
 			const { id, title, description, source } = block;
 			return [{ id, kind: 'chart', text: description, title, source }];
 		}
+		if (block.kind !== 'control') return [];
 		const control = document.controls.find(({ id }) => id === block.control);
-		const stated = control && settingStated(document, evaluation, control.id);
-		return control && stated
-			? [{ id: block.id, kind: 'setting', text: `${control.label}: ${printStated(stated)}.` }]
-			: [];
+		const set = control && settingWords(document, evaluation, control.id);
+		return set ? [{ id: block.id, kind: 'setting', text: `${control.label}: ${set}.` }] : [];
 	});
 }
 
@@ -119,7 +122,7 @@ function numbersOf(
 				id: claim.id,
 				label: place.label,
 				words: place.words,
-				reads: weighing ? readsInWords(weighing.stated, weighing.reading) : '',
+				reads: weighing ? readsInWords(weighing.stated, weighing.reading, document.language) : '',
 				verdict: verdict.verdict,
 				departurePercent: verdict.departurePercent,
 				checkedBy: records[claim.id]?.checkedBy ?? []

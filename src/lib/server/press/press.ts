@@ -4,13 +4,17 @@ import { join } from 'node:path';
 import { render } from 'svelte/server';
 import type { Calculator, CalculatorSet } from '../../physics/calculator.ts';
 import type { HouseDefinition } from '../../physics/house/definition.ts';
+import { mathKey, type SetMath } from '../../renderer/math-node.ts';
 import type { ClaimRecords } from '../../renderer/records.ts';
 import Frame from '../../renderer/Frame.svelte';
 import type { FrameRelease } from '../../renderer/release.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
+import { benchSet } from '../../widget/bench-set.ts';
 import { sampleChart, type ChartPoint } from '../../widget/evaluate.ts';
+import { formulaDefinition } from '../../widget/formula-definition.ts';
 import { canonicalJson, type Frozen } from '../../widget/freeze.ts';
 import { policyHash, sha256 } from '../auth/hashes.ts';
+import { mathTree } from '../../typeset/math-tree.ts';
 import type { Makers } from './account.ts';
 import type { Bundle, BundleFile, BundleManifest } from './bundle.ts';
 import { readManifest, type PressManifest } from './manifest.ts';
@@ -22,7 +26,7 @@ export interface BundleInput {
 	frozen: Frozen;
 	/** All that the house works with. */
 	calculators: CalculatorSet;
-	/** The house's own among them, as data; the frame carries those the piece uses. */
+	/** The house's own among them, as data; the frame carries those the piece uses, and the piece's formulas. */
 	houseCalculators: readonly HouseDefinition[];
 	slug: string;
 	releaseNumber: number;
@@ -31,6 +35,8 @@ export interface BundleInput {
 	house: string;
 	makers: Makers;
 	records: ClaimRecords;
+	/** The files of its pictures, under `press/`. */
+	pictures?: BundleFile[];
 	/** Where the piece's public page is, when it isn't the frame's own host. */
 	origin?: string;
 	/** The folder of the frame's build; `build/press` in a checkout. */
@@ -44,9 +50,14 @@ export interface BundleInput {
 export async function makeBundle(input: BundleInput): Promise<Bundle> {
 	const { frozen, slug, pressFolder } = input;
 	const press = await readManifest(pressFolder);
-	const used = frozen.calculators.map(({ id }) => calculatorOf(id, input.calculators));
+	const bench = benchSet(frozen.document, input.calculators);
+	const used = frozen.calculators.map(({ id }) => calculatorOf(id, bench));
 	const ids = new Set(used.map(({ id }) => id));
-	const houseCalculators = input.houseCalculators.filter(({ id }) => ids.has(id));
+	const houseCalculators = [
+		...input.houseCalculators,
+		// The frame carries no more of a formula than it works with.
+		...frozen.document.formulas.map((formula) => ({ ...formulaDefinition(formula), checks: [] }))
+	].filter(({ id }) => ids.has(id));
 	const ownIds = new Set(houseCalculators.map(({ id }) => id));
 	const builtIn = used.filter(({ id }) => !ownIds.has(id));
 	const scripts = builtIn.map((calculator) => scriptOf(press, calculator));
@@ -61,7 +72,8 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 		document: frozen.document,
 		digest: frozen.digest,
 		records: input.records,
-		curves: curvesOf(frozen.document, input.calculators),
+		curves: curvesOf(frozen.document, bench),
+		math: mathOf(frozen.document, bench),
 		houseCalculators
 	};
 	const calculators = new Map(used.map((calculator) => [calculator.id, calculator]));
@@ -93,19 +105,41 @@ export async function makeBundle(input: BundleInput): Promise<Bundle> {
 	const files = [
 		page,
 		record,
-		...(await Promise.all(assets.map((name) => pressFile(pressFolder, name))))
+		...(await Promise.all(assets.map((name) => pressFile(pressFolder, name)))),
+		...(input.pictures ?? [])
 	];
 	return { digest: page.sha256, files, manifest: manifestOf(release, page, css, files) };
+}
+
+/** The equations that the piece shows, each once. */
+function mathOf(document: WidgetDocument, calculators: CalculatorSet): FrameRelease['math'] {
+	const book: Record<string, SetMath> = {};
+	for (const block of document.blocks) {
+		if (block.kind !== 'equation') continue;
+		const step = document.steps.find(({ id }) => id === block.step);
+		const calculator = step && calculators.get(step.calculator);
+		const equation = calculator?.equations[block.equation];
+		const tree = equation && mathTree(equation.tex);
+		if (tree)
+			book[mathKey(calculator.id, calculator.revision, block.equation)] = {
+				tree,
+				says: equation.says
+			};
+	}
+	return book;
 }
 
 /** Figures kept of a drawn line: a thousandth of a pixel in any frame. */
 const CURVE_FIGURES = 7;
 
 function curvesOf(document: WidgetDocument, calculators: CalculatorSet): FrameRelease['curves'] {
-	const charts = document.blocks.filter((block) => block.kind === 'chart');
+	const charts = document.blocks.filter((block) => block.kind === 'chart' && block.form === 'line');
 	const rounded = ({ y }: ChartPoint) => (y === null ? null : Number(y.toPrecision(CURVE_FIGURES)));
 	return Object.fromEntries(
-		charts.map((chart) => [chart.id, sampleChart(document, {}, chart, calculators).map(rounded)])
+		charts.map((chart) => [
+			chart.id,
+			sampleChart(document, {}, chart, calculators).map((line) => line.map(rounded))
+		])
 	);
 }
 

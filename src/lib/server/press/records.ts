@@ -8,6 +8,7 @@ import { cosmologySets } from '../../physics/constants/cosmologies.ts';
 import { lineById } from '../../physics/lines/catalogue.ts';
 import type { ClaimRecord, ClaimRecords } from '../../renderer/records.ts';
 import type { Claim, SettingSource, WidgetDocument } from '../../widget/document.ts';
+import { benchSet } from '../../widget/bench-set.ts';
 import { evaluate } from '../../widget/evaluate.ts';
 import { wiringOf } from '../../widget/graph.ts';
 import { claimPlaces, wordsAt } from '../../widget/places.ts';
@@ -25,9 +26,10 @@ type WeighedClaim = Exclude<Claim, { form: 'exempt' }>;
 /** A record for every claim in the copy that is one; what the writer exempted has none. */
 export function recordsOf(
 	document: WidgetDocument,
-	calculators: CalculatorSet,
+	house: CalculatorSet,
 	signings: readonly Signing[]
 ): ClaimRecords {
+	const calculators = benchSet(document, house);
 	const evaluation = evaluate(document, {}, calculators);
 	const verdicts = judgeClaims(document, calculators);
 	const places = claimPlaces(document, wordsAt(document, evaluation, calculators));
@@ -43,10 +45,21 @@ export function recordsOf(
 				{
 					beam:
 						weighing && picture
-							? { picture, words, reads: readsOnBeam(weighing.stated, weighing.reading) }
+							? {
+									picture,
+									words,
+									reads: readsOnBeam(weighing.stated, weighing.reading, document.language)
+								}
 							: null,
 					says: weighing
-						? verdictSentence(weighing.stated, weighing.reading, verdict, 'reader', words)
+						? verdictSentence(
+								weighing.stated,
+								weighing.reading,
+								verdict,
+								'reader',
+								words,
+								document.language
+							)
 						: verdict.reason,
 					checkedBy: checkersOf(claim.id, signings),
 					...groundsOf(document, claim, calculators)

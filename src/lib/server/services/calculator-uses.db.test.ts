@@ -6,7 +6,7 @@ import { firstLight } from '../demo/first-light.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
 import { proofs, releases } from '../db/schema/index.ts';
 import { listUses } from './calculator-uses.ts';
-import { createPiece } from './pieces.ts';
+import { createPiece } from './draft-start.ts';
 
 let database: TestDatabase;
 let office: Office;

@@ -4,7 +4,12 @@ import { daybook } from '../db/schema/index.ts';
 
 export type DaybookEvent =
 	| 'piece-created'
+	| 'slip-changed'
+	| 'piece-spiked'
+	| 'piece-recovered'
 	| 'draft-first-changed'
+	| 'draft-named'
+	| 'draft-restored'
 	| 'proof-pulled'
 	| 'claim-signed'
 	| 'signature-taken-back'
@@ -17,12 +22,20 @@ export type DaybookEvent =
 	| 'calculator-proposed'
 	| 'calculator-vetted'
 	| 'calculator-withdrawn'
+	| 'formula-vetted'
+	| 'formula-vetting-taken-back'
+	| 'picture-added'
+	| 'picture-recorded'
+	| 'picture-replaced'
+	| 'picture-deleted'
 	| 'signed-in'
 	| 'signed-out'
 	| 'passphrase-confirmed'
 	| 'person-added'
 	| 'roles-changed'
-	| 'person-disabled';
+	| 'person-disabled'
+	| 'theme-saved'
+	| 'theme-deleted';
 
 /** Writes one line in the daybook, in the transaction of what it tells about. Details hold ids and numbers, never copy. */
 export async function record(

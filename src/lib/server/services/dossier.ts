@@ -1,8 +1,9 @@
 /** All rows about a piece, read together; the views are worked out from them. */
-import { desc, eq, inArray } from 'drizzle-orm';
+import { desc, eq, inArray, isNull } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
 import type { Db } from '../db/client.ts';
 import { pieces, pieceWriters, proofs, queries, releases, signatures } from '../db/schema/index.ts';
+import { readFormulaSignings, type FormulaSigning } from './formula-standing.ts';
 import { readStored } from './stored-document.ts';
 
 import { readStock, type Stock } from './stock.ts';
@@ -23,6 +24,8 @@ export interface Dossier {
 	proof: ProofRow | null;
 	signatures: SignatureRow[];
 	queries: QueryRow[];
+	/** On formulas of the newest proof, in whatever piece they were signed. */
+	formulaSignings: FormulaSigning[];
 	/** Newest first. */
 	releases: ReleaseRow[];
 	/** What the piece is worked with now. */
@@ -45,11 +48,15 @@ export async function readDossier(
 	return gathered ? readable(gathered) : null;
 }
 
-/** Every piece, the one saved last first; apart from them those whose documents can't be read any more. */
+/** Every piece on the desk, the one saved last first; apart from them those whose documents can't be read any more. */
 export async function readDossiers(
 	db: Db
 ): Promise<{ dossiers: Dossier[]; unreadable: PieceRow[] }> {
-	const rows = await db.select().from(pieces).orderBy(desc(pieces.savedAt), desc(pieces.id));
+	const rows = await db
+		.select()
+		.from(pieces)
+		.where(isNull(pieces.spikedAt))
+		.orderBy(desc(pieces.savedAt), desc(pieces.id));
 	const dossiers: Dossier[] = [];
 	const unreadable: PieceRow[] = [];
 	for (const gathered of await gather(db, rows)) {
@@ -82,6 +89,10 @@ async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 		.from(proofs)
 		.where(inArray(proofs.pieceId, ids))
 		.orderBy(proofs.pieceId, desc(proofs.number));
+	const formulaSignings = await readFormulaSignings(
+		db,
+		newest.map(({ document }) => document)
+	);
 	const signed = await db
 		.select({ row: signatures, proofNumber: proofs.number })
 		.from(signatures)
@@ -119,6 +130,7 @@ async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 			proof: ofPiece(newest)[0] ?? null,
 			signatures: ofPiece(signed.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
 			queries: ofPiece(asked.map(({ row, proofNumber }) => ({ ...row, proofNumber }))),
+			formulaSignings,
 			releases: ofPiece(released),
 			stock
 		};
@@ -127,11 +139,12 @@ async function gather(db: Db, rows: PieceRow[]): Promise<Dossier[]> {
 
 /** Everyone named in the dossiers, for the name book. */
 export function* namedIn(dossiers: readonly Dossier[]): Generator<string | null> {
-	for (const { piece, writers, proof, signatures, queries, releases } of dossiers) {
-		yield piece.savedBy;
+	for (const dossier of dossiers) {
+		const { piece, writers, proof, signatures, queries, formulaSignings, releases } = dossier;
+		yield* [piece.savedBy, piece.spikedBy];
 		yield* writers;
 		if (proof) yield* [proof.pulledBy, proof.passedBy, ...proof.writers];
-		for (const { personId } of signatures) yield personId;
+		for (const { personId } of [...signatures, ...formulaSignings]) yield personId;
 		for (const { askedBy, answeredBy } of queries) yield* [askedBy, answeredBy];
 		for (const { releasedBy } of releases) yield releasedBy;
 	}

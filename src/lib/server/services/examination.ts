@@ -1,8 +1,10 @@
 /** What the machine finds in a document: its claims, what a signature on each would cover, the verdicts, what is missing. */
+import '../../factcheck/lexicon/all.ts';
 import { judgeClaims } from '../../factcheck/judge.ts';
 import { undeclaredFindings } from '../../factcheck/undeclared.ts';
 import type { Verdict } from '../../factcheck/verdict.ts';
 import type { CalculatorSet } from '../../physics/calculator.ts';
+import { benchSet } from '../../widget/bench-set.ts';
 import { claimCovers, coverHash, type ClaimCover } from '../../widget/cover.ts';
 import type { WidgetDocument } from '../../widget/document.ts';
 import { evaluate } from '../../widget/evaluate.ts';
@@ -41,7 +43,8 @@ export function examine(document: WidgetDocument, calculators: CalculatorSet): E
 	return fresh;
 }
 
-function examineAnew(document: WidgetDocument, calculators: CalculatorSet): Examination {
+function examineAnew(document: WidgetDocument, house: CalculatorSet): Examination {
+	const calculators = benchSet(document, house);
 	const verdicts = judgeClaims(document, calculators);
 	const covers = claimCovers(document, calculators);
 	const places = claimPlaces(

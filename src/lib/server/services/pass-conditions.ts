@@ -18,7 +18,8 @@ interface Facts {
 	names: (personId: string) => PersonName;
 }
 
-type Rule = (facts: Facts) => Condition;
+/** Null where it has nothing to say about this piece. */
+type Rule = (facts: Facts) => Condition | null;
 
 const RULES: Rule[] = [
 	({ standing, slug }) => {
@@ -136,6 +137,24 @@ const RULES: Rule[] = [
 			...(first ? { href: routes.calculator(first.calculator.id) } : {})
 		};
 	},
+	({ standing: { formulas }, slug }) => {
+		if (formulas.length === 0) return null;
+		const open = formulas.filter(({ vetted }) => !vetted);
+		const titles = open.map(({ formula }) => `“${formula.title}”`).join(', ');
+		return {
+			side: 'galley',
+			met: open.length === 0,
+			says:
+				open.length === 0
+					? 'Every formula that was written for it is vetted.'
+					: `${open.length === 1 ? 'A formula' : 'Formulas'} written for this piece ${open.length === 1 ? 'isn’t' : 'aren’t'} vetted: ${titles}.`,
+			mend:
+				open.length === 0
+					? ''
+					: 'A scientist who didn’t write this looks it over on the Check screen and signs it.',
+			href: `${routes.check(slug)}#formulas`
+		};
+	},
 	() => ({
 		side: 'time',
 		met: true,
@@ -161,7 +180,7 @@ export function conditionsOf(dossier: Dossier, actor: Actor, names: Facts['names
 	}
 	const { stock } = dossier;
 	const facts: Facts = { slug, proof, standing: standingOf(dossier, proof), stock, actor, names };
-	return RULES.map((rule) => rule(facts));
+	return RULES.flatMap((rule) => rule(facts) ?? []);
 }
 
 function notVetted({ title, revision }: Calculator, state: VettingState): string {

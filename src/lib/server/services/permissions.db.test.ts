@@ -4,8 +4,12 @@ import { openTestDatabase, type TestDatabase } from '../../../../tests/support/d
 import { Desk, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
 import { emptyCard } from '../../vetting/fresh.ts';
+import { HOUSE_THEME } from '../../themes/theme.ts';
+import { emptyRecord } from '../../pictures/record.ts';
+import { EMPTY_SLIP } from '../../workflow/slip.ts';
 import { can, ROLES, type Action, type Role } from '../../workflow/permissions.ts';
 import type { Context } from '../context.ts';
+import { exportCopy } from './copy-export.ts';
 import { signClaim, takeBackSignature } from './claims.ts';
 import {
 	proposeHouseCalculator,
@@ -14,12 +18,29 @@ import {
 	vetCalculator,
 	withdrawCalculator
 } from './house-calculators.ts';
+import { tryFormula } from './formula-steps.ts';
+import { takeBackFormula, vetFormula } from './formula-vettings.ts';
 import { tryHouseCalculator } from './house-test.ts';
-import { createPiece, getPiece, listPieces, saveDraft } from './pieces.ts';
+import { replacePicture } from './pictures-replace.ts';
+import {
+	addPicture,
+	deletePicture,
+	getPicture,
+	listPictures,
+	readPictureFile,
+	savePictureRecord
+} from './pictures.ts';
+import { listSpiked, recoverPiece, spikePiece } from './draft-spike.ts';
+import { createPiece } from './draft-start.ts';
+import { listDrafts, nameDraft, openDraft, restoreDraft } from './history.ts';
+import { getPiece, lastSigned, listPieces, saveDraft } from './pieces.ts';
 import { passConditions, passProof, pullProof } from './proofs.ts';
 import { answerQuery, closeQuery, raiseQuery } from './queries.ts';
 import { releaseProof } from './releases.ts';
+import { saveSlip } from './slips.ts';
+import { deleteTheme, listThemes, saveTheme } from './themes.ts';
 import { listCalculators, readVettings } from './vettings.ts';
+import { importWordFile } from './word-import.ts';
 
 let database: TestDatabase;
 let office: Office;
@@ -35,7 +56,15 @@ beforeAll(async () => {
 });
 afterAll(() => database.close());
 
+/** Too pale to be kept. */
+const PALE = { ...HOUSE_THEME, id: '', name: 'Pale', accent: '#ffee99' } as const;
 const REVISION = { base: '1.0.0', change: 'patch' as const, note: 'Nothing.' };
+const NO_SLIP = {
+	was: EMPTY_SLIP,
+	fields: { reader: '', partner: '', embargo: '', words: '', due: '', zone: 'UTC' }
+};
+async function* noBytes(): AsyncGenerator<Uint8Array> {}
+const NO_FORMULA = { proofId: 'x', digest: '0'.repeat(64), note: '' };
 const NO_REVISION = { calculator: 'house.nowhere', revision: '1.0.0', note: 'Nothing.' };
 
 /**
@@ -45,8 +74,26 @@ const NO_REVISION = { calculator: 'house.nowhere', revision: '1.0.0', note: 'Not
 const SERVICES: [name: string, action: Action, call: (ctx: Context) => Promise<unknown>][] = [
 	['listPieces', 'read-desk', (ctx) => listPieces(ctx)],
 	['getPiece', 'read-proof', (ctx) => getPiece(ctx, 'nowhere')],
+	['exportCopy', 'read-proof', (ctx) => exportCopy(ctx, 'nowhere')],
+	['importWordFile', 'edit-draft', (ctx) => importWordFile(ctx, noBytes())],
+	['listThemes', 'read-themes', (ctx) => listThemes(ctx)],
+	['saveTheme', 'edit-themes', (ctx) => saveTheme(ctx, PALE)],
+	['deleteTheme', 'edit-themes', (ctx) => deleteTheme(ctx, 'nowhere')],
 	['createPiece', 'create-piece', (ctx) => createPiece(ctx, { title: 'Taken', slug: SLUG })],
 	['saveDraft', 'edit-draft', (ctx) => saveDraft(ctx, SLUG, { baseVersion: 1, document: null })],
+	['lastSigned', 'read-desk', (ctx) => lastSigned(ctx)],
+	['saveSlip', 'edit-draft', (ctx) => saveSlip(ctx, 'nowhere', NO_SLIP)],
+	['listSpiked', 'read-desk', (ctx) => listSpiked(ctx)],
+	['spikePiece', 'spike-piece', (ctx) => spikePiece(ctx, 'nowhere')],
+	['recoverPiece', 'recover-piece', (ctx) => recoverPiece(ctx, 'nowhere')],
+	['listDrafts', 'read-proof', (ctx) => listDrafts(ctx, 'nowhere')],
+	['openDraft', 'read-proof', (ctx) => openDraft(ctx, 'nowhere', 1)],
+	['nameDraft', 'edit-draft', (ctx) => nameDraft(ctx, 'nowhere', { version: 1, name: '' })],
+	[
+		'restoreDraft',
+		'edit-draft',
+		(ctx) => restoreDraft(ctx, 'nowhere', { version: 1, baseVersion: 1 })
+	],
 	['pullProof', 'pull-proof', (ctx) => pullProof(ctx, 'nowhere')],
 	['passConditions', 'read-proof', (ctx) => passConditions(ctx, 'nowhere')],
 	['signClaim', 'sign-claim', (ctx) => signClaim(ctx, 'nowhere', { proofId: 'x', claim: 'x' })],
@@ -81,9 +128,27 @@ const SERVICES: [name: string, action: Action, call: (ctx: Context) => Promise<u
 	['readHouseCalculator', 'propose-calculator', (ctx) => readHouseCalculator(ctx, 'house.nowhere')],
 	['tryHouseCalculator', 'propose-calculator', async (ctx) => tryHouseCalculator(ctx, {})],
 	['vetCalculator', 'vet-calculator', (ctx) => vetCalculator(ctx, NO_REVISION)],
+	['tryFormula', 'edit-draft', (ctx) => Promise.resolve().then(() => tryFormula(ctx, null))],
+	['vetFormula', 'vet-formula', (ctx) => vetFormula(ctx, 'nowhere', NO_FORMULA)],
+	['takeBackFormula', 'read-proof', (ctx) => takeBackFormula(ctx, 'nowhere', NO_FORMULA)],
 	['withdrawCalculator', 'withdraw-calculator', (ctx) => withdrawCalculator(ctx, NO_REVISION)],
 	['listCalculators', 'read-calculators', (ctx) => listCalculators(ctx)],
-	['readVettings', 'read-calculators', (ctx) => readVettings(ctx, 'cosmo.at_z')]
+	['readVettings', 'read-calculators', (ctx) => readVettings(ctx, 'cosmo.at_z')],
+	['listPictures', 'read-pictures', (ctx) => listPictures(ctx)],
+	['getPicture', 'read-pictures', (ctx) => getPicture(ctx, 'nowhere')],
+	['readPictureFile', 'read-pictures', (ctx) => readPictureFile(ctx, 'nowhere')],
+	[
+		'addPicture',
+		'add-picture',
+		(ctx) => addPicture(ctx, { body: noBytes(), fileName: 'a.png', declaredType: '' })
+	],
+	[
+		'savePictureRecord',
+		'record-picture',
+		(ctx) => savePictureRecord(ctx, 'nowhere', { baseVersion: 1, record: emptyRecord() })
+	],
+	['replacePicture', 'replace-picture', (ctx) => replacePicture(ctx, 'nowhere', 'nowhere')],
+	['deletePicture', 'delete-picture', (ctx) => deletePicture(ctx, 'nowhere')]
 ];
 
 const DENIALS = ['not-permitted', 'same-person-twice', 'not-signed-in'];

@@ -14,6 +14,7 @@ import {
 } from '../../workflow/piece.ts';
 import type { Dossier, PieceRow, ProofRow, QueryRow, ReleaseRow } from './dossier.ts';
 import { examine } from './examination.ts';
+import type { StandingFormula } from './formula-standing.ts';
 import {
 	isReleased,
 	openQueries,
@@ -66,6 +67,11 @@ export function viewPiece(dossier: Dossier, names: Names): PieceView {
 	return {
 		...summarise(dossier, names),
 		document: piece.document,
+		slip: piece.slip,
+		spiked: piece.spikedAt && {
+			by: names(piece.spikedBy ?? piece.savedBy),
+			at: piece.spikedAt.toISOString()
+		},
 		savedAt: piece.savedAt.toISOString(),
 		savedBy: names(piece.savedBy),
 		writers: writers.map(names),
@@ -76,7 +82,7 @@ export function viewPiece(dossier: Dossier, names: Names): PieceView {
 
 function viewProof(
 	proof: ProofRow,
-	{ claims, looseQueries, people }: Standing,
+	{ claims, looseQueries, formulas, people }: Standing,
 	names: Names
 ): ProofView {
 	return {
@@ -90,6 +96,7 @@ function viewProof(
 		checkers: people.checkers.map(names),
 		claims: claims.map((claim) => viewClaim(claim, names)),
 		looseQueries: looseQueries.map((row) => viewQuery(row, names)),
+		formulas: formulas.map((formula) => viewFormula(formula, names)),
 		passedBy: proof.passedBy === null ? null : names(proof.passedBy),
 		passedAt: proof.passedAt?.toISOString() ?? null
 	};
@@ -121,6 +128,20 @@ function viewClaim(
 			sentence: row.sentence
 		})),
 		queries: queries.map((row) => viewQuery(row, names))
+	};
+}
+
+function viewFormula({ formula, digest, vetted, signings }: StandingFormula, names: Names) {
+	return {
+		id: formula.id,
+		digest,
+		vetted,
+		signings: signings.map(({ personId, signedAt, note, counts }) => ({
+			by: names(personId),
+			at: signedAt.toISOString(),
+			note,
+			counts
+		}))
 	};
 }
 
@@ -193,7 +214,9 @@ function holder(
 function missing(dossier: Dossier, standing: Standing | null, working: WorkingState): string {
 	if (working === 'at-rest') return '';
 	if (working === 'passed') return 'its release';
-	if (working === 'checked') return 'an editor’s pass';
+	const unvetted = standing?.formulas.filter(({ vetted }) => !vetted).length ?? 0;
+	const toVet = counted(unvetted, 'formula to vet', 'formulas to vet');
+	if (working === 'checked') return toVet || 'an editor’s pass';
 	const examination = examine(
 		working === 'draft' || !dossier.proof ? dossier.piece.document : dossier.proof.document,
 		dossier.stock.calculators
@@ -211,6 +234,7 @@ function missing(dossier: Dossier, standing: Standing | null, working: WorkingSt
 			? counted(examination.findings.length, 'thing to add', 'things to add')
 			: '',
 		working === 'draft' ? '' : counted(states('unsigned') + states('lapsed'), 'to sign'),
+		working === 'draft' ? '' : toVet,
 		counted(open, 'query', 'queries')
 	]
 		.filter(Boolean)

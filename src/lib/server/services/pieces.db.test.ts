@@ -3,10 +3,12 @@ import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, test } fr
 import { openTestDatabase, type TestDatabase } from '../../../../tests/support/database.ts';
 import { Desk, reword, SLUG } from '../../../../tests/support/desk.ts';
 import { noShelf, Office } from '../../../../tests/support/office.ts';
-import { upgrades, type WidgetDocument } from '../../widget/document.ts';
+import type { WidgetDocument } from '../../widget/document.ts';
+import { upgrades } from '../../widget/upgrades.ts';
 import { firstLight } from '../demo/first-light.ts';
 import { pieces, pieceWriters, proofs } from '../db/schema/index.ts';
-import { createPiece, getPiece, listPieces, saveDraft } from './pieces.ts';
+import { createPiece } from './draft-start.ts';
+import { getPiece, listPieces, saveDraft } from './pieces.ts';
 
 let database: TestDatabase;
 let office: Office;
@@ -156,7 +158,7 @@ describe('saving a draft', () => {
 });
 
 describe('a document stored by an older house', () => {
-	/** As if version 1 had followed a version 0 that called the point something else. */
+	/** As if version 2 had followed a version 0 that called the point something else. */
 	const older = ({ point, ...document }: WidgetDocument) => ({
 		...document,
 		version: 0,
@@ -168,7 +170,7 @@ describe('a document stored by an older house', () => {
 	beforeEach(async () => {
 		await desk.create();
 		await desk.save(firstLight);
-		upgrades[0] = ({ gist, ...document }) => ({ ...document, version: 1, point: gist });
+		upgrades[0] = ({ gist, ...document }) => ({ ...document, version: 2, point: gist });
 	});
 	afterEach(() => {
 		delete upgrades[0];

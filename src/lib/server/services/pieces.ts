@@ -1,23 +1,23 @@
-/** The working draft of a piece: made, read, saved. */
-import { and, eq, sql } from 'drizzle-orm';
+/** The working draft of a piece: listed, read, saved. */
+import { and, desc, eq, isNull, sql } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
-import type { CreatePiece } from '../../forms/create-piece.ts';
 import type { SaveDraft } from '../../forms/save-draft.ts';
-import { EDITION_IN_USE } from '../../physics/constants/index.ts';
-import { DOCUMENT_VERSION, type WidgetDocument } from '../../widget/document.ts';
+import type { WidgetDocument } from '../../widget/document.ts';
 import { canonicalJson } from '../../widget/freeze.ts';
 import { parseDocument } from '../../widget/parse.ts';
-import { requirePermission } from '../../workflow/permissions.ts';
+import { requirePermission, type Actor } from '../../workflow/permissions.ts';
 import type { PersonName, PieceSummary, PieceView } from '../../workflow/piece.ts';
 import type { Context } from '../context.ts';
 import type { Db } from '../db/client.ts';
-import { pieces, pieceWriters } from '../db/schema/index.ts';
+import { pieces, pieceWriters, signatures } from '../db/schema/index.ts';
 import { record } from './daybook.ts';
 import { namedIn, readDossier, readDossiers, type PieceRow } from './dossier.ts';
+import { keepVersion } from './draft-versions.ts';
+import { formulaSourceIssues } from './formula-steps.ts';
 import { nameBook } from './people.ts';
 import { summarise, summariseUnreadable, viewPiece } from './piece-view.ts';
 import { calculatorsOf } from './stock.ts';
-import { refuseUnstorable, unstorableText } from './storable.ts';
+import { unstorableText } from './storable.ts';
 import { readStored } from './stored-document.ts';
 
 /** The desk: one line a piece, the one saved last first. */
@@ -42,33 +42,18 @@ export async function getPiece(ctx: Context, slug: string): Promise<PieceView> {
 	return viewPiece(dossier, await nameBook(ctx.db, namedIn([dossier])));
 }
 
-/** An empty sheet under this title. Without a slug one is made from the title; a given one must be free. */
-export async function createPiece(
-	ctx: Context,
-	input: CreatePiece
-): Promise<{ id: string; slug: string }> {
-	const { actor, now } = ctx;
-	requirePermission(actor, 'create-piece');
-	refuseUnstorable(input);
-	return ctx.db.transaction(async (tx) => {
-		const slug = input.slug ?? (await freeSlug(tx, slugOf(input.title)));
-		const [piece] = await tx
-			.insert(pieces)
-			.values({
-				slug,
-				document: emptyDocument(input.title),
-				createdBy: actor.personId,
-				createdAt: now,
-				savedBy: actor.personId,
-				savedAt: now
-			})
-			.onConflictDoNothing({ target: pieces.slug })
-			.returning({ id: pieces.id, slug: pieces.slug });
-		if (!piece) throw new SteelyardError('slug-taken', { slug });
-		await addWriter(tx, { pieceId: piece.id, personId: actor.personId, now, version: 1 });
-		await record(tx, ctx, 'piece-created', { pieceId: piece.id, slug });
-		return piece;
-	});
+/** The last signature that the person who asks has put under a claim; null for who never signed. */
+export async function lastSigned(ctx: Context): Promise<{ slug: string; at: string } | null> {
+	const { actor } = ctx;
+	requirePermission(actor, 'read-desk');
+	const [last] = await ctx.db
+		.select({ slug: pieces.slug, at: signatures.signedAt })
+		.from(signatures)
+		.innerJoin(pieces, eq(pieces.id, signatures.pieceId))
+		.where(and(eq(signatures.personId, actor.personId), isNull(signatures.takenBackAt)))
+		.orderBy(desc(signatures.signedAt), desc(signatures.id))
+		.limit(1);
+	return last ? { slug: last.slug, at: last.at.toISOString() } : null;
 }
 
 export interface Saved {
@@ -89,45 +74,58 @@ export interface Conflict extends Saved {
  * there already changes nothing, on whatever version: the answer to a save may get lost on its way, and is asked for again.
  */
 export async function saveDraft(ctx: Context, slug: string, input: SaveDraft): Promise<Saved> {
-	const { actor, now } = ctx;
+	const { actor } = ctx;
 	requirePermission(actor, 'edit-draft');
 	const parsed = parseDocument(input.document, await calculatorsOf(ctx));
-	const issues = parsed.ok ? unstorableText(parsed.document) : parsed.issues;
+	const issues = parsed.ok
+		? [...unstorableText(parsed.document), ...formulaSourceIssues(parsed.document)]
+		: parsed.issues;
 	if (!parsed.ok || issues.length > 0) throw new SteelyardError('document-broken', { issues });
 
 	return ctx.db.transaction(async (tx) => {
 		const piece = await lockPiece(tx, slug);
 		if (canonicalJson(piece.document) === canonicalJson(parsed.document)) return saved(piece);
 		if (piece.version !== input.baseVersion) throw await conflict(tx, piece);
-
-		const [row] = await tx
-			.update(pieces)
-			.set({
-				document: parsed.document,
-				version: sql`${pieces.version} + 1`,
-				savedBy: actor.personId,
-				savedAt: now
-			})
-			.where(and(eq(pieces.id, piece.id), eq(pieces.version, input.baseVersion)))
-			.returning();
-		if (!row) throw await conflict(tx, piece);
-		const first = await addWriter(tx, {
-			pieceId: piece.id,
-			personId: actor.personId,
-			now,
-			version: row.version
-		});
-		if (first)
-			await record(tx, ctx, 'draft-first-changed', { pieceId: piece.id, version: row.version });
-		return saved(row);
+		return writeDraft(tx, { ...ctx, actor }, piece, parsed.document, null);
 	});
+}
+
+/**
+ * Makes a checked document the newest draft of a piece that the transaction holds: counts up, keeps what stood before
+ * among the earlier drafts, and notes who changed it. `restoredFrom` is the version whose words it brings back.
+ */
+export async function writeDraft(
+	tx: Db,
+	ctx: { actor: Actor; now: Date },
+	piece: PieceRow,
+	document: WidgetDocument,
+	restoredFrom: number | null
+): Promise<Saved> {
+	const { personId } = ctx.actor;
+	const [row] = await tx
+		.update(pieces)
+		.set({
+			document,
+			version: sql`${pieces.version} + 1`,
+			savedBy: personId,
+			savedAt: ctx.now
+		})
+		.where(and(eq(pieces.id, piece.id), eq(pieces.version, piece.version)))
+		.returning();
+	if (!row) throw await conflict(tx, piece);
+	await keepVersion(tx, piece, row, restoredFrom);
+	const { id: pieceId, version } = row;
+	const first = await addWriter(tx, { pieceId, personId, now: ctx.now, version });
+	if (first) await record(tx, ctx, 'draft-first-changed', { pieceId, version });
+	return saved(row);
 }
 
 function saved(piece: PieceRow): Saved {
 	return { version: piece.version, savedAt: piece.savedAt.toISOString() };
 }
 
-async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
+/** The failure for a change that was made on an older version, with the newest one. */
+export async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
 	const names = await nameBook(tx, [piece.savedBy]);
 	const current: Conflict = {
 		...saved(piece),
@@ -137,8 +135,15 @@ async function conflict(tx: Db, piece: PieceRow): Promise<SteelyardError> {
 	return new SteelyardError('version-conflict', { ...current });
 }
 
-/** The row, held until the transaction ends: two people may press the same button at once. */
+/** The row, held until the transaction ends: two people may press the same button at once. Throws `piece-spiked`. */
 export async function lockPiece(tx: Db, slug: string): Promise<PieceRow> {
+	const piece = await lockPieceAnywhere(tx, slug);
+	if (piece.spikedAt) throw new SteelyardError('piece-spiked');
+	return piece;
+}
+
+/** The row held, also of a piece that is on the spike. */
+export async function lockPieceAnywhere(tx: Db, slug: string): Promise<PieceRow> {
 	const [piece] = await tx.select().from(pieces).where(eq(pieces.slug, slug)).for('update');
 	if (!piece) throw new SteelyardError('not-found');
 	return piece;
@@ -153,7 +158,10 @@ interface Change {
 }
 
 /** Marks a person as one who changed the draft; true when they weren't one since the last release. */
-async function addWriter(tx: Db, { pieceId, personId, now, version }: Change): Promise<boolean> {
+export async function addWriter(
+	tx: Db,
+	{ pieceId, personId, now, version }: Change
+): Promise<boolean> {
 	const [changed] = await tx
 		.update(pieceWriters)
 		.set({ changedAt: now, version })
@@ -162,40 +170,4 @@ async function addWriter(tx: Db, { pieceId, personId, now, version }: Change): P
 	if (changed) return false;
 	await tx.insert(pieceWriters).values({ pieceId, personId, changedAt: now, version });
 	return true;
-}
-
-/** What `createPiece` starts with. */
-export function emptyDocument(title: string): WidgetDocument {
-	return {
-		version: DOCUMENT_VERSION,
-		language: 'en',
-		constants: EDITION_IN_USE,
-		title,
-		point: '',
-		steps: [],
-		controls: [],
-		blocks: [],
-		claims: []
-	};
-}
-
-/** “Same drop, same blow” → same-drop-same-blow. */
-function slugOf(title: string): string {
-	const plain = title
-		.normalize('NFKD')
-		.replace(/\p{M}/gu, '')
-		.toLowerCase()
-		.replace(/['’]/g, '')
-		.replace(/[^a-z0-9]+/g, '-')
-		.slice(0, 70)
-		.replace(/^-+|-+$/g, '');
-	return plain || 'piece';
-}
-
-async function freeSlug(tx: Db, wanted: string): Promise<string> {
-	for (let number = 1; ; number += 1) {
-		const slug = number === 1 ? wanted : `${wanted}-${number}`;
-		const taken = await tx.$count(pieces, eq(pieces.slug, slug));
-		if (taken === 0) return slug;
-	}
 }

@@ -14,6 +14,7 @@ import { record } from './daybook.ts';
 import { namedIn, type Dossier, type ProofRow } from './dossier.ts';
 import { conditionsOf } from './pass-conditions.ts';
 import { nameBook } from './people.ts';
+import { picturesForPress } from './pictures-press.ts';
 import { viewRelease } from './piece-view.ts';
 import { lockNewestProof, type LockedProof } from './proofs.ts';
 import { inForce, makersOf, namedBy, signingsOf } from './release-makers.ts';
@@ -152,6 +153,7 @@ async function print(
 		house: ctx.house.name,
 		makers,
 		records,
+		pictures: await picturesForPress(ctx.store, proof.document),
 		pressFolder: ctx.pressFolder
 	});
 	return { bundle, account: accountOf(proof.document, calculators, records, makers) };

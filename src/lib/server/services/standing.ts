@@ -3,6 +3,7 @@ import type { ClaimState } from '../../workflow/piece.ts';
 import type { ProofPeople } from '../../workflow/permissions.ts';
 import type { Dossier, ProofRow, QueryRow, SignatureRow } from './dossier.ts';
 import { examine, type ExaminedClaim } from './examination.ts';
+import { standingFormulas, type StandingFormula } from './formula-standing.ts';
 
 export interface StandingClaim {
 	examined: ExaminedClaim;
@@ -15,6 +16,8 @@ export interface Standing {
 	claims: StandingClaim[];
 	/** Open queries on claims that this proof doesn't hold: tying the words anew doesn't settle what was asked. */
 	looseQueries: QueryRow[];
+	/** The piece's own formulas, in the proof's order. */
+	formulas: StandingFormula[];
 	people: ProofPeople;
 }
 
@@ -45,6 +48,7 @@ export function standingOf(dossier: Dossier, proof: ProofRow, at?: Date): Standi
 	return {
 		claims,
 		looseQueries,
+		formulas: standingFormulas(proof.document, dossier.formulaSignings, proof.writers),
 		people: { writers: proof.writers, checkers: [...new Set(checkers)] }
 	};
 }

@@ -49,7 +49,8 @@ export function shelfAnswers(shelf: ReleaseShelf, { https }: { https: boolean })
 			return true;
 		}
 		const [, slug = '', release = ''] = frame ?? [];
-		const page = frame && shelf.find(slug, release === 'latest' ? release : Number(release));
+		const found = frame && shelf.find(slug, release === 'latest' ? release : Number(release));
+		const page = found && shelf.themes.dress(found, request.url ?? '');
 		const file = page ?? (asset && shelf.asset(asset[1] ?? ''));
 		if (page) sendFile(request, response, page, headersOf(page));
 		else if (file) sendFile(request, response, file, assetHeaders);

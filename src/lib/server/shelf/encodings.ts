@@ -10,12 +10,12 @@ const fromGzip = promisify(gunzip);
 export const ENCODINGS = ['br', 'gzip'] as const;
 export type Encoding = (typeof ENCODINGS)[number];
 
-/** Null where packing saves nothing, as with fonts. */
+/** Null where packing saves nothing, as with fonts and pictures. */
 export type Packed = Record<Encoding, Buffer | null>;
 
 /** Off the main thread; the smallest form there is, since it is made once and served often. */
 export async function pack(bytes: Uint8Array, contentType: string): Promise<Packed> {
-	if (contentType.startsWith('font/')) return { br: null, gzip: null };
+	if (/^(?:font|image)\//.test(contentType)) return { br: null, gzip: null };
 	const [br, gzipped] = await Promise.all([
 		toBrotli(bytes, {
 			params: {

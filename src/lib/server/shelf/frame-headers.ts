@@ -11,6 +11,7 @@ function contentPolicy(styles: readonly string[]): string {
 		"script-src 'self'",
 		`style-src ${styles.map((hash) => `'${hash}'`).join(' ')}`,
 		"font-src 'self'",
+		"img-src 'self'",
 		"connect-src 'none'",
 		"base-uri 'none'",
 		"form-action 'none'",

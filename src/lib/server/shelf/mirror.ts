@@ -1,13 +1,10 @@
-/**
- * The shelf's copy on disk: bytes under their own hash, and one list a release. Every file is written beside its place,
- * brought to the disk, and renamed into it, so that a crash leaves either the old file, the new one, or none.
- */
-import { randomUUID } from 'node:crypto';
-import { mkdir, open, readdir, readFile, rename, rm } from 'node:fs/promises';
-import { dirname, join } from 'node:path';
+/** The shelf's copy on disk: bytes under their own hash, and one list a release. */
+import { readdir, readFile } from 'node:fs/promises';
+import { join } from 'node:path';
 import { z } from 'zod';
 import { sha256 } from '../auth/hashes.ts';
 import { BundleManifest } from '../press/bundle.ts';
+import { isMissing, write } from './atomic-file.ts';
 import { ENCODINGS, pack, unpacksTo, type Encoding, type Packed } from './encodings.ts';
 
 export interface StoredFile {
@@ -97,32 +94,4 @@ async function namesIn(folder: string): Promise<string[]> {
 		if (isMissing(error)) return [];
 		throw error;
 	}
-}
-
-async function write(file: string, bytes: Uint8Array): Promise<void> {
-	await mkdir(dirname(file), { recursive: true });
-	const draft = `${file}.${randomUUID()}.tmp`;
-	try {
-		const handle = await open(draft, 'wx');
-		try {
-			await handle.writeFile(bytes);
-			await handle.sync();
-		} finally {
-			await handle.close();
-		}
-		await rename(draft, file);
-	} catch (error) {
-		await rm(draft, { force: true });
-		throw error;
-	}
-	const folder = await open(dirname(file), 'r');
-	try {
-		await folder.sync(); // the new name, too
-	} finally {
-		await folder.close();
-	}
-}
-
-function isMissing(error: unknown): boolean {
-	return error instanceof Error && 'code' in error && error.code === 'ENOENT';
 }

@@ -6,6 +6,7 @@ import { resolve } from 'node:path';
 import type { Bundle, BundleManifest } from '../press/bundle.ts';
 import type { Encoding } from './encodings.ts';
 import { ShelfMirror, type StoredFile } from './mirror.ts';
+import { ThemeShelf } from './theme-shelf.ts';
 
 /** A file in all its forms, with what its answers need. */
 export interface ShelfFile {
@@ -31,6 +32,7 @@ export interface LoadReport {
 
 export class ReleaseShelf {
 	readonly folder: string;
+	readonly themes: ThemeShelf;
 	#mirror: ShelfMirror;
 	#pages = new Map<string, ShelfPage>();
 	#newest = new Map<string, number>();
@@ -38,11 +40,13 @@ export class ReleaseShelf {
 
 	constructor(folder: string) {
 		this.folder = folder;
+		this.themes = new ThemeShelf(folder);
 		this.#mirror = new ShelfMirror(folder);
 	}
 
 	/** Brings the copy on disk into memory. A release with a missing or altered file is left out and named. */
 	async load(): Promise<LoadReport> {
+		await this.themes.load();
 		const { manifests, damaged } = await this.#mirror.lists();
 		for (const manifest of manifests) {
 			const files = await this.#storedFiles(manifest);

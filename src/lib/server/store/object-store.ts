@@ -1,8 +1,10 @@
 /** Published bytes, by content-addressed key, in a store that speaks the S3 protocol. */
 import {
 	CreateBucketCommand,
+	DeleteObjectCommand,
 	GetObjectCommand,
 	HeadObjectCommand,
+	ListObjectsV2Command,
 	PutObjectCommand,
 	S3Client,
 	S3ServiceException
@@ -16,7 +18,16 @@ export interface ObjectStore {
 	get(key: string): Promise<Uint8Array | null>;
 	/** Whether the store has the key. */
 	head(key: string): Promise<boolean>;
+	/** Removing what isn't there changes nothing. */
+	remove(key: string): Promise<void>;
+	/** Every key that begins so, and when it was last put. */
+	list(prefix: string): Promise<StoredKey[]>;
 	close(): void;
+}
+
+export interface StoredKey {
+	key: string;
+	putAt: Date;
 }
 
 export interface StoreSettings {
@@ -75,6 +86,30 @@ export function openObjectStore(settings: StoreSettings): ObjectStore {
 				unlessMissing(() => client.send(new HeadObjectCommand(at(key))))
 			);
 			return found !== null;
+		},
+		async remove(key) {
+			await reached(() => unlessMissing(() => client.send(new DeleteObjectCommand(at(key)))));
+		},
+		async list(prefix) {
+			const found: StoredKey[] = [];
+			let next: string | undefined;
+			do {
+				const page = await reached(() =>
+					unlessMissing(() =>
+						client.send(
+							new ListObjectsV2Command({
+								Bucket: settings.bucket,
+								Prefix: prefix,
+								ContinuationToken: next
+							})
+						)
+					)
+				);
+				for (const { Key: key, LastModified: putAt } of page?.Contents ?? [])
+					if (key !== undefined && putAt) found.push({ key, putAt });
+				next = page?.NextContinuationToken;
+			} while (next !== undefined);
+			return found;
 		},
 		close: () => client.destroy()
 	};

@@ -1,7 +1,11 @@
 import { CreatePiece } from '$lib/forms/create-piece.ts';
 import { routes } from '$lib/routes.ts';
 import { formFailure, pageFailure } from '$lib/server/http/failures.ts';
-import { createPiece, getPiece, listPieces } from '$lib/server/services/pieces.ts';
+import { outlines } from '$lib/outlines/index.ts';
+import { SpikedSlug } from '$lib/forms/spike.ts';
+import { listSpiked, recoverPiece, spikePiece } from '$lib/server/services/draft-spike.ts';
+import { createPiece } from '$lib/server/services/draft-start.ts';
+import { getPiece, lastSigned, listPieces } from '$lib/server/services/pieces.ts';
 import { can } from '$lib/workflow/permissions.ts';
 import { fail, redirect } from '@sveltejs/kit';
 import { superValidate } from 'sveltekit-superforms';
@@ -24,6 +28,14 @@ export const load: PageServerLoad = async ({ locals: { context } }) => {
 		now: context.now.toISOString(),
 		pieces,
 		hands: actor ? inHand(actor, inWork) : [],
+		lastSigned: await lastSigned(context).catch(pageFailure),
+		spiked: await listSpiked(context).catch(pageFailure),
+		outlines: outlines.map(({ id, field, says, document: { title } }) => ({
+			id,
+			field,
+			says,
+			title
+		})),
 		slip: await superValidate(zod4(CreatePiece), { id: 'slip' })
 	};
 };
@@ -39,5 +51,25 @@ export const actions: Actions = {
 			return formFailure(form, thrown);
 		}
 		redirect(303, routes.manuscript(slug));
+	},
+	spike: async ({ locals, request }) => {
+		const form = await superValidate(request, zod4(SpikedSlug), { id: 'spike' });
+		if (!form.valid) return fail(400, { form });
+		try {
+			await spikePiece(locals.context, form.data.slug);
+			return { form, spiked: form.data.slug };
+		} catch (thrown) {
+			return formFailure(form, thrown);
+		}
+	},
+	recover: async ({ locals, request }) => {
+		const form = await superValidate(request, zod4(SpikedSlug), { id: 'spike' });
+		if (!form.valid) return fail(400, { form });
+		try {
+			await recoverPiece(locals.context, form.data.slug);
+			return { form, recovered: form.data.slug };
+		} catch (thrown) {
+			return formFailure(form, thrown);
+		}
 	}
 };

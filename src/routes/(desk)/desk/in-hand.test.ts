@@ -53,6 +53,7 @@ function piece(working: PieceView['working'], claims: ClaimView[] = [], missing 
 		checkers: claims.some(({ state }) => state === 'signed') ? [name(ama)] : [],
 		claims,
 		looseQueries: [],
+		formulas: [],
 		passedBy: null,
 		passedAt: null
 	};

@@ -4,5 +4,7 @@ export * from './pieces.ts';
 export * from './proofs.ts';
 export * from './releases.ts';
 export * from './calculators.ts';
+export * from './pictures.ts';
 export * from './outbox.ts';
 export * from './daybook.ts';
+export * from './themes.ts';

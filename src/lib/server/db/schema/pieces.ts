@@ -1,5 +1,6 @@
 import { index, integer, jsonb, pgTable, primaryKey, text, unique } from 'drizzle-orm/pg-core';
 import type { WidgetDocument } from '../../../widget/document.ts';
+import { EMPTY_SLIP, type Slip } from '../../../workflow/slip.ts';
 import { id, moment } from './columns.ts';
 import { people } from './people.ts';
 
@@ -14,13 +15,17 @@ export const pieces = pgTable(
 	{
 		id: id(),
 		slug: text().notNull(),
+		slip: jsonb().$type<Slip>().notNull().default(EMPTY_SLIP),
 		document: jsonb().$type<WidgetDocument>().notNull(),
 		/** Goes up by one with every save that changes the document. */
 		version: integer().notNull().default(1),
 		createdBy: person(),
 		createdAt: moment().notNull(),
 		savedBy: person(),
-		savedAt: moment().notNull()
+		savedAt: moment().notNull(),
+		/** When the draft was put on the spike; null for one that is on the desk. */
+		spikedAt: moment(),
+		spikedBy: text().references(() => people.id)
 	},
 	(table) => [
 		unique('pieces_slug_unique').on(table.slug),
@@ -41,4 +46,33 @@ export const pieceWriters = pgTable(
 		version: integer().notNull()
 	},
 	(table) => [primaryKey({ columns: [table.pieceId, table.personId] })]
+);
+
+/**
+ * Earlier drafts: the first, the newest of what one person kept within two minutes, and every one that has a name or
+ * that brought an older draft back. Unnamed ones go after ninety days.
+ */
+export const draftVersions = pgTable(
+	'draft_versions',
+	{
+		pieceId: text()
+			.notNull()
+			.references(() => pieces.id),
+		/** The draft's version that it is a copy of. */
+		version: integer().notNull(),
+		document: jsonb().$type<WidgetDocument>().notNull(),
+		savedBy: person(),
+		savedAt: moment().notNull(),
+		/** When the first save came that this row stands for. */
+		since: moment().notNull(),
+		/** “Before the cut”: given by a person, so that it can be found again. */
+		name: text(),
+		namedBy: text().references(() => people.id),
+		/** The version whose words this one brought back. */
+		restoredFrom: integer()
+	},
+	(table) => [
+		primaryKey({ columns: [table.pieceId, table.version] }),
+		index('draft_versions_saved_index').on(table.savedAt)
+	]
 );

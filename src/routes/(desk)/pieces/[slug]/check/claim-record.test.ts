@@ -26,9 +26,9 @@ describe('the record of a number that moves', () => {
 	test('is read in the unit of the copy, and worked from the first step on', () => {
 		expect(record?.reading).toMatchObject({ unit: 'MHz' });
 		expect(Number(record?.reading?.value)).toBeCloseTo(68.1, 1);
-		expect(record?.working.map(({ calculator }) => calculator)).toEqual([
-			'cosmo.inverse',
-			'line.observe'
+		expect(record?.working.map(({ href }) => href)).toEqual([
+			'/calculators/cosmo.inverse',
+			'/calculators/line.observe'
 		]);
 		expect(record?.working[0]?.readings).toEqual([
 			expect.objectContaining({ own: false, value: expect.stringMatching(/^19\.8/) as string })

@@ -11,7 +11,9 @@ import type {
 	Source
 } from '$lib/physics/calculator.ts';
 import { lineById } from '$lib/physics/lines/catalogue.ts';
+import { routes } from '$lib/routes.ts';
 import { commensurable, convert, convertDifference } from '$lib/physics/units/units.ts';
+import { isFormulaId } from '$lib/widget/formula-id.ts';
 import type {
 	Claim,
 	ControlValues,
@@ -51,7 +53,9 @@ export interface ReadingRow {
 export interface WorkingStep {
 	id: string;
 	title: string;
-	calculator: string;
+	/** The calculator's card, or the formula's place on this screen. */
+	href: string;
+	/** “1.2.0”, or “a formula of this piece”. */
 	revision: string;
 	settings: SettingRow[];
 	/** The outputs that the claim, or a later step, takes. */
@@ -105,7 +109,10 @@ export function claimRecord(
 		),
 		sources: sourcesOf(wiring.steps, calculators),
 		strips: claim.form === 'live' ? stripsOf(document, claim, wiring.controls, calculators) : [],
-		tryAt: step ? tryAddress(document, evaluation, step, calculators) : null
+		tryAt:
+			step && !isFormulaId(step.calculator)
+				? tryAddress(document, evaluation, step, calculators)
+				: null
 	};
 }
 
@@ -158,8 +165,8 @@ function workingStep(
 	return {
 		id: step.id,
 		title: calculator?.title ?? step.calculator,
-		calculator: step.calculator,
-		revision: calculator?.revision ?? step.revision,
+		href: hrefOf(step.calculator),
+		revision: revisionWords(step.calculator, calculator?.revision ?? step.revision),
 		settings: Object.entries(step.settings).map(([key, source]) => ({
 			label: settingLabel(calculator, key),
 			value: settingWords(document, evaluation, step, key, source, calculators),
@@ -172,6 +179,16 @@ function workingStep(
 				: usedReadings(result, used, own, calculator),
 		refusal: result && !result.ok ? result.refusal.message : null
 	};
+}
+
+function hrefOf(calculator: string): string {
+	return isFormulaId(calculator)
+		? `#${calculator.replace('.', '-')}`
+		: routes.calculator(calculator);
+}
+
+export function revisionWords(calculator: string, revision: string): string {
+	return isFormulaId(calculator) ? 'a formula of this piece' : revision;
 }
 
 function usedReadings(

@@ -4,6 +4,7 @@ import { isTextBlock, type TextBlock, type WidgetDocument } from '$lib/widget/do
 const KINDS: Record<TextBlock['kind'], string> = {
 	paragraph: 'paragraph',
 	heading: 'heading',
+	aside: 'aside',
 	result: 'result sentence',
 	limits: 'what this can’t tell you',
 	caution: 'caution'

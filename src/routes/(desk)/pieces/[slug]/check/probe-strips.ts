@@ -6,8 +6,7 @@ import { weigh } from '$lib/factcheck/weigh.ts';
 import type { CalculatorSet } from '$lib/physics/calculator.ts';
 import type { Claim, Control, WidgetDocument } from '$lib/widget/document.ts';
 import { evaluate } from '$lib/widget/evaluate.ts';
-import { claimPlaces, wordsAt } from '$lib/widget/places.ts';
-import { printStated } from '$lib/widget/stated.ts';
+import { claimPlaces, settingWords, wordsAt } from '$lib/widget/places.ts';
 
 export interface Probe {
 	setting: string;
@@ -52,15 +51,9 @@ function probeAt(
 		(each) => each.claim.id === claim.id
 	);
 	return {
-		setting: printStated({
-			hedge: 'bare',
-			hedgeWord: '',
-			numeral: String(Number(value.toPrecision(12))),
-			scale: 1,
-			unit: control.unit
-		}),
+		setting: settingWords(document, evaluation, control.id),
 		sentence: place?.sentence ?? '',
-		verdict: weighing ? weigh(weighing.stated, weighing.reading).verdict : 'unweighed',
+		verdict: weighing ? weigh(weighing.stated, weighing.reading, document.language).verdict : 'unweighed',
 		first: value === control.initial
 	};
 }

@@ -35,11 +35,18 @@ export function verdictPicture(
 	);
 	if (!weighing) return null;
 	const { stated, reading } = weighing;
-	const words = claim.form === 'live' ? printStated(stated) : view.words;
+	const words = claim.form === 'live' ? printStated(stated, document.language) : view.words;
 	return {
 		words,
 		beam: beamPicture(stated, reading),
-		reads: readsOnBeam(stated, reading),
-		says: verdictSentence(stated, reading, view.verdict, 'office', words)
+		reads: readsOnBeam(stated, reading, document.language),
+		says: verdictSentence(
+			stated,
+			reading,
+			view.verdict,
+			'office',
+			words,
+			document.language
+		)
 	};
 }

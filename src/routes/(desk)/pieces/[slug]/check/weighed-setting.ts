@@ -27,7 +27,7 @@ export function weighedSetting(
 	const weighAt = (values: ControlValues): Verdict | null => {
 		const evaluation = evaluate(document, values, calculators);
 		const weighing = weighingOf(document, evaluation, claim, words, calculators);
-		return weighing && weigh(weighing.stated, weighing.reading);
+		return weighing && weigh(weighing.stated, weighing.reading, document.language);
 	};
 	const gives = (found: Pick<Verdict, 'verdict' | 'departurePercent'> | null) =>
 		found?.verdict === verdict.verdict && found.departurePercent === verdict.departurePercent;
