@@ -17,6 +17,7 @@ export type DaybookEvent =
 	| 'calculator-proposed'
 	| 'calculator-vetted'
 	| 'calculator-withdrawn'
+	| 'calculator-retested'
 	| 'signed-in'
 	| 'signed-out'
 	| 'passphrase-confirmed'

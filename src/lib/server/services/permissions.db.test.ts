@@ -10,15 +10,15 @@ import { signClaim, takeBackSignature } from './claims.ts';
 import {
 	proposeHouseCalculator,
 	readHouseCalculator,
-	reviseHouseCalculator,
-	vetCalculator,
-	withdrawCalculator
+	reviseHouseCalculator
 } from './house-calculators.ts';
 import { tryHouseCalculator } from './house-test.ts';
 import { createPiece, getPiece, listPieces, saveDraft } from './pieces.ts';
 import { passConditions, passProof, pullProof } from './proofs.ts';
 import { answerQuery, closeQuery, raiseQuery } from './queries.ts';
 import { releaseProof } from './releases.ts';
+import { retestCalculator, vetCalculator, withdrawCalculator } from './vetting-acts.ts';
+import { listFlags } from './vetting-flags.ts';
 import { listCalculators, readVettings } from './vettings.ts';
 
 let database: TestDatabase;
@@ -82,6 +82,8 @@ const SERVICES: [name: string, action: Action, call: (ctx: Context) => Promise<u
 	['tryHouseCalculator', 'propose-calculator', async (ctx) => tryHouseCalculator(ctx, {})],
 	['vetCalculator', 'vet-calculator', (ctx) => vetCalculator(ctx, NO_REVISION)],
 	['withdrawCalculator', 'withdraw-calculator', (ctx) => withdrawCalculator(ctx, NO_REVISION)],
+	['retestCalculator', 'propose-calculator', (ctx) => retestCalculator(ctx, NO_REVISION)],
+	['listFlags', 'read-proof', (ctx) => listFlags(ctx)],
 	['listCalculators', 'read-calculators', (ctx) => listCalculators(ctx)],
 	['readVettings', 'read-calculators', (ctx) => readVettings(ctx, 'cosmo.at_z')]
 ];

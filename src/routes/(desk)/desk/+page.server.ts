@@ -2,6 +2,7 @@ import { CreatePiece } from '$lib/forms/create-piece.ts';
 import { routes } from '$lib/routes.ts';
 import { formFailure, pageFailure } from '$lib/server/http/failures.ts';
 import { createPiece, getPiece, listPieces } from '$lib/server/services/pieces.ts';
+import { listFlags } from '$lib/server/services/vetting-flags.ts';
 import { can } from '$lib/workflow/permissions.ts';
 import { fail, redirect } from '@sveltejs/kit';
 import { superValidate } from 'sveltekit-superforms';
@@ -12,18 +13,19 @@ import { inHand } from './in-hand.ts';
 export const load: PageServerLoad = async ({ locals: { context } }) => {
 	const { actor } = context;
 	const pieces = await listPieces(context).catch(pageFailure);
-	const inWork =
-		actor && can(actor, 'read-proof')
-			? await Promise.all(
-					pieces
-						.filter(({ working }) => working !== 'at-rest')
-						.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
-				)
-			: [];
+	const mayRead = actor !== null && can(actor, 'read-proof');
+	const inWork = mayRead
+		? await Promise.all(
+				pieces
+					.filter(({ working }) => working !== 'at-rest')
+					.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
+			)
+		: [];
+	const flags = mayRead ? await listFlags(context).catch(pageFailure) : [];
 	return {
 		now: context.now.toISOString(),
 		pieces,
-		hands: actor ? inHand(actor, inWork) : [],
+		hands: actor ? inHand(actor, inWork, flags) : [],
 		slip: await superValidate(zod4(CreatePiece), { id: 'slip' })
 	};
 };
