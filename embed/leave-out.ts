@@ -30,7 +30,10 @@ const CUTS: Cut[] = [
 		])
 	},
 	{ files: /src\/lib\/physics\/units\/table\.ts$/, members: new Set(['also', 'spoken', 'source']) },
-	{ files: /src\/lib\/physics\/constants\//, members: new Set(['source', 'sources', 'note']) }
+	{
+		files: /src\/lib\/physics\/constants\//,
+		members: new Set(['source', 'sources', 'note', 'verification', 'adjustment'])
+	}
 ];
 
 interface Node {

@@ -149,6 +149,10 @@ async function draft(): Promise<WidgetDocument> {
 	return kept;
 }
 
+async function standing(kind: string): Promise<number> {
+	return (await draft()).blocks.filter((block) => block.kind === kind).length;
+}
+
 const COPY = [
 	'Cold hydrogen gives off a faint radio wave. It does so rarely: one atom waits for millions of years before it sends a single wave, and only because there is so much of it between the stars do we hear anything. Every such wave leaves with the same frequency, which is why a receiver can be set to wait for it.',
 	'On its way the wave is stretched, since space itself grows while it travels. A wave that set out early has been stretched more than one that set out late. Whoever knows the frequency it left with, and reads the frequency it arrives with, knows by how much space has grown meanwhile, and so how long ago it left.',
@@ -223,9 +227,10 @@ describe('a piece by keyboard alone', { timeout: 300_000 }, () => {
 		await reach(/^Make the control/);
 		await press('Enter');
 		await expect.poll(focused, SOON).toBe('Manuscript');
-		const { controls, blocks } = await draft();
-		expect(controls.map(({ kind }) => kind).sort()).toEqual(['choice', 'number', 'slider']);
-		expect(blocks.filter(({ kind }) => kind === 'control')).toHaveLength(3);
+		await expect
+			.poll(async () => (await draft()).controls.map(({ kind }) => kind).sort(), SOON)
+			.toEqual(['choice', 'number', 'slider']);
+		expect(await standing('control')).toBe(3);
 	});
 
 	test('twelve numbers are tied, printed live or named as no claim', async () => {
@@ -238,7 +243,7 @@ describe('a piece by keyboard alone', { timeout: 300_000 }, () => {
 		);
 		await type('it has grown 21 times as long, or roughly 20.8 times. ');
 		await type(
-			'A receiver waits at 68.1 megahertz, with an antenna of 4.4 metres, 2.2 metres a side. '
+			'A receiver waits at 68.1 megahertz, then at 0.0682 gigahertz, since the crests came 20.9 times as far apart, not 20.7 times. '
 		);
 		await type('The wave itself has 3 names.');
 		const numbers = page.locator('.copy .number-unweighed');
@@ -247,11 +252,10 @@ describe('a piece by keyboard alone', { timeout: 300_000 }, () => {
 		for (let each = 0; (await numbers.count()) > 0 && each < 20; each += 1) {
 			await tieNext(/Tie\s+(3|millions of years|one day)\s/);
 		}
-		const { claims } = await draft();
-		expect(claims.length).toBeGreaterThanOrEqual(12);
+		await expect.poll(async () => (await draft()).claims.length, SOON).toBeGreaterThanOrEqual(12);
 	});
 
-	test('two charts, a table, a question and the sources are put in', async () => {
+	test('two charts are put in', async () => {
 		await toTheEnd();
 		await press('Enter');
 		await insert('chart: line');
@@ -266,13 +270,12 @@ describe('a piece by keyboard alone', { timeout: 300_000 }, () => {
 		await reach(/^Put the chart in/);
 		await press('Enter');
 		await expect.poll(focused, SOON).toBe('Manuscript');
-		const { blocks } = await draft();
-		expect(blocks.filter(({ kind }) => kind === 'chart')).toHaveLength(2);
+		await expect.poll(() => standing('chart'), SOON).toBe(2);
 	});
 
 	test('a picture is placed with its caption', async () => {
 		await insert('picture');
-		await reach(/dipole/);
+		await reach(/^dipole/);
 		await press('Enter');
 		await reach(/^Place it in the copy/);
 		await press('Enter');
@@ -280,8 +283,9 @@ describe('a piece by keyboard alone', { timeout: 300_000 }, () => {
 		await reach(/^Put the picture in/);
 		await press('Enter');
 		await expect.poll(focused, SOON).toBe('Manuscript');
-		const placed = (await draft()).blocks.find(({ kind }) => kind === 'picture');
-		expect(placed).toMatchObject({ caption: 'A simple antenna hears the whole sky at once.' });
+		await expect
+			.poll(async () => (await draft()).blocks.find(({ kind }) => kind === 'picture'), SOON)
+			.toMatchObject({ caption: 'A simple antenna hears the whole sky at once.' });
 	});
 
 	test('a block moves by key, and undo brings it back', async () => {

@@ -188,8 +188,27 @@ describe('the constants', () => {
 		await page.getByRole('link', { name: EDITION_IN_USE, exact: true }).click();
 		await page.getByRole('heading', { level: 1, name: `Constants ${EDITION_IN_USE}` }).waitFor();
 		const row = page.getByRole('row', { name: /^Newtonian constant of gravitation/ });
-		expect(await row.innerText()).toMatch(/6\.6743\s×\s10⁻¹¹\s+1\.5\s×\s10⁻¹⁵/);
+		expect(await row.innerText()).toMatch(/6\.674\s30\(15\)\s×\s10⁻¹¹\s.*2\.2\s×\s10⁻⁵/s);
 		expect(await row.getByRole('link').getAttribute('href')).toMatch(/^https:\/\/doi\.org\/10\./);
+	});
+
+	test('the other edition stands beside it, and what differs is told value by value', async () => {
+		await open('/calculators');
+		await page.getByRole('link', { name: '2026.2', exact: true }).click();
+		await page.getByRole('heading', { level: 1, name: 'Constants 2026.2' }).waitFor();
+		const differences = page.getByRole('region', { name: 'What differs from 2026.1' });
+		const rows = differences.locator('tbody tr');
+		expect(await rows.count()).toBe(7);
+		expect(await rows.filter({ hasText: 'electron mass' }).innerText()).toMatch(
+			/9\.109\s383\s7139\(28\)\s×\s10⁻³¹\s+9\.109\s383\s7015\(28\)\s×\s10⁻³¹\s+kg\s+\+1\.4\s×\s10⁻⁹\s+\+4\.4/
+		);
+		const nature = page.getByRole('region', { name: 'Constants of nature' });
+		const row = nature.getByRole('row', { name: /^electron mass/ });
+		expect(await row.getByRole('link').getAttribute('href')).toBe(
+			'https://doi.org/10.1103/RevModPhys.97.025002'
+		);
+		await page.getByRole('link', { name: 'How fast a gas moves' }).last().click();
+		await page.getByRole('heading', { level: 1, name: 'How fast a gas moves' }).waitFor();
 	});
 });
 
@@ -202,7 +221,8 @@ describe('the room holds at every width, light and dark', () => {
 				'/calculators',
 				'/calculators/cosmo.at_z',
 				'/calculators/unc.power',
-				`/calculators/constants/${EDITION_IN_USE}`
+				`/calculators/constants/${EDITION_IN_USE}`,
+				'/calculators/constants/2026.2'
 			]) {
 				if (path.endsWith('at_z')) await openPlot('cosmo.at_z');
 				else await open(path);

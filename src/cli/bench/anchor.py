@@ -38,6 +38,7 @@ def everything(z):
 
 
 def new_universe(share):
+    # H0 is one number to astropy: there is no array of universes.
     cosmology = FlatLambdaCDM(H0=60 + 20 * share, Om0=0.3, Tcmb0=2.7255, Neff=3.046)
     return cosmology.luminosity_distance(1).value
 
@@ -120,7 +121,7 @@ CELLS = {
     "cosmo.at_z": lambda s: everything(redshift(s)),
     "distance": lambda s: Planck18.luminosity_distance(redshift(s)).value,
     "cosmo.at_z, new universe": new_universe,
-    "cosmo.inverse": lambda s: float(z_at_value(Planck18.age, (0.5 + 12 * s) * u.Gyr)),
+    "cosmo.inverse": lambda s: z_at_value(Planck18.age, (0.5 + 12 * s) * u.Gyr).value,
     "cosmo.age_diff": lambda s: (Planck18.age(redshift(s)) - Planck18.age(20)).to_value(u.Myr),
     "blackbody.planck": glow,
     "blackbody.total": glow_in_all,

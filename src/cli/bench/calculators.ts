@@ -4,7 +4,7 @@ import { thermalHistory } from '../../lib/physics/calculators/thermal/history.ts
 import { findPython, HOW_TO_INSTALL } from '../python.ts';
 import { say } from '../set-up/say.mjs';
 import { startAnchor, type Anchor } from './anchor.ts';
-import { curves, scalars, type Cell } from './astronomy.ts';
+import { cells, POINTS, type Cell } from './astronomy.ts';
 import { formulaMatches } from './formulas.ts';
 import {
 	processorSeconds,
@@ -29,7 +29,6 @@ interface Pace {
 }
 
 const AIMS = { scalar: 10, curve: 20, byHand: 0.5 };
-const POINTS = 1000;
 const THERMAL_AIM_MS = 10;
 /** Cells whose two sides are compared before they race. */
 const CHECKED = 5;
@@ -48,55 +47,76 @@ async function againstAstropy(pace: Pace): Promise<Measured[]> {
 	const anchor = startAnchor(python);
 	try {
 		say('\nOne value, as often as can be, against astropy (aim: 10 times as often)');
-		const one = await race(anchor, scalars, pace, AIMS.scalar, ({ name }) => name, once);
-		say(`\nA curve of ${POINTS} points, against one array call of astropy (aim: 20 times)`);
-		const many = await race(anchor, curves, pace, AIMS.curve, ({ name }) => `curve ${name}`, curve);
+		const one = await race(anchor, cells.map(once), pace, AIMS.scalar);
+		say(
+			`\nA curve of ${POINTS} points, against astropy’s arithmetic on one array of them (aim: 20 times)\n` +
+				'  Both sides give columns of numbers; our warnings and refusals are told on asking.'
+		);
+		const many = await race(anchor, cells.flatMap(curve), pace, AIMS.curve);
 		return [...one, ...many];
 	} finally {
 		anchor.close();
 	}
 }
 
-const once =
-	({ at }: Cell) =>
-	(index: number) =>
-		at((index % POINTS) / POINTS);
+/** One line of the table: what is raced, and answers to compare first. */
+interface Heat extends Pick<Cell, 'says' | 'within'> {
+	/** The anchor’s name of the work. */
+	name: string;
+	work(index: number): number;
+	/** The first answers. */
+	answers(): ArrayLike<number>;
+}
 
-const curve =
-	({ at }: Cell) =>
-	() => {
-		let sum = 0;
-		for (let i = 0; i < POINTS; i += 1) sum += at(i / POINTS);
-		return sum;
+function once({ name, says, within, at }: Cell): Heat {
+	return {
+		name,
+		says,
+		within,
+		work: (index) => at((index % POINTS) / POINTS),
+		answers: () => Array.from({ length: CHECKED }, (_, index) => at(index / POINTS))
 	};
+}
+
+function curve({ name, says, within, curve: whole }: Cell): Heat[] {
+	if (!whole) return [];
+	return [
+		{
+			name: `curve ${name}`,
+			says,
+			within,
+			work: (index) => whole()[index % POINTS]!,
+			answers: whole
+		}
+	];
+}
 
 async function race(
 	anchor: Anchor,
-	cells: readonly Cell[],
+	heats: readonly Heat[],
 	pace: Pace,
-	aim: number,
-	nameOf: (cell: Cell) => string,
-	workOf: (cell: Cell) => (index: number) => number
+	aim: number
 ): Promise<Measured[]> {
 	const measured: Measured[] = [];
-	for (const cell of cells) {
-		const name = nameOf(cell);
-		await refuseWrong(anchor, cell, name);
+	for (const heat of heats) {
+		const { name, says, work } = heat;
+		await refuseWrong(anchor, heat);
 		const { ratios, rates } = await takeTurns(
-			repeating(workOf(cell)),
+			repeating(work),
 			{ astropy: anchor.contestant(name) },
 			pace
 		);
-		measured.push(tell(name, cell.says, 'astropy', ratios.astropy!, rates.ours!, aim));
+		measured.push(tell(name, says, 'astropy', ratios.astropy!, rates.ours!, aim));
 	}
 	return measured;
 }
 
 /** A wrong answer may not win by being quick. */
-async function refuseWrong(anchor: Anchor, { at, within }: Cell, name: string): Promise<void> {
+async function refuseWrong(anchor: Anchor, { name, within, answers }: Heat): Promise<void> {
 	const theirs = await anchor.values(name, CHECKED);
+	const ours = answers();
 	theirs.forEach((value, index) => {
-		const own = at(index / POINTS);
+		const own = ours[index]!;
 		if (!(Math.abs(own - value) <= within * Math.abs(value))) {
 			throw new Error(`${name} at input ${index}: ${own} here, ${value} by astropy.`);
 		}

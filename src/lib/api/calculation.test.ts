@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { catalogue } from '../physics/calculators/index.ts';
 import { calculate, describeCalculators } from './calculation.ts';
 
 describe('calculate', () => {
@@ -10,6 +11,16 @@ describe('calculate', () => {
 			},
 			warnings: [],
 			validity: 'ok'
+		});
+	});
+
+	test('a refusal names the input in words, and its key beside them', () => {
+		expect(calculate({ calculator: 'line.band', inputs: {} })).toEqual({
+			refused: {
+				code: 'missing-input',
+				message: expect.stringMatching(/^Wavelength.* is missing\. Give it a value\.$/),
+				input: 'wavelength_nm'
+			}
 		});
 	});
 
@@ -28,6 +39,31 @@ describe('calculate', () => {
 	])('%o is refused as %s', (request, code) => {
 		expect(calculate(request)).toMatchObject({
 			refused: { code, message: expect.stringMatching(/[.?]$/) }
+		});
+	});
+});
+
+describe('what a house offers', () => {
+	const withheld = (id: string) =>
+		id === 'house.draft' ? { code: 'calculator-not-vetted', message: 'Not signed yet.' } : null;
+	const offered = { calculators: new Map([['line.band', catalogue.get('line.band')!]]), withheld };
+
+	test('is run; what is there and isn’t offered says why; the rest isn’t known', () => {
+		const run = (calculator: string) =>
+			calculate({ calculator, inputs: { wavelength_nm: 550 } }, offered);
+		expect(run('line.band')).toMatchObject({ outputs: { band: { value: 'visible' } } });
+		expect(run('house.draft')).toEqual({
+			refused: { code: 'calculator-not-vetted', message: 'Not signed yet.' }
+		});
+		expect(run('cosmo.at_z')).toMatchObject({ refused: { code: 'unknown-calculator' } });
+	});
+
+	test('without a house, one of a house’s own is told where to ask', () => {
+		expect(calculate({ calculator: 'house.sound-in-air', inputs: {} })).toMatchObject({
+			refused: {
+				code: 'calculator-of-a-house',
+				message: expect.stringContaining('POST /api/v1/calculators/house.sound-in-air')
+			}
 		});
 	});
 });

@@ -5,6 +5,7 @@
 import {
 	type Calculator,
 	type CalculatorDefinition,
+	type CalculatorSet,
 	type InputSpec,
 	type Refusal,
 	type DrawnSpread,
@@ -39,6 +40,14 @@ export interface AnsweredReading {
 	drawn?: DrawnSpread;
 }
 
+export interface Refused {
+	code: string;
+	/** Names inputs as people do. */
+	message: string;
+	/** Key of the input that caused it, where one did. */
+	input?: string;
+}
+
 export type CalculationAnswer =
 	| {
 			outputs: Record<string, AnsweredReading>;
@@ -47,10 +56,32 @@ export type CalculationAnswer =
 			/** Present only when a declared output has no value for these inputs. */
 			withheld?: Record<string, { code: string; message: string }>;
 	  }
-	| { refused: { code: string; message: string } };
+	| { refused: Refused };
+
+/** What may be run here. */
+export interface OfferedCalculators {
+	calculators: CalculatorSet;
+	/** Why a calculator that is there isn't run; null for one that isn't there at all. */
+	withheld(id: string): { code: string; message: string } | null;
+}
+
+/** Without a house: what comes with the software. */
+const SOFTWARE: OfferedCalculators = {
+	calculators: catalogue,
+	withheld: (id) =>
+		id.startsWith(HOUSE_PREFIX)
+			? {
+					code: 'calculator-of-a-house',
+					message: `“${id.slice(0, 60)}” belongs to a house, and this command knows none. Ask the house: POST /api/v1/calculators/${encodeURIComponent(id.slice(0, 60))}.`
+				}
+			: null
+};
 
 /** Runs one request of any shape. Never throws on what was sent. */
-export function calculate(request: unknown): CalculationAnswer {
+export function calculate(
+	request: unknown,
+	{ calculators, withheld }: OfferedCalculators = SOFTWARE
+): CalculationAnswer {
 	if (!isRecord(request)) {
 		return refused('request-broken', 'A calculation is an object with “calculator” and “inputs”.');
 	}
@@ -68,12 +99,14 @@ export function calculate(request: unknown): CalculationAnswer {
 			'“calculator” is missing. Give the id of one, such as “cosmo.at_z”.'
 		);
 	}
-	const calculator = catalogue.get(id);
+	const calculator = calculators.get(id);
 	if (!calculator) {
-		const near = nearestOf(id, [...catalogue.keys()]);
+		const why = withheld(id);
+		if (why) return { refused: why };
+		const near = nearestOf(id, [...calculators.keys()]);
 		const hint = near
 			? `Did you mean “${near}”?`
-			: `There are ${[...catalogue.keys()].join(', ')}.`;
+			: `There are ${[...calculators.keys()].join(', ')}.`;
 		return refused('unknown-calculator', `There is no calculator “${id.slice(0, 60)}”. ${hint}`);
 	}
 	if (!isRecord(inputs)) {
@@ -99,6 +132,9 @@ export function calculate(request: unknown): CalculationAnswer {
 	);
 }
 
+/** Ids of calculators that a house added start with it. */
+const HOUSE_PREFIX = 'house.';
+
 const MEMBERS = ['calculator', 'inputs', 'uncertainties', 'correlations'];
 
 function uncertainAnswerOf(result: Result): CalculationAnswer {
@@ -121,7 +157,10 @@ function uncertainAnswerOf(result: Result): CalculationAnswer {
 
 /** A result as the public sees it: values and units, without the bench's bookkeeping. */
 export function answerOf(result: Result): CalculationAnswer {
-	if (!result.ok) return refused(result.refusal.code, result.refusal.message);
+	if (!result.ok) {
+		const { code, message, input } = result.refusal;
+		return { refused: { code, message, ...(input === undefined ? {} : { input }) } };
+	}
 	const outputs = Object.fromEntries(
 		Object.entries(result.outputs).map(([key, { value, unit }]) => [key, { value, unit }])
 	);
@@ -135,17 +174,20 @@ export function answerOf(result: Result): CalculationAnswer {
 
 export type InputDescription = InputSpec & { sets?: object; parameters?: object };
 
-export type CalculatorDescription = Omit<CalculatorDefinition, 'compute' | 'inputs'> & {
+export type CalculatorDescription = Omit<CalculatorDefinition, 'compute' | 'curve' | 'inputs'> & {
 	inputs: Record<string, InputDescription>;
 };
 
 /** Every calculator as plain JSON: ids, inputs, outputs, units, ranges, equations, sources and checks. */
-export function describeCalculators(): CalculatorDescription[] {
-	return [...catalogue.values()].map(describeCalculator);
+export function describeCalculators(
+	calculators: CalculatorSet = catalogue
+): CalculatorDescription[] {
+	return [...calculators.values()].map(describeCalculator);
 }
 
 export function describeCalculator({
 	compute: _compute,
+	curve: _curve,
 	inputs,
 	...rest
 }: Calculator): CalculatorDescription {

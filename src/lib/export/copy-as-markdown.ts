@@ -166,7 +166,7 @@ function footnote(
 	const { claim, words } = place;
 	const weighing = weighingOf(worked.document, worked.evaluation, claim, words, worked.calculators);
 	const reads = weighing
-		? `reads ${readsInWords(weighing.stated, weighing.reading, document.language)}`
+		? `reads ${readsInWords(weighing.stated, weighing.reading, worked.document.language)}`
 		: 'no reading';
 	const told = verdict ? `${VERDICT_WORDS[verdict.verdict]}. ${verdict.reason}` : 'not weighed.';
 	return `[^${notes.get(claim.id) ?? 0}]: ${inLine(`${words}: ${reads}; ${told}`)}`;

@@ -125,6 +125,12 @@ export const WithdrawCalculator = z.object({
 });
 export type WithdrawCalculator = z.infer<typeof WithdrawCalculator>;
 
+export const RetestCalculator = z.object({
+	...revisionOf,
+	note: needed(240, 'Say why it may be tested again.')
+});
+export type RetestCalculator = z.infer<typeof RetestCalculator>;
+
 /** From the form to what physics settles: what was left empty isn't there. */
 export function draftOf(
 	card: HouseCard,

@@ -3,6 +3,7 @@
  * read the same limits. `runCalculator` is the one way to get a reading; it never throws on bad input.
  */
 import { unitOf } from './units/units.ts';
+import type { ConstantsEdition } from './constants/index.ts';
 import type { QuantityKind } from './units/quantities.ts';
 
 /** A published work. `fromMemory` marks one that was recalled and not read again. */
@@ -175,11 +176,14 @@ export interface CheckValue {
 	output: string;
 	/** Multiply the output by this to get the published unit. */
 	outputScale: number;
-	published: number;
+	/** Words where the output is words. */
+	published: number | string;
 	tolerance: number;
 	unit: string;
 	source: string;
 	verification: string;
+	/** True where nobody printed the value: it was worked with another method, which `verification` names. */
+	computed?: true;
 }
 
 export type RawInputs = Record<string, unknown>;
@@ -195,8 +199,11 @@ export type Computed =
 	| {
 			ok: true;
 			values: Record<string, number | string>;
-			/** Given the inputs as exact. An output that isn't named here has no known uncertainty. */
-			uncertainties?: Record<string, Uncertainty>;
+			/**
+			 * Given the inputs as exact: `exact` where no formula holds a measured constant, or by output. One that isn't named
+			 * has no known uncertainty.
+			 */
+			uncertainties?: 'exact' | Record<string, Uncertainty>;
 			/** Codes of declared warnings that apply. */
 			warnings?: string[];
 			withheld?: Record<string, Refusal>;
@@ -230,7 +237,26 @@ export interface CalculatorDefinition {
 	sources: Source[];
 	checks: CheckValue[];
 	history: { revision: string; date: string; change: string }[];
-	compute(inputs: CheckedInputs): Computed;
+	/**
+	 * Whether `compute` rests on constants that adjustments move; one that doesn't is the same in every edition. What is
+	 * taken when the file is loaded must not move (`constants.test.ts` keeps watch).
+	 */
+	followsEdition?: true;
+	/** With the edition in use, unless another one is given: see `calculators/in-edition.ts`. */
+	compute(inputs: CheckedInputs, edition?: ConstantsEdition): Computed;
+	/**
+	 * A quick way for lines of many points, which plain arithmetic may have: the numbers of `compute`, bit for bit, at many
+	 * places of the input `key`, with the warnings that hold everywhere; null where it has none for that input. Only for a
+	 * `compute` that neither refuses nor withholds. Places outside the input's limits are among them; what comes out there
+	 * is thrown away.
+	 */
+	curve?(inputs: CheckedInputs, key: string, places: Float64Array): Curve | null;
+}
+
+export interface Curve {
+	/** By output, in the order of the places. */
+	columns: Record<string, Float64Array>;
+	warnings?: readonly string[];
 }
 
 export type Calculator = Readonly<CalculatorDefinition>;

@@ -57,6 +57,7 @@ export function evaluateUncertainty(
 	if ('setting' in ref) return ofSetting(document, evaluation, ref, calculators, { draws });
 
 	const upstream = {
+		constants: document.constants,
 		formulas: document.formulas,
 		controls: document.controls,
 		steps: wiringOf(document.steps, ref).steps

@@ -16,7 +16,9 @@ import {
 	type Result,
 	type Uncertainty
 } from '../physics/calculator.ts';
+import { inEdition } from '../physics/calculators/in-edition.ts';
 import { runCalculator } from '../physics/calculators/run.ts';
+import { constants, edition } from '../physics/constants/index.ts';
 import type { QuantityKind } from '../physics/units/quantities.ts';
 import { commensurable, convertQuantity } from '../physics/units/units.ts';
 import { hasOptions } from './control-kind.ts';
@@ -42,7 +44,9 @@ export interface Evaluation {
 
 export type ReadingOutcome = { ok: true; reading: Reading } | { ok: false; refusal: Refusal };
 
-export type Wired = Pick<WidgetDocument, 'formulas' | 'steps' | 'controls'>;
+/** Without an edition the constants in use hold. */
+export type Wired = Pick<WidgetDocument, 'formulas' | 'steps' | 'controls'> &
+	Partial<Pick<WidgetDocument, 'constants'>>;
 
 /** Works one step on inputs that its settings came to; `evaluateUncertainty` puts its own in place of the plain one. */
 export type RunStep = (
@@ -87,9 +91,9 @@ function evaluateStep(
 	calculators: CalculatorSet,
 	run: RunStep
 ): Result {
-	const calculator = calculators.get(step.calculator);
-	if (!calculator)
-		return refuse('unknown-calculator', `There is no calculator “${step.calculator}”.`);
+	const offered = calculators.get(step.calculator);
+	if (!offered) return refuse('unknown-calculator', `There is no calculator “${step.calculator}”.`);
+	const calculator = inEdition(offered, edition(document.constants ?? '') ?? constants);
 
 	const inputs: RawInputs = {};
 	const uncertainties: Record<string, Uncertainty> = {};
@@ -271,6 +275,7 @@ export function sampleChart(
 	const along = xValues(control.min, control.max, chart.x.scale === 'log', points);
 	return chart.series.map(({ reading }) => {
 		const upstream = {
+			constants: document.constants,
 			formulas: document.formulas,
 			controls: document.controls,
 			steps: wiringOf(document.steps, reading).steps

@@ -1,6 +1,6 @@
 /** What a piece's own formulas lack before a proof can be pulled: use, and published values that they reproduce. */
 import type { CalculatorSet } from '../physics/calculator.ts';
-import { checkRows } from '../physics/calculators/check-rows.ts';
+import { checkRows } from '../physics/check-values.ts';
 import { CHECKS_NEEDED } from '../physics/house/definition.ts';
 import type { WidgetDocument } from './document.ts';
 import type { Finding } from './findings.ts';
@@ -59,8 +59,8 @@ function disagreements(
 		.filter(({ agrees }) => !agrees)
 		.map(({ check, reads, refusal }) => ({
 			code: 'formula-check-disagrees',
-			says: `The formula “${title}” doesn’t reproduce ${plainDecimal(check.published)} (${check.source}): ${
-				reads === null ? refusal : `it gives ${plainDecimal(Number(reads.toPrecision(8)))}`
+			says: `The formula “${title}” doesn’t reproduce ${plainDecimal(Number(check.published))} (${check.source}): ${
+				reads === null ? refusal : `it gives ${plainDecimal(Number(Number(reads).toPrecision(8)))}`
 			}. Look at the formula, at the units, and at what was printed.`,
 			at
 		}));

@@ -1,10 +1,13 @@
 import { expect, test } from 'vitest';
 import { denial, type Actor } from './permissions.ts';
 import {
+	checksAgree,
 	compareRevisions,
+	mayAnswerDifferently,
 	mayBecome,
 	mayCompose,
 	mayPublish,
+	mayRetest,
 	raised,
 	requireStep,
 	vettingOf,
@@ -85,4 +88,29 @@ test('revisions rise by what changed, and compare as numbers', () => {
 		'1.10.0',
 		'2.0.0'
 	]);
+});
+
+test('the record says of the check values what is true', () => {
+	const computed = { computed: true as const };
+	expect(checksAgree([{}])).toBe('1 check value agrees.');
+	expect(checksAgree([{}, {}])).toBe('2 check values agree.');
+	expect(checksAgree([{}, computed])).toBe(
+		'2 check values agree, 1 of them worked with an independent method.'
+	);
+	expect(checksAgree([computed, computed])).toBe(
+		'2 check values agree, worked with an independent method.'
+	);
+	expect(checksAgree([])).toMatch(/^It has no check value of its own/);
+});
+
+test('only a withdrawn calculator of the software is tested again', () => {
+	const may = VETTING_STATES.flatMap((state) =>
+		[true, false].filter((house) => mayRetest({ state, house })).map((house) => [state, house])
+	);
+	expect(may).toEqual([['withdrawn', false]]);
+});
+
+test('a major step may change answers', () => {
+	expect(mayAnswerDifferently('1.4.2', '2.0.0')).toBe(true);
+	expect(mayAnswerDifferently('1.4.2', '1.5.0')).toBe(false);
 });

@@ -23,6 +23,14 @@ export function mayBecome(from: VettingState | 'new', to: VettingState): boolean
 	return NEXT[from].includes(to);
 }
 
+/**
+ * A calculator of the software can't be revised here, so what was withdrawn of it may be put to the test again, and then
+ * takes a second scientist like anything tested. One of the house's own is revised instead.
+ */
+export function mayRetest({ state, house }: Pick<VettingView, 'state' | 'house'>): boolean {
+	return state === 'withdrawn' && !house;
+}
+
 /** Throws `vetting-out-of-order`, saying where the revision stands. */
 export function requireStep(from: VettingState | 'new', to: VettingState): void {
 	if (!mayBecome(from, to)) throw new SteelyardError('vetting-out-of-order', { from, to });
@@ -91,6 +99,17 @@ export function vettingOf(
 	};
 }
 
+/** What a record of vetting says of the check values that were run: 'computed' ones are nobody's publication. */
+export function checksAgree(checks: readonly { computed?: true }[]): string {
+	if (checks.length === 0)
+		return 'It has no check value of its own; the software’s tests compare it with reference values.';
+	const computed = checks.filter((check) => check.computed).length;
+	const all = checks.length === 1 ? '1 check value agrees' : `${checks.length} check values agree`;
+	if (computed === 0) return `${all}.`;
+	const of = computed === checks.length ? '' : `${computed} of them `;
+	return `${all}, ${of}worked with an independent method.`;
+}
+
 /** The three kinds of change, smallest first. */
 export const CHANGES = ['patch', 'minor', 'major'] as const;
 export type Change = (typeof CHANGES)[number];
@@ -112,6 +131,11 @@ export function raised(revision: string, change: Change): string {
 export function compareRevisions(a: string, b: string): number {
 	const [first, second] = [numbersOf(a), numbersOf(b)];
 	return first[0] - second[0] || first[1] - second[1] || first[2] - second[2];
+}
+
+/** False between revisions of which only words, or one output more, differ: what a piece shows stays as it is. */
+export function mayAnswerDifferently(a: string, b: string): boolean {
+	return numbersOf(a)[0] !== numbersOf(b)[0];
 }
 
 function numbersOf(revision: string): [number, number, number] {

@@ -60,6 +60,7 @@ export function freshFields(kind: FormKind, bench: Bench): Fresh {
 				? fresh('equation', { step: step.id, equation: 0, values: [], caption: '' })
 				: first('An equation is a calculator’s own. Hang a calculator on the bench first.');
 		}
+		default: // the rest shows readings
 	}
 	if (!reading) return first('This shows readings. Hang a calculator on the bench first.');
 	const unit = unitOfReading(reading);

@@ -1,6 +1,6 @@
 /** How far a formula of the draft is trusted. */
 import type { CalculatorSet } from '../../physics/calculator.ts';
-import { checkRows } from '../../physics/calculators/check-rows.ts';
+import { checkRows } from '../../physics/check-values.ts';
 import { CHECKS_NEEDED } from '../../physics/house/definition.ts';
 import type { FormulaStep } from '../../widget/document.ts';
 import { formulaDigest } from '../../widget/formula-definition.ts';

@@ -35,11 +35,11 @@ export function spokenLines(root: HTMLElement, parts: Parts): SpokenLine[] {
 function lineOf(element: Element): string | null {
 	const heading = /^H([1-6])$/.exec(element.tagName);
 	if (heading) return `Heading level ${heading[1]}. ${wordsOf(element)}`;
-	if (element.matches('label:has(+ *), label[for], legend')) {
-		// Said with the control it names.
-		return element.closest('.sy-control, .sy-choice-plate') ? '' : null;
-	}
-	if (element.matches('label')) return lineOfLabelled(element);
+	const radio = element.matches('label') ? lineOfRadio(element) : null;
+	if (radio !== null) return radio;
+	if (element.matches('.sy-control legend')) return `${wordsOf(element)}, choices`;
+	// Said with the control that it names.
+	if (element.matches('.sy-control .sy-control-label')) return '';
 	if (element.matches('[role="img"]')) {
 		const words = describedBy(element);
 		return `Picture: ${element.getAttribute('aria-label') ?? ''}. ${words}`;
@@ -57,7 +57,7 @@ function lineOf(element: Element): string | null {
 	return null;
 }
 
-function lineOfLabelled(label: Element): string | null {
+function lineOfRadio(label: Element): string | null {
 	const field = label.querySelector('input');
 	if (field?.type !== 'radio') return null;
 	return `${wordsOf(label)}, choice${field.checked ? ', chosen' : ''}`;
@@ -71,7 +71,7 @@ function lineOfField(field: HTMLInputElement | HTMLSelectElement): string {
 		return `${name}, ${field.getAttribute('aria-valuetext') ?? field.value}, slider`;
 	if (field.type === 'checkbox')
 		return `${name}, switch, ${field.checked ? 'on' : 'off'}. ${describedBy(field)}`;
-	return `${name}, ${field.value}, field. ${describedBy(field)}`;
+	return [`${name}, ${field.value}, field`, describedBy(field)].filter(Boolean).join('. ');
 }
 
 /** A closed fold says that it is one; the galley adds the head of the table in it. */

@@ -1,8 +1,15 @@
 /**
- * Published values that the calculators must reproduce, each with where it was printed and how far that was verified.
- * A calculator shows its own on its page; the tests weigh them all.
+ * Values that the calculators must reproduce: published ones, each with where it was printed and how far that was
+ * verified; and where fewer than three were found, ones worked with another method, which say so. A calculator shows its
+ * own on its page; the tests weigh them all.
  */
 import type { CheckValue } from '../calculator.ts';
+import { computedHereChecks } from './checks/computed-here.ts';
+import { computedSkyChecks } from './checks/computed-sky.ts';
+import { lightChecks } from './checks/light.ts';
+import { matterChecks } from './checks/matter.ts';
+import { motionChecks } from './checks/motion.ts';
+import { skyChecks } from './checks/sky.ts';
 import { CLOSED_FORM_CHECKS } from './published-checks-closed-forms.ts';
 
 const PUBLISHED: Record<string, CheckValue[]> = {
@@ -58,7 +65,7 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 		},
 		{
 			id: 'chk-05',
-			statement: 'Age now in the worked example H0=71, Om=0.27, flat',
+			statement: 'Age now in the worked example H₀ = 71, Ωₘ = 0.27, flat',
 			inputs: { cosmology: { H0: 71, Om0: 0.27, Tcmb0: 2.72528, Neff: 3.04, m_nu: [0] }, z: 0 },
 			output: 'age',
 			outputScale: 1,
@@ -70,26 +77,27 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 		},
 		{
 			id: 'chk-06',
-			statement: 'Einstein-de Sitter age = 2/(3 H0), H0=50',
+			statement: 'Matter alone (Einstein and de Sitter), H₀ = 50: age 2/(3H₀)',
 			inputs: { cosmology: { H0: 50, Om0: 1 }, z: 0 },
 			output: 'age',
 			outputScale: 1,
 			published: 13.037,
 			tolerance: 0.001,
 			unit: 'Gyr',
-			source: 'closed form, Hogg 1999 astro-ph/9905116',
+			source: 'the closed form 2/(3H₀), Hogg 1999, astro-ph/9905116',
 			verification: 'verified: closed form'
 		},
 		{
 			id: 'chk-07',
-			statement: 'Comoving distance to last scattering z=1089.8',
+			statement: 'Comoving distance to last scattering, z = 1089.8',
 			inputs: { cosmology: { set: 'Planck18' }, z: 1089.8 },
 			output: 'comoving_distance',
 			outputScale: 0.001,
 			published: 13.87,
 			tolerance: 0.03,
 			unit: 'Gpc',
-			source: 'Planck 2018 VI Table 2: r*=144.57 Mpc, 100theta*=1.04119 give 13.885 Gpc',
+			source:
+				'Planck Collaboration 2018 VI, Table 2: r* = 144.57 Mpc and 100 θ* = 1.04119 give 13.885 Gpc',
 			verification: 'from memory'
 		},
 		{
@@ -101,19 +109,19 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 			published: 0.38,
 			tolerance: 0.01,
 			unit: 'Myr',
-			source: '“about 380,000 years”, e.g. Planck 2013 I',
+			source: 'Planck Collaboration 2013 I: “about 380 000 years”',
 			verification: 'from memory'
 		},
 		{
 			id: 'chk-09',
-			statement: 'Age at Planck 2018 reionisation redshift z=7.82',
+			statement: 'Age at the redshift of reionisation, 7.82',
 			inputs: { cosmology: { set: 'Planck18' }, z: 7.82 },
 			output: 'age',
 			outputScale: 1,
 			published: 0.66,
 			tolerance: 0.1,
 			unit: 'Gyr',
-			source: 'Planck 2018 VI Table 2, z_re=7.82+-0.71',
+			source: 'Planck Collaboration 2018 VI, Table 2: 7.82 ± 0.71',
 			verification: 'verified: astropy meta z_reion (age computed)'
 		},
 		{
@@ -154,26 +162,26 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 		},
 		{
 			id: 'chk-13',
-			statement: 'Hubble time for H0=67.66',
+			statement: 'Hubble time for H₀ = 67.66',
 			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
 			output: 'hubble_time',
 			outputScale: 1,
 			published: 14.45,
 			tolerance: 0.01,
 			unit: 'Gyr',
-			source: '1/H0',
+			source: 'the definition, 1/H₀',
 			verification: 'verified: closed form'
 		},
 		{
 			id: 'chk-14',
-			statement: 'Critical density today, h=0.6766',
+			statement: 'Critical density today, h = 0.6766',
 			inputs: { cosmology: { set: 'Planck18' }, z: 0 },
 			output: 'critical_density',
 			outputScale: 1,
 			published: 8.6e-27,
 			tolerance: 1e-29,
 			unit: 'kg/m3',
-			source: '3H0^2/8piG (PDG: 1.878e-26 h^2)',
+			source: 'Particle Data Group: 1.878 × 10⁻²⁶ h² kg/m³, from 3H₀²/8πG',
 			verification: 'from memory (PDG prefactor)'
 		}
 	],
@@ -187,7 +195,7 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 			published: 21.106114,
 			tolerance: 1e-6,
 			unit: 'cm',
-			source: 'Hellwig et al. 1970; c/nu',
+			source: 'Hellwig et al. 1970; c/ν',
 			verification: 'from memory'
 		}
 	],
@@ -317,7 +325,19 @@ const PUBLISHED: Record<string, CheckValue[]> = {
 	]
 };
 
-/** The published values a calculator is checked against; none for an id without any. */
+/** Built when they are asked for: a reader's frame asks for none, and carries none. */
+let tables: Record<string, CheckValue[]>[] | null = null;
+
+/** The values a calculator is checked against, published ones first; none for an id without any. */
 export function checksOf(calculatorId: string): CheckValue[] {
-	return PUBLISHED[calculatorId] ?? [];
+	tables ??= [
+		PUBLISHED,
+		lightChecks(),
+		motionChecks(),
+		skyChecks(),
+		matterChecks(),
+		computedSkyChecks(),
+		computedHereChecks()
+	];
+	return tables.flatMap((table) => table[calculatorId] ?? []);
 }

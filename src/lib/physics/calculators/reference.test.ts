@@ -44,8 +44,9 @@ describe('published values', () => {
 	const records = new Map(
 		readReferences<PublishedRecord>('published-checks.json').map((record) => [record.id, record])
 	);
+	/** Those of the table; the ones of checks/ have no second transcription to be held against. */
 	const checks = [...catalogue.values()].flatMap((calculator) =>
-		calculator.checks.map((check) => ({ calculator, check }))
+		calculator.checks.filter(({ id }) => records.has(id)).map((check) => ({ calculator, check }))
 	);
 
 	test('every published value for these calculators is shown by its calculator', () => {
@@ -69,7 +70,7 @@ describe('published values', () => {
 			const result = runCalculator(calculator, check.inputs);
 			if (!result.ok) throw new Error(result.refusal.message);
 			const value = (result.outputs[check.output]?.value as number) * check.outputScale;
-			expect(Math.abs(value - check.published)).toBeLessThanOrEqual(check.tolerance);
+			expect(Math.abs(value - Number(check.published))).toBeLessThanOrEqual(check.tolerance);
 		}
 	);
 });

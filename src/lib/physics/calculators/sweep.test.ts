@@ -2,7 +2,7 @@ import { describe, expect, test } from 'vitest';
 import type { Calculator } from '../calculator.ts';
 import { catalogue } from './index.ts';
 import { runCalculator } from './run.ts';
-import { firstStretch, sweepables, sweepPlaces, sweptPoint } from './sweep.ts';
+import { firstStretch, sweepables, sweepPlaces, sweptPoints } from './sweep.ts';
 
 function calculatorOf(id: string): Calculator {
 	const calculator = catalogue.get(id);
@@ -29,14 +29,15 @@ test('a point is what the calculator reads there', () => {
 	const calculator = calculatorOf('projectile.vacuum');
 	const inputs = { v0_ms: 124.3, angle_deg: 40 };
 	const direct = runCalculator(calculator, { ...inputs, angle_deg: 30 });
-	const point = sweptPoint(calculator, inputs, { input: 'angle_deg', output: 'range' }, 30);
-	expect(direct.ok && point.y === direct.outputs.range?.value).toBe(true);
+	const sweep = { input: 'angle_deg', output: 'range' };
+	const [point] = sweptPoints(calculator, inputs, sweep, [30]);
+	expect(direct.ok && point?.y === direct.outputs.range?.value).toBe(true);
 });
 
 test('outside the domain a point has no reading and says why', () => {
 	const calculator = calculatorOf('cosmo.at_z');
 	const inputs = { cosmology: { set: 'Planck18' }, z: 1 };
-	const point = sweptPoint(calculator, inputs, { input: 'z', output: 'age' }, -2);
+	const [point] = sweptPoints(calculator, inputs, { input: 'z', output: 'age' }, [-2]);
 	expect(point).toMatchObject({ y: null, refusal: expect.stringContaining('must be') });
 });
 
@@ -44,7 +45,7 @@ test('a parameter of a set is swept without touching the others', () => {
 	const calculator = calculatorOf('cosmo.at_z');
 	const inputs = { cosmology: { set: 'Simple', Om0: 0.25 }, z: 0 };
 	const sweep = { input: 'cosmology.H0', output: 'age' };
-	const [slow, fast] = [35, 70].map((H0) => sweptPoint(calculator, inputs, sweep, H0).y);
+	const [slow, fast] = sweptPoints(calculator, inputs, sweep, [35, 70]).map(({ y }) => y);
 	// With no radiation the age goes with 1/H₀ exactly.
 	expect(Number(slow) / Number(fast)).toBeCloseTo(2, 9);
 });

@@ -1,13 +1,7 @@
 /** One output of a calculator against one of its inputs, all other inputs standing still. */
-import {
-	resolveUnit,
-	type Calculator,
-	type NumberInput,
-	type RawInputs,
-	type Result
-} from '../calculator.ts';
+import { resolveUnit, type Calculator, type NumberInput, type RawInputs } from '../calculator.ts';
 import { COSMOLOGY_PARAMETERS } from './cosmology/parameters.ts';
-import { runCalculator } from './run.ts';
+import { sweepCalculator } from './sweep-calculator.ts';
 
 export const SWEEP_POINTS = 200;
 
@@ -92,24 +86,21 @@ export function sweepPlaces(
 	return whole ? [...new Set(places.map(Math.round))] : places;
 }
 
-/** The reading at one place. Refusals and readings that are words have no `y`. */
-export function sweptPoint(
+/** The readings at these places. Refusals and readings that are words have no `y`. */
+export function sweptPoints(
 	calculator: Calculator,
 	inputs: RawInputs,
 	{ input, output }: Pick<Sweep, 'input' | 'output'>,
-	x: number
-): SweptPoint {
-	const [head = input, part] = input.split('.');
-	const value = part === undefined ? x : { ...(inputs[head] as object | undefined), [part]: x };
-	return pointOf(runCalculator(calculator, { ...inputs, [head]: value }), output, x);
-}
-
-function pointOf(result: Result, output: string, x: number): SweptPoint {
-	if (!result.ok) return { x, y: null, refusal: result.refusal.message };
-	const reading = result.outputs[output];
-	const warnings = result.warnings.map(({ message }) => message);
-	const told = warnings.length > 0 ? { warnings } : {};
-	if (typeof reading?.value === 'number') return { x, y: reading.value, ...told };
-	const refusal = result.withheld?.[output]?.message ?? 'This output has no number here.';
-	return { x, y: null, refusal };
+	places: readonly number[]
+): SweptPoint[] {
+	const swept = sweepCalculator(calculator, inputs, input, places);
+	return places.map((x, index) => {
+		const y = swept.columns[output]?.[index] ?? NaN;
+		if (Number.isNaN(y)) {
+			const refusal = swept.refusalAt(index, output)?.message ?? 'This output has no number here.';
+			return { x, y: null, refusal };
+		}
+		const warnings = swept.warningsAt(index).map(({ message }) => message);
+		return { x, y, ...(warnings.length > 0 ? { warnings } : {}) };
+	});
 }

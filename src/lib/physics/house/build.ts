@@ -43,8 +43,20 @@ export function buildHouseCalculator(
 			unit: definition.outputs.find(({ name }) => name === check.output)?.unit ?? ''
 		})),
 		history: definition.history,
-		compute: houseCompute(definition, book)
+		followsEdition: true,
+		compute: computeIn(definition, edition)
 	});
+}
+
+/** Each edition's constants are put into the formulas once. */
+function computeIn(definition: HouseDefinition, own: ConstantsEdition): Calculator['compute'] {
+	const made = new Map<string, ReturnType<typeof houseCompute>>();
+	return (inputs, edition = own) => {
+		let compute = made.get(edition.name);
+		if (!compute)
+			made.set(edition.name, (compute = houseCompute(definition, formulaBook(edition))));
+		return compute(inputs);
+	};
 }
 
 function inputSpec({ name, good, ...rest }: HouseInput): NumberInput {

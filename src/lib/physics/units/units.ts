@@ -55,6 +55,8 @@ function unitFrom(row: UnitRow): Unit {
 	});
 }
 
+const POWERS_OF_TEN: readonly number[] = Array.from({ length: 64 }, (_, decades) => 10 ** decades);
+
 /** Every unit, in the order of the table. */
 export const units: readonly Unit[] = UNIT_TABLE.map(unitFrom);
 
@@ -142,12 +144,24 @@ function scale(value: number, from: Unit, to: Unit): number {
 
 /** value × 10^decades; divides for negative powers, since 10⁻³ is no double and 10³ is. */
 function scaleByTen(value: number, decades: number): number {
-	return decades >= 0 ? value * 10 ** decades : value / 10 ** -decades;
+	return decades >= 0 ? value * powerOfTen(decades) : value / powerOfTen(-decades);
+}
+
+/** Raising to a power takes longer than all the rest of a conversion. */
+function powerOfTen(decades: number): number {
+	return POWERS_OF_TEN[decades] ?? 10 ** decades;
 }
 
 function sameDimension(a: Dimension, b: Dimension): boolean {
-	const bases = new Set([...Object.keys(a), ...Object.keys(b)]) as Set<BaseDimension>;
-	return [...bases].every((base) => (a[base] ?? 0) === (b[base] ?? 0));
+	return a === b || (isWithin(a, b) && isWithin(b, a));
+}
+
+/** Whether every base of one dimension has the same power in the other. */
+function isWithin(one: Dimension, other: Dimension): boolean {
+	for (const base in one) {
+		if ((one[base as BaseDimension] ?? 0) !== (other[base as BaseDimension] ?? 0)) return false;
+	}
+	return true;
 }
 
 /** One letter added, dropped or changed, or two neighbours swapped. */

@@ -6,7 +6,19 @@ import { outbox } from '../db/schema/index.ts';
 export type Mail =
 	| { event: 'sign-in-link'; input: { linkId: string } }
 	| { event: 'query-raised'; input: { slug: string; title: string; by: string; claim: string } }
-	| { event: 'query-answered'; input: { slug: string; title: string; by: string; claim: string } };
+	| { event: 'query-answered'; input: { slug: string; title: string; by: string; claim: string } }
+	| {
+			event: 'calculator-flagged';
+			input: {
+				calculator: string;
+				title: string;
+				revision: string;
+				state: 'withdrawn' | 'superseded';
+				by: string;
+				/** Slugs, with commas between them. */
+				pieces: string;
+			};
+	  };
 
 export interface Addressee {
 	name: string;

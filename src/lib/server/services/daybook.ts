@@ -28,6 +28,7 @@ export type DaybookEvent =
 	| 'picture-recorded'
 	| 'picture-replaced'
 	| 'picture-deleted'
+	| 'calculator-retested'
 	| 'signed-in'
 	| 'signed-out'
 	| 'passphrase-confirmed'

@@ -14,14 +14,13 @@ import { firstLight } from '../demo/first-light.ts';
 import {
 	proposeHouseCalculator,
 	readHouseCalculator,
-	reviseHouseCalculator,
-	vetCalculator,
-	withdrawCalculator
+	reviseHouseCalculator
 } from './house-calculators.ts';
 import { testHouseCalculator, tryHouseCalculator } from './house-test.ts';
 import { passConditions, passProof } from './proofs.ts';
 import { releaseProof } from './releases.ts';
 import { calculatorsOf, readStock } from './stock.ts';
+import { vetCalculator, withdrawCalculator } from './vetting-acts.ts';
 import { listCalculators, readVettings } from './vettings.ts';
 
 const ID = 'house.sound-in-air';

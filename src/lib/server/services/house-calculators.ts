@@ -1,38 +1,30 @@
-/** The house's own calculators: proposed and revised by one scientist, signed by a second, taken out of use with a reason. */
-import { and, eq } from 'drizzle-orm';
+/** The house's own calculators, proposed and revised by a scientist. What becomes of a revision is in vetting-acts.ts. */
+import { eq } from 'drizzle-orm';
 import { SteelyardError } from '../../errors.ts';
 import {
 	draftOf,
 	type ProposeHouseCalculator,
-	type ReviseHouseCalculator,
-	type VetCalculator,
-	type WithdrawCalculator
+	type ReviseHouseCalculator
 } from '../../forms/house-calculator.ts';
 import type { HouseDefinition, HouseDraft } from '../../physics/house/definition.ts';
 import { digestOf } from '../../widget/freeze.ts';
 import { requirePermission } from '../../workflow/permissions.ts';
-import {
-	compareRevisions,
-	mayBecome,
-	raised,
-	requireStep,
-	type VettingState
-} from '../../workflow/vetting.ts';
+import { compareRevisions, raised } from '../../workflow/vetting.ts';
 import type { Context } from '../context.ts';
 import { sqlState, UNIQUE_VIOLATION, type Db } from '../db/client.ts';
-import { houseCalculators, vettings } from '../db/schema/index.ts';
+import { houseCalculators } from '../db/schema/index.ts';
 import { record } from './daybook.ts';
 import { isSmaller, leastChange } from './house-changes.ts';
 import { testHouseCalculator } from './house-test.ts';
-import { requireFresh } from './sessions.ts';
 import { refuseUnstorable } from './storable.ts';
+import { writeStep } from './vetting-record.ts';
 
 export interface Proposed {
 	calculator: string;
 	revision: string;
 }
 
-type HouseRow = typeof houseCalculators.$inferSelect;
+export type HouseRow = typeof houseCalculators.$inferSelect;
 
 /**
  * Adds a calculator under `house.` and its short name, tested: it is refused with `calculator-broken` and every problem
@@ -91,45 +83,6 @@ export async function reviseHouseCalculator(
 	});
 }
 
-/** A second scientist's signature: from now on it may be published, and the revisions before it are superseded. */
-export async function vetCalculator(ctx: Context, input: VetCalculator): Promise<void> {
-	const { actor } = ctx;
-	requirePermission(actor, 'vet-calculator');
-	refuseUnstorable(input);
-	await ctx.db.transaction(async (tx) => {
-		const revisions = await revisionsOf(tx, input.calculator);
-		const signed = revisions.find(({ revision }) => revision === input.revision);
-		if (!signed) throw new SteelyardError('not-found');
-		requirePermission(actor, 'vet-calculator', { proof: null, proposer: signed.proposedBy });
-		await requireFresh(ctx, tx);
-		requireStep(await stateOf(tx, signed), 'vetted');
-		settled(signed.definition); // what runs now, not what ran when it was proposed
-
-		await step(tx, ctx, signed, 'vetted', input.note);
-		for (const older of revisions) {
-			if (compareRevisions(older.revision, signed.revision) >= 0) continue;
-			if (!mayBecome(await stateOf(tx, older), 'superseded')) continue;
-			await step(tx, ctx, older, 'superseded', `Revision ${signed.revision} was vetted.`);
-		}
-		await record(tx, ctx, 'calculator-vetted', about(signed));
-	});
-}
-
-/** Takes a revision out of use, with a reason. What was published with it stays as it is. */
-export async function withdrawCalculator(ctx: Context, input: WithdrawCalculator): Promise<void> {
-	requirePermission(ctx.actor, 'withdraw-calculator');
-	refuseUnstorable(input);
-	await ctx.db.transaction(async (tx) => {
-		const revisions = await revisionsOf(tx, input.calculator);
-		const found = revisions.find(({ revision }) => revision === input.revision);
-		if (!found) throw new SteelyardError('not-found');
-		await requireFresh(ctx, tx);
-		requireStep(await stateOf(tx, found), 'withdrawn');
-		await step(tx, ctx, found, 'withdrawn', input.note);
-		await record(tx, ctx, 'calculator-withdrawn', about(found));
-	});
-}
-
 /** The newest revision as it was proposed, whatever has become of it. Throws `not-found`. */
 export async function readHouseCalculator(
 	ctx: Context,
@@ -140,7 +93,7 @@ export async function readHouseCalculator(
 }
 
 /** The definition with its trees; throws `calculator-broken` with all that keeps it from being tested. */
-function settled(draft: HouseDraft): HouseDefinition {
+export function settled(draft: HouseDraft): HouseDefinition {
 	const test = testHouseCalculator(draft);
 	if (!test.definition || test.problems.length > 0)
 		throw new SteelyardError('calculator-broken', { problems: test.problems });
@@ -148,7 +101,7 @@ function settled(draft: HouseDraft): HouseDefinition {
 }
 
 /** Every revision of a calculator, held until the transaction ends. */
-async function revisionsOf(tx: Db, calculator: string): Promise<HouseRow[]> {
+export async function revisionsOf(tx: Db, calculator: string): Promise<HouseRow[]> {
 	return tx
 		.select()
 		.from(houseCalculators)
@@ -177,39 +130,10 @@ async function keep(tx: Db, ctx: Context, definition: HouseDefinition): Promise<
 		if (sqlState(error) === UNIQUE_VIOLATION) throw new SteelyardError('revision-superseded');
 		throw error;
 	}
-	await step(tx, ctx, row, 'proposed', '');
-	const count = definition.checks.length;
-	await step(tx, ctx, row, 'tested', `${count} check values agree.`);
-	await record(tx, ctx, 'calculator-proposed', about(row));
+	await writeStep(tx, ctx, row, 'proposed', '');
+	await writeStep(tx, ctx, row, 'tested', `${definition.checks.length} check values agree.`);
+	await record(tx, ctx, 'calculator-proposed', { calculator, revision, digest: row.digest });
 	return { calculator, revision };
-}
-
-type Revision = Pick<HouseRow, 'calculator' | 'revision' | 'digest'>;
-
-function about({ calculator, revision, digest }: Revision) {
-	return { calculator, revision, digest };
-}
-
-async function stateOf(tx: Db, { calculator, revision }: Revision): Promise<VettingState | 'new'> {
-	const steps = await tx
-		.select({ state: vettings.state })
-		.from(vettings)
-		.where(and(eq(vettings.calculator, calculator), eq(vettings.revision, revision)))
-		.orderBy(vettings.seq);
-	return steps.at(-1)?.state ?? 'new';
-}
-
-async function step(
-	tx: Db,
-	{ actor, now }: Context,
-	{ calculator, revision }: Revision,
-	state: VettingState,
-	note: string
-): Promise<void> {
-	if (!actor) throw new SteelyardError('not-signed-in');
-	await tx
-		.insert(vettings)
-		.values({ calculator, revision, state, personId: actor.personId, at: now, note });
 }
 
 function dayOf(moment: Date): string {

@@ -14,9 +14,7 @@ import { signClaim, takeBackSignature } from './claims.ts';
 import {
 	proposeHouseCalculator,
 	readHouseCalculator,
-	reviseHouseCalculator,
-	vetCalculator,
-	withdrawCalculator
+	reviseHouseCalculator
 } from './house-calculators.ts';
 import { tryFormula } from './formula-steps.ts';
 import { takeBackFormula, vetFormula } from './formula-vettings.ts';
@@ -39,6 +37,8 @@ import { answerQuery, closeQuery, raiseQuery } from './queries.ts';
 import { releaseProof } from './releases.ts';
 import { saveSlip } from './slips.ts';
 import { deleteTheme, listThemes, saveTheme } from './themes.ts';
+import { retestCalculator, vetCalculator, withdrawCalculator } from './vetting-acts.ts';
+import { listFlags } from './vetting-flags.ts';
 import { listCalculators, readVettings } from './vettings.ts';
 import { importWordFile } from './word-import.ts';
 
@@ -132,6 +132,8 @@ const SERVICES: [name: string, action: Action, call: (ctx: Context) => Promise<u
 	['vetFormula', 'vet-formula', (ctx) => vetFormula(ctx, 'nowhere', NO_FORMULA)],
 	['takeBackFormula', 'read-proof', (ctx) => takeBackFormula(ctx, 'nowhere', NO_FORMULA)],
 	['withdrawCalculator', 'withdraw-calculator', (ctx) => withdrawCalculator(ctx, NO_REVISION)],
+	['retestCalculator', 'propose-calculator', (ctx) => retestCalculator(ctx, NO_REVISION)],
+	['listFlags', 'read-proof', (ctx) => listFlags(ctx)],
 	['listCalculators', 'read-calculators', (ctx) => listCalculators(ctx)],
 	['readVettings', 'read-calculators', (ctx) => readVettings(ctx, 'cosmo.at_z')],
 	['listPictures', 'read-pictures', (ctx) => listPictures(ctx)],

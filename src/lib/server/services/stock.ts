@@ -53,6 +53,40 @@ export async function readStock(db: Db, at?: Date): Promise<Stock> {
 	};
 }
 
+/** Which revision of a house calculator runs, or ran at a moment; undefined when there was none. */
+export type RunningRevision = (calculator: string, at?: Date) => string | undefined;
+
+/** The whole record at once, for questions about many moments. */
+export async function readRunningRevisions(db: Db): Promise<RunningRevision> {
+	const revisions = await db
+		.select({
+			calculator: houseCalculators.calculator,
+			revision: houseCalculators.revision,
+			digest: houseCalculators.digest,
+			proposedAt: houseCalculators.proposedAt
+		})
+		.from(houseCalculators);
+	const steps = await db.select().from(vettings).orderBy(vettings.seq);
+	return (calculator, at) => {
+		const then = <T>(all: T[], when: (each: T) => Date) =>
+			at ? all.filter((each) => when(each) <= at) : all;
+		const own = then(
+			revisions.filter((each) => each.calculator === calculator),
+			({ proposedAt }) => proposedAt
+		);
+		const states = new Map(
+			then(
+				steps.filter((step) => step.calculator === calculator),
+				(step) => step.at
+			).map((step) => [keyOf(step), step.state])
+		);
+		const [running] = runningOf(
+			own.map((row) => ({ ...row, state: states.get(keyOf(row)) ?? 'proposed' }))
+		);
+		return running?.revision;
+	};
+}
+
 /** The last step of every revision that has any. */
 async function readStates(db: Db, at?: Date): Promise<Map<string, VettingState>> {
 	const last = await db

@@ -4,7 +4,12 @@ import { SteelyardError } from '../../errors.ts';
 import type { HouseDefinition } from '../../physics/house/definition.ts';
 import { catalogue } from '../../physics/calculators/index.ts';
 import { requirePermission } from '../../workflow/permissions.ts';
-import { compareRevisions, vettingOf, type VettingView } from '../../workflow/vetting.ts';
+import {
+	checksAgree,
+	compareRevisions,
+	vettingOf,
+	type VettingView
+} from '../../workflow/vetting.ts';
 import type { Context, Fixtures } from '../context.ts';
 import { houseCalculators, vettings } from '../db/schema/index.ts';
 import { nameBook } from './people.ts';
@@ -13,7 +18,7 @@ import { readStock } from './stock.ts';
 export interface ShelfOfCalculators {
 	/** The house's own, as data, each in the revision that runs. */
 	house: readonly HouseDefinition[];
-	/** State of the running revision by calculator id; one that isn't here is vetted with the software. */
+	/** State of the running revision by calculator id; one of the software's that isn't here is vetted. */
 	states: Record<string, VettingView['state']>;
 }
 
@@ -21,13 +26,13 @@ export interface ShelfOfCalculators {
 export async function listCalculators(ctx: Context): Promise<ShelfOfCalculators> {
 	requirePermission(ctx.actor, 'read-calculators');
 	const { house, calculators, stateOf } = await readStock(ctx.db);
+	const own = new Set(house.map(({ id }) => id));
 	return {
 		house,
 		states: Object.fromEntries(
-			house.flatMap(({ id }) => {
-				const calculator = calculators.get(id);
-				return calculator ? [[id, stateOf(calculator)]] : [];
-			})
+			[...calculators.values()]
+				.map((calculator) => [calculator.id, stateOf(calculator)] as const)
+				.filter(([id, state]) => own.has(id) || state !== 'vetted')
 		)
 	};
 }
@@ -50,9 +55,8 @@ export async function signWhatCame(
 			.filter(({ id, revision }) => !has.has(`${id} ${revision}`))
 			.flatMap(({ id: calculator, revision, checks }): (typeof vettings.$inferInsert)[] => {
 				const about = { calculator, revision, at: now };
-				const note = `${checks.length === 1 ? '1 check value agrees' : `${checks.length} check values agree`}.`;
 				return [
-					{ ...about, state: 'tested', personId: first, note },
+					{ ...about, state: 'tested', personId: first, note: checksAgree(checks) },
 					{ ...about, state: 'vetted', personId: second, note: '' }
 				];
 			});
@@ -102,22 +106,25 @@ export async function readVettings(ctx: Context, calculator: string): Promise<Ve
 	return [...revisions]
 		.sort((a, b) => compareRevisions(b, a))
 		.map((revision) => {
-			const proposed = own.find((each) => each.revision === revision);
+			const steps = rows.filter((row) => row.revision === revision);
+			const last = steps.at(-1);
+			// What came with the software is proposed by whoever put it to the test again.
+			const proposer =
+				own.find((each) => each.revision === revision)?.proposedBy ??
+				(last?.state === 'tested' ? last.personId : null);
 			return vettingOf(
 				{
 					calculator,
 					revision,
 					house: !builtIn,
-					proposedBy: proposed ? names(proposed.proposedBy) : null
+					proposedBy: proposer === null ? null : names(proposer)
 				},
-				rows
-					.filter((row) => row.revision === revision)
-					.map(({ state, personId, at, note }) => ({
-						state,
-						by: names(personId),
-						at: at.toISOString(),
-						note
-					}))
+				steps.map(({ state, personId, at, note }) => ({
+					state,
+					by: names(personId),
+					at: at.toISOString(),
+					note
+				}))
 			);
 		});
 }

@@ -6,6 +6,7 @@ import { SpikedSlug } from '$lib/forms/spike.ts';
 import { listSpiked, recoverPiece, spikePiece } from '$lib/server/services/draft-spike.ts';
 import { createPiece } from '$lib/server/services/draft-start.ts';
 import { getPiece, lastSigned, listPieces } from '$lib/server/services/pieces.ts';
+import { listFlags } from '$lib/server/services/vetting-flags.ts';
 import { can } from '$lib/workflow/permissions.ts';
 import { fail, redirect } from '@sveltejs/kit';
 import { superValidate } from 'sveltekit-superforms';
@@ -16,18 +17,19 @@ import { inHand } from './in-hand.ts';
 export const load: PageServerLoad = async ({ locals: { context } }) => {
 	const { actor } = context;
 	const pieces = await listPieces(context).catch(pageFailure);
-	const inWork =
-		actor && can(actor, 'read-proof')
-			? await Promise.all(
-					pieces
-						.filter(({ working }) => working !== 'at-rest')
-						.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
-				)
-			: [];
+	const mayRead = actor !== null && can(actor, 'read-proof');
+	const inWork = mayRead
+		? await Promise.all(
+				pieces
+					.filter(({ working }) => working !== 'at-rest')
+					.map(({ slug }) => getPiece(context, slug).catch(pageFailure))
+			)
+		: [];
+	const flags = mayRead ? await listFlags(context).catch(pageFailure) : [];
 	return {
 		now: context.now.toISOString(),
 		pieces,
-		hands: actor ? inHand(actor, inWork) : [],
+		hands: actor ? inHand(actor, inWork, flags) : [],
 		lastSigned: await lastSigned(context).catch(pageFailure),
 		spiked: await listSpiked(context).catch(pageFailure),
 		outlines: outlines.map(({ id, field, says, document: { title } }) => ({

@@ -1,6 +1,7 @@
 import { firstLight } from '$lib/server/demo/first-light.ts';
 import type { Actor, Role } from '$lib/workflow/permissions.ts';
 import type { ClaimView, PieceView, ProofView, QueryView } from '$lib/workflow/piece.ts';
+import type { CalculatorFlag } from '$lib/workflow/vetting-flags.ts';
 import { expect, test } from 'vitest';
 import { inHand } from './in-hand.ts';
 
@@ -110,4 +111,37 @@ test('what stops others comes first', () => {
 		'Answer',
 		'Write on'
 	]);
+});
+
+const flag: CalculatorFlag = {
+	piece: { slug: 'first-light', title: 'First light' },
+	calculator: { id: 'house.sound', title: 'Speed of sound', revision: '1.0.0' },
+	state: 'withdrawn',
+	by: name(ama),
+	at: '2026-12-09T10:00:00Z',
+	reason: 'The constant was mistyped',
+	release: 2,
+	inDraft: true,
+	instead: null,
+	writers: ['tamsin']
+};
+
+test('a calculator out of use comes first, to those who wrote the piece and to editors', () => {
+	const rows = inHand(tamsin, [piece('queried', [claim('c1', 'queried', [query(null)])])], [flag]);
+	expect(rows.map(({ act }) => act)).toEqual(['Put it right', 'Answer']);
+	expect(rows[0]).toMatchObject({
+		mark: 'withdrawn',
+		asks: 'Release 2, which readers have now, and the draft work with Speed of sound, 1.0.0.',
+		tells:
+			'Withdrawn by ama: The constant was mistyped. Hang another calculator in its place, then pull a proof and release anew.',
+		href: '/pieces/first-light/manuscript'
+	});
+	const sees = (actor: Actor) => inHand(actor, [], [flag]).length;
+	expect([sees(perpetua), sees(ama), sees(person('bystander', 'writer'))]).toEqual([1, 0, 0]);
+});
+
+test('a newer revision asks for work only where answers may differ', () => {
+	const superseded = { ...flag, state: 'superseded' as const, inDraft: false };
+	expect(inHand(tamsin, [], [{ ...superseded, instead: '2.0.0' }])).toHaveLength(1);
+	expect(inHand(tamsin, [], [{ ...superseded, instead: '1.1.0' }])).toEqual([]);
 });

@@ -9,6 +9,7 @@ import {
 	vacuumOf,
 	wavelengthInput
 } from './refraction.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Vacuum wavelength from that in standard air, in nm (0 to 2500). Below 200 nm the value given is the vacuum value. */
 export const toVacuum = defineCalculator({
@@ -37,7 +38,7 @@ export const toVacuum = defineCalculator({
 	assumptions: AIR_ASSUMPTIONS,
 	warnings: AIR_WARNINGS,
 	sources: AIR_SOURCES,
-	checks: [],
+	checks: checksOf('air.to_vacuum'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ air_nm, formula }): Computed {
 		const vacuum = air_nm < SHORTEST_IN_AIR_NM ? air_nm : vacuumOf(air_nm, formula);

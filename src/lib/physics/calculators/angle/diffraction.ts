@@ -2,7 +2,6 @@ import { defineCalculator, type Computed } from '../../calculator.ts';
 import { convert } from '../../units/units.ts';
 import { SUN_CAUTION } from '../cautions.ts';
 import { checksOf } from '../published-checks.ts';
-import { exactly } from '../uncertainties.ts';
 
 /** First zero of the Bessel function J₁, over π. */
 const RAYLEIGH = 1.2196698912665045;
@@ -89,7 +88,7 @@ export const diffraction = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: [
 				...(isVisible && D_m > 0.2 ? ['air-blurs'] : []),
 				...(D_m < 10 * wavelength_nm * 1e-9 ? ['small-opening'] : [])

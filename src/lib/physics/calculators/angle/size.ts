@@ -4,7 +4,7 @@ import type { QuantityKind } from '../../units/quantities.ts';
 import { SUN_CAUTION } from '../cautions.ts';
 import { EXPANSION_COUNTS_M, tooFar } from '../light/far.ts';
 import { openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 function metres(
 	label: string,
@@ -74,7 +74,7 @@ export const angularSize = defineCalculator({
 	],
 	caution: SUN_CAUTION,
 	sources: [openStax(1, 'angles and arcs')],
-	checks: [],
+	checks: checksOf('angle.size'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ D_m: D, d_m: d }): Computed {
 		const theta = 2 * Math.atan2(D / 2, d);
@@ -83,6 +83,6 @@ export const angularSize = defineCalculator({
 			angleDeg: convert(theta, 'rad', 'deg'),
 			solidAngle: 4 * Math.PI * Math.sin(theta / 4) ** 2
 		};
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

@@ -1,7 +1,6 @@
 import { defineCalculator, refuse, type Computed, type NumberInput } from '../../calculator.ts';
 import { GL64 } from '../../numerics/quadrature.ts';
 import { checksOf } from '../published-checks.ts';
-import { exactly } from '../uncertainties.ts';
 import {
 	BLACK_BODY_ASSUMPTIONS,
 	HC_OVER_K_NM,
@@ -69,7 +68,7 @@ export const bandFraction = defineCalculator({
 		// The width from the wavelengths' difference: a narrow band keeps its digits.
 		const width = (HC_OVER_K_NM / (to_nm * T)) * ((to_nm - from_nm) / from_nm);
 		const values = { fraction: low < END ? shareOf(low, Math.min(width, END - low)) : 0 };
-		return { ok: true, values, uncertainties: exactly(values), warnings: [NOT_BLACK.code] };
+		return { ok: true, values, uncertainties: 'exact', warnings: [NOT_BLACK.code] };
 	}
 });
 

@@ -1,12 +1,12 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { constants } from '../../constants/index.ts';
-import { exactly } from '../uncertainties.ts';
 import {
 	BLACK_BODY_ASSUMPTIONS,
 	NOT_BLACK,
 	PLANCK_SOURCES,
 	temperatureInput
 } from './radiation.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { h, c, k } = constants.physical;
 /** Past this hν/kT the light is below 10⁻³⁰⁰ of what it is near the peak. */
@@ -81,17 +81,46 @@ export const planck = defineCalculator({
 	assumptions: BLACK_BODY_ASSUMPTIONS,
 	warnings: [NOT_BLACK],
 	sources: PLANCK_SOURCES,
-	checks: [],
+	checks: checksOf('blackbody.planck'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ T_K: T, wavelength_nm, frequency_Hz }): Computed {
 		const metres = wavelength_nm !== undefined ? wavelength_nm * 1e-9 : c.value / frequency_Hz;
-		const hertz = frequency_Hz ?? (c.value * 1e9) / wavelength_nm;
-		const x = (h.value * hertz) / (k.value * T);
-		const occupied = x > NOTHING_LEFT ? 0 : 1 / Math.expm1(x);
+		const hertz = frequency_Hz ?? HERTZ_NM / wavelength_nm;
+		const filled = occupied(hertz, T);
 		const values = {
-			B_lambda: ((2 * h.value * c.value ** 2) / metres ** 5) * occupied,
-			B_nu: ((2 * h.value * hertz ** 3) / c.value ** 2) * occupied
+			B_lambda: byWavelength(metres, filled),
+			B_nu: byFrequency(hertz, filled)
 		};
-		return { ok: true, values, uncertainties: exactly(values), warnings: [NOT_BLACK.code] };
+		return { ok: true, values, uncertainties: 'exact', warnings: [NOT_BLACK.code] };
+	},
+	curve(inputs, key, places) {
+		const B_lambda = new Float64Array(places.length);
+		const B_nu = new Float64Array(places.length);
+		const alongWavelength = key === 'wavelength_nm';
+		if (!alongWavelength && key !== 'frequency_Hz') return null;
+		for (let index = 0; index < places.length; index += 1) {
+			const place = places[index]!;
+			const metres = alongWavelength ? place * 1e-9 : c.value / place;
+			const hertz = alongWavelength ? HERTZ_NM / place : place;
+			const filled = occupied(hertz, inputs.T_K as number);
+			B_lambda[index] = byWavelength(metres, filled);
+			B_nu[index] = byFrequency(hertz, filled);
+		}
+		return { columns: { B_lambda, B_nu }, warnings: [NOT_BLACK.code] };
 	}
 });
+
+const HERTZ_NM = c.value * 1e9;
+const TWO_H = 2 * h.value;
+const LIGHT_SPEED_SQUARED = c.value ** 2;
+const TWO_H_C_SQUARED = TWO_H * LIGHT_SPEED_SQUARED;
+
+/** Photons in each state of this frequency (Hz) at T (K). */
+function occupied(hertz: number, T: number): number {
+	const x = (h.value * hertz) / (k.value * T);
+	return x > NOTHING_LEFT ? 0 : 1 / Math.expm1(x);
+}
+
+const byWavelength = (metres: number, filled: number) => (TWO_H_C_SQUARED / metres ** 5) * filled;
+const byFrequency = (hertz: number, filled: number) =>
+	((TWO_H * hertz ** 3) / LIGHT_SPEED_SQUARED) * filled;

@@ -1,7 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { constants } from '../../constants/index.ts';
 import { checksOf } from '../published-checks.ts';
-import { exactly } from '../uncertainties.ts';
 import {
 	BLACK_BODY_ASSUMPTIONS,
 	HC_OVER_K_NM,
@@ -112,7 +111,7 @@ export const total = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: ['two-peaks', NOT_BLACK.code]
 		};
 	}

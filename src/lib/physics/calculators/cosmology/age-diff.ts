@@ -9,7 +9,8 @@ import {
 	redshiftInput,
 	universeWithPast
 } from './limits.ts';
-import { pathFrom } from './integrals.ts';
+import { timeOver } from './integrals.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Time between two redshifts, in Myr, whichever comes first. Integrated directly, so that near redshifts lose no digits. */
 export const ageDiff = defineCalculator({
@@ -37,7 +38,7 @@ export const ageDiff = defineCalculator({
 	assumptions: COSMOLOGY_ASSUMPTIONS,
 	warnings: COSMOLOGY_WARNINGS,
 	sources: COSMOLOGY_SOURCES,
-	checks: [],
+	checks: checksOf('cosmo.age_diff'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ cosmology, z1, z2 }): Computed {
 		const opened = universeWithPast(cosmology);
@@ -48,7 +49,7 @@ export const ageDiff = defineCalculator({
 		const x1 = Math.log1p(z1);
 		// ln((1+z₂)/(1+z₁)) from the difference, which is exact for near redshifts.
 		const width = Math.log1p((z2 - z1) / (1 + z1));
-		const time = Math.abs(pathFrom(universe, x1, width).time);
+		const time = Math.abs(timeOver(universe, x1, width));
 		return {
 			ok: true,
 			values: { duration: time * universe.hubbleTimeGyr * 1000 },

@@ -60,7 +60,7 @@ export const atZ = defineCalculator({
 	restsOnCosmology: FITTED_OUTPUTS,
 	equations: [
 		{
-			tex: 'E^2(z) = \\Omega_m(1+z)^3 + \\Omega_\\gamma(1+z)^4\\,[1+r_\\nu(z)] + \\Omega_k(1+z)^2 + \\Omega_\\mathrm{DE}\\,(1+z)^{3(1+w_0+w_a)}\\,e^{-3w_a z/(1+z)}',
+			tex: '\\begin{aligned} E^2(z) ={}& \\Omega_m(1+z)^3 + \\Omega_\\gamma(1+z)^4\\,[1+r_\\nu(z)] + \\Omega_k(1+z)^2 \\\\ &+ \\Omega_\\mathrm{DE}\\,(1+z)^{3(1+w_0+w_a)}\\,e^{-3w_a z/(1+z)} \\end{aligned}',
 			says: 'The expansion rate, compared with today’s, follows from what fills space and how each part thins out.'
 		},
 		{

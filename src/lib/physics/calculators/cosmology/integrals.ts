@@ -2,22 +2,26 @@
  * Times, distances and volumes of an expanding universe, by Gauss–Legendre quadrature in variables that keep the
  * integrands smooth. Distances are in Hubble distances, times in Hubble times.
  */
-import { GL6, GL64, type Node } from '../../numerics/quadrature.ts';
+import { GL64 } from '../../numerics/quadrature.ts';
+import {
+	RUNNING_NODES,
+	runningCoefficients,
+	runningMean
+} from '../../numerics/running-integral.ts';
 import { NEGLIGIBLE_WA, type Universe } from './universe.ts';
 
 /**
  * Look-back time and comoving distance over a stretch of x (x = 0: from now): ∫dx/E and ∫e^x dx/E. The width is an
  * argument of its own, since near ends lose its digits.
  */
-export function pathFrom(
+function pathFrom(
 	universe: Universe,
 	x: number,
-	width: number,
-	nodes: readonly Node[] = GL64
+	width: number
 ): { time: number; distance: number } {
 	let time = 0;
 	let distance = 0;
-	for (const { at, weight } of nodes) {
+	for (const { at, weight } of GL64) {
 		const u = Math.exp(x + width * at);
 		const share = weight / Math.sqrt(universe.E2(u));
 		time += share;
@@ -70,34 +74,82 @@ export interface Reach {
 	future: number;
 }
 
-/** Distance in x between milestones: short enough for 6 nodes to reach the last bits from one to the next. */
+/** Length in x of a stretch: short enough for the running integral to reach the last bits within it. */
 const SPACING = 0.125;
-const milestones = new WeakMap<Universe, Map<number, Reach>>();
+
+/** A stretch of the way of light: how time and distance go on from its start, and what was added up before it. */
+export interface Stretch {
+	time: readonly number[];
+	distance: readonly number[];
+	/** Time on the way over all of it. */
+	wholeTime: number;
+	/** All integrals at its start, once they were asked for. */
+	start: Reach | null;
+}
 
 /**
- * All integrals at x. In the past they go on from a milestone, whose own were taken over the whole way and are kept with
- * the universe: a curve costs little more than its points, and no point depends on which were asked before.
+ * All integrals at x. In the past they go on from the start of a stretch, whose own were taken over the whole way and are
+ * kept with the universe: a curve costs little more than its points, and no point depends on which were asked before.
  */
 export function reachOf(universe: Universe, x: number): Reach {
 	const step = Math.floor(x / SPACING);
 	if (!(step >= 0)) return wholeReach(universe, x);
-	const from = milestone(universe, step);
-	const { time, distance } = pathFrom(universe, step * SPACING, x - step * SPACING, GL6);
+	const stretch = stretchOf(universe, step);
+	const start = (stretch.start ??= wholeReach(universe, step * SPACING));
+	const width = x - step * SPACING;
+	const time = within(stretch.time, width);
+	const distance = within(stretch.distance, width);
 	return {
-		time: from.time + time,
-		distance: from.distance + distance,
-		age: from.age - time,
-		horizon: from.horizon - distance,
-		future: from.future + distance
+		time: start.time + time,
+		distance: start.distance + distance,
+		age: start.age - time,
+		horizon: start.horizon - distance,
+		future: start.future + distance
 	};
 }
 
-function milestone(universe: Universe, step: number): Reach {
-	let own = milestones.get(universe);
-	if (!own) milestones.set(universe, (own = new Map<number, Reach>()));
-	let reach = own.get(step);
-	if (!reach) own.set(step, (reach = wholeReach(universe, step * SPACING)));
-	return reach;
+/**
+ * Time on the way over a stretch of x, below 0 where the width is. It is added up over what lies between and never the
+ * small difference of two large times.
+ */
+export function timeOver(universe: Universe, x: number, width: number): number {
+	const [from, to] = width < 0 ? [x + width, x] : [x, x + width];
+	if (!(from >= 0) || to - from < SPACING) return pathFrom(universe, x, width).time;
+	const first = Math.floor(from / SPACING);
+	const last = Math.floor(to / SPACING);
+	let time = -within(stretchOf(universe, first).time, from - first * SPACING);
+	for (let step = first; step < last; step += 1) time += stretchOf(universe, step).wholeTime;
+	time += within(stretchOf(universe, last).time, to - last * SPACING);
+	return width < 0 ? -time : time;
+}
+
+function within(coefficients: readonly number[], width: number): number {
+	return runningMean(coefficients, width / SPACING) * width;
+}
+
+function stretchOf(universe: Universe, step: number): Stretch {
+	const { stretches } = universe;
+	let stretch = stretches.get(step);
+	if (!stretch) stretches.set(step, (stretch = makeStretch(universe, step * SPACING)));
+	return stretch;
+}
+
+function makeStretch(universe: Universe, x: number): Stretch {
+	const times: number[] = [];
+	const distances: number[] = [];
+	for (const at of RUNNING_NODES) {
+		const u = Math.exp(x + SPACING * at);
+		const rate = 1 / Math.sqrt(universe.E2(u));
+		times.push(rate);
+		distances.push(rate * u);
+	}
+	const time = runningCoefficients(times);
+	return {
+		time,
+		distance: runningCoefficients(distances),
+		wholeTime: within(time, SPACING),
+		start: null
+	};
 }
 
 function wholeReach(universe: Universe, x: number): Reach {
@@ -134,14 +186,16 @@ function futureOf(universe: Universe, u: number): number {
 }
 
 function sumOver(integrand: (s: number) => number): number {
-	return GL64.reduce((sum, { at, weight }) => sum + weight * integrand(at), 0);
+	let sum = 0;
+	for (const { at, weight } of GL64) sum += weight * integrand(at);
+	return sum;
 }
 
 /** Transverse comoving distance from the comoving one, both in Hubble distances; beyond the antipode its absolute value. */
 export function transverseOf(universe: Universe, distance: number): number {
 	const { Ok0 } = universe;
-	const q = Math.sqrt(Math.abs(Ok0));
 	if (Ok0 === 0 || distance === 0) return distance;
+	const q = Math.sqrt(Math.abs(Ok0));
 	return Ok0 > 0 ? Math.sinh(q * distance) / q : Math.abs(Math.sin(q * distance)) / q;
 }
 
@@ -149,6 +203,7 @@ export function transverseOf(universe: Universe, distance: number): number {
 export function volumeOf(universe: Universe, distance: number): number {
 	const { Ok0 } = universe;
 	const flat = ((4 * Math.PI) / 3) * distance ** 3;
+	if (Ok0 === 0) return flat;
 	const w = Ok0 * distance * distance;
 	if (Math.abs(w) < 1) {
 		// (sinh 2y − 2y)·3/(4y³) in powers of w = y²: the closed form loses digits in a nearly flat universe.

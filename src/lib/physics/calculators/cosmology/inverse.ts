@@ -12,6 +12,7 @@ import {
 } from './limits.ts';
 import { reachOf, transverseOf } from './integrals.ts';
 import { X_MAX, X_MIN, type Universe } from './universe.ts';
+import { checksOf } from '../published-checks.ts';
 
 type Kind = 'z_from_age' | 'z_from_lookback' | 'z_from_comoving' | 'z_from_luminosity';
 
@@ -117,7 +118,7 @@ export const inverse = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('cosmo.inverse'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ cosmology, kind, value }): Computed {
 		const opened = universeWithPast(cosmology);

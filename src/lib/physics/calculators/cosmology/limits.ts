@@ -117,16 +117,14 @@ export const COSMOLOGY_WARNINGS: WarningSpec[] = [
 /** Codes of the warnings that hold for a universe seen at redshift z. */
 export function cosmologyWarnings(universe: Universe, z: number): string[] {
 	const { m_nu, w0 } = universe.parameters;
-	const mass = m_nu.reduce((sum, one) => sum + one, 0);
-	const held: Record<string, boolean> = {
-		future: z < 0,
-		'before-last-scattering': z > 1100,
-		'first-seconds': z > 1e8,
-		'heavy-neutrinos': mass > 0.12,
-		phantom: w0 < -1,
-		'strong-curvature': Math.abs(universe.Ok0) > 0.01
-	};
-	return Object.keys(held).filter((code) => held[code]);
+	const codes: string[] = [];
+	if (z < 0) codes.push('future');
+	if (z > 1100) codes.push('before-last-scattering');
+	if (z > 1e8) codes.push('first-seconds');
+	if (m_nu.reduce((sum, one) => sum + one, 0) > 0.12) codes.push('heavy-neutrinos');
+	if (w0 < -1) codes.push('phantom');
+	if (Math.abs(universe.Ok0) > 0.01) codes.push('strong-curvature');
+	return codes;
 }
 
 /** The universe with these parameters, unless it has no Big Bang. */

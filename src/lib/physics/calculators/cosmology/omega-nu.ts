@@ -9,6 +9,7 @@ import {
 	redshiftInput,
 	universeWithPast
 } from './limits.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Energy of all neutrinos compared with that of the photons, and as a share of the critical density. */
 export const omegaNu = defineCalculator({
@@ -40,7 +41,7 @@ export const omegaNu = defineCalculator({
 	assumptions: COSMOLOGY_ASSUMPTIONS,
 	warnings: COSMOLOGY_WARNINGS,
 	sources: COSMOLOGY_SOURCES,
-	checks: [],
+	checks: checksOf('cosmo.omega_nu'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ cosmology, z }): Computed {
 		const opened = universeWithPast(cosmology);

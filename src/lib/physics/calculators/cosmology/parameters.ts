@@ -75,7 +75,10 @@ export function resolveCosmology(raw: unknown, input = 'cosmology'): Resolved {
 		);
 	}
 	const given = raw as Record<string, unknown>;
-	for (const key of Object.keys(given)) {
+	const keys = Object.keys(given);
+	const untouched = keys.length === 1 && typeof given.set === 'string' && wholeSets.get(given.set);
+	if (untouched) return untouched;
+	for (const key of keys) {
 		if (KEYS.includes(key)) continue;
 		const near = nearestOf(key, KEYS);
 		const hint = near ? `Did you mean “${near}”?` : `It takes ${KEYS.join(', ')}.`;
@@ -105,8 +108,14 @@ export function resolveCosmology(raw: unknown, input = 'cosmology'): Resolved {
 		if (parameters[key] !== value) parameters.set = null;
 		parameters[key] = value;
 	}
-	return withNeutrinos(parameters, given.m_nu, no);
+	const resolved = withNeutrinos(parameters, given.m_nu, no);
+	if (keys.length === 1 && resolved.ok && resolved.value.set !== null)
+		wholeSets.set(resolved.value.set, resolved);
+	return resolved;
 }
+
+/** Sets as published, by name: by far the most common universes. */
+const wholeSets = new Map<string, Resolved>();
 
 /** The parameters before any override: those of the set, or the defaults beside H0 and Om0. */
 function baseOf(
@@ -186,7 +195,7 @@ function withNeutrinos(
 		species === 0 || parameters.Tcmb0 === 0
 			? []
 			: masses.length === 1
-				? Array.from({ length: species }, () => masses[0] ?? 0)
+				? new Array<number>(species).fill(masses[0] ?? 0)
 				: masses;
 	if (full.length !== 0 && full.length !== species) {
 		return no(

@@ -2,7 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import type { RawInputs } from '../../calculator.ts';
 import { catalogue } from '../index.ts';
+import { GL6 } from '../../numerics/quadrature.ts';
 import { runCalculator } from '../run.ts';
+import { resolveCosmology, type CosmologyParameters } from './parameters.ts';
+import { universeOf } from './universe.ts';
 
 function outputs(id: string, inputs: RawInputs): Record<string, number> {
 	const result = runCalculator(catalogue.get(id)!, inputs);
@@ -194,4 +197,55 @@ describe('warnings', () => {
 		expect(result.ok && result.warnings.map((warning) => warning.code)).toEqual(codes);
 		expect(result.ok && result.validity).toBe(validity);
 	});
+});
+
+describe('what is kept between two questions', () => {
+	const resolved = resolveCosmology({ set: 'Planck18', Ode0: 0.69 });
+	if (!resolved.ok) throw new Error(resolved.refusal.message);
+	const parameters: CosmologyParameters = resolved.value;
+
+	test('is found again by its parameters', () => {
+		expect(universeOf({ ...parameters, m_nu: [...parameters.m_nu] })).toBe(universeOf(parameters));
+	});
+
+	test.each(Object.keys(parameters) as (keyof CosmologyParameters)[])(
+		'another %s is another universe',
+		(key) => {
+			const other = key === 'm_nu' ? [0, 0, 0.07] : key === 'set' ? 'Planck18' : 0.9;
+			const moved = universeOf({ ...parameters, [key]: other });
+			expect(moved).not.toBe(universeOf(parameters));
+			expect(moved.parameters[key]).toEqual(other);
+		}
+	);
+
+	test('is forgotten when many others came, and then worked anew to the same bits', () => {
+		const first = at({ H0: 70, Om0: 0.3 }, 1.7);
+		for (let H0 = 50; H0 < 150; H0 += 1) at({ H0: H0 + 0.5, Om0: 0.3 }, 1);
+		expect(at({ H0: 70, Om0: 0.3 }, 1.7)).toEqual(first);
+	});
+});
+
+// The time between two redshifts against Gauss–Legendre in 2000 pieces; the last two linger near a standstill.
+test.each([
+	[{ set: 'Planck18' }, 0.3, 20],
+	[{ set: 'Planck18' }, 9, 0.01],
+	[{ H0: 70, Om0: 0.3, Tcmb0: 2.7255, w0: -1.2, wa: 0.4 }, 0.05, 1000],
+	[{ set: 'Simple', Om0: 0.5123759, Ode0: 1.95729597 }, 0.19, 10],
+	[{ set: 'Simple', Om0: 0.15948762, Ode0: 1.45545432 }, 1.7, 1e9]
+])('%o between z = %d and %d, piece by piece', (cosmology, z1, z2) => {
+	const resolved = resolveCosmology(cosmology);
+	if (!resolved.ok) throw new Error(resolved.refusal.message);
+	const universe = universeOf(resolved.value);
+	const [from, to] = [Math.log1p(z1), Math.log1p(z2)];
+	const width = (to - from) / 2000;
+	let time = 0;
+	for (let piece = 0; piece < 2000; piece += 1) {
+		for (const { at: share, weight } of GL6)
+			time += (weight * width) / Math.sqrt(universe.E2(Math.exp(from + width * (piece + share))));
+	}
+	near(
+		outputs('cosmo.age_diff', { cosmology, z1, z2 }).duration,
+		Math.abs(time) * universe.hubbleTimeGyr * 1000,
+		1e-12
+	);
 });

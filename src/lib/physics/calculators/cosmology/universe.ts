@@ -8,6 +8,7 @@
  */
 import { constants } from '../../constants/index.ts';
 import { goldenMinimum } from '../../numerics/roots.ts';
+import type { Stretch } from './integrals.ts';
 import type { CosmologyParameters } from './parameters.ts';
 
 const { c, G, k, e, sigma } = constants.physical;
@@ -60,36 +61,48 @@ export interface Universe {
 	E2(u: number): number;
 	/** ½ dlnE²/dln u */
 	slope(u: number): number;
+	/** What was added up of the way of light so far, by its steps; `integrals.ts` fills it. */
+	readonly stretches: Map<number, Stretch>;
 }
 
 /** u at which no neutrino’s mass counts. */
 const LONG_AGO = 1e12;
 
-const cache = new Map<string, Universe>();
-const CACHE_SIZE = 64;
-/** The one asked for last: a chart asks for one a hundred times, and writing its key takes longer than its answer. */
+/** The last few, in a ring: one that is overwritten leaves nothing behind that the collector of garbage must look through. */
+const kept: Universe[] = [];
+const KEPT = 16;
+let oldest = 0;
+/** The one asked for last: a chart asks for one a hundred times. */
 let last: Universe | null = null;
 
 /** The universe with these parameters; the last few are kept. */
 export function universeOf(parameters: CosmologyParameters): Universe {
 	if (last !== null && sameParameters(last.parameters, parameters)) return last;
-	const key = JSON.stringify(parameters);
-	let universe = cache.get(key);
+	let universe = kept.find((one) => sameParameters(one.parameters, parameters));
 	if (!universe) {
 		universe = makeUniverse(parameters);
-		if (cache.size >= CACHE_SIZE) cache.delete(cache.keys().next().value!);
-		cache.set(key, universe);
+		kept[oldest] = universe;
+		oldest = (oldest + 1) % KEPT;
 	}
 	last = universe;
 	return universe;
 }
 
 function sameParameters(a: CosmologyParameters, b: CosmologyParameters): boolean {
-	for (const key of Object.keys(a) as (keyof CosmologyParameters)[]) {
-		if (key !== 'm_nu' && a[key] !== b[key]) return false;
-	}
-	const masses = b.m_nu;
-	return a.m_nu.length === masses.length && a.m_nu.every((mass, index) => mass === masses[index]);
+	return (
+		a === b ||
+		(a.H0 === b.H0 &&
+			a.Om0 === b.Om0 &&
+			a.Ode0 === b.Ode0 &&
+			a.Tcmb0 === b.Tcmb0 &&
+			a.Neff === b.Neff &&
+			a.w0 === b.w0 &&
+			a.wa === b.wa &&
+			a.Ob0 === b.Ob0 &&
+			a.set === b.set &&
+			a.m_nu.length === b.m_nu.length &&
+			a.m_nu.every((mass, index) => mass === b.m_nu[index]))
+	);
 }
 
 function makeUniverse(parameters: CosmologyParameters): Universe {
@@ -140,6 +153,7 @@ function makeUniverse(parameters: CosmologyParameters): Universe {
 		neutrinoRatio,
 		darkEnergyGrowth,
 		E2,
+		stretches: new Map(),
 		slope(u) {
 			const dark = Ode0 === 0 ? 0 : Ode0 * darkEnergyGrowth(u) * (growth - (3 * wa) / u);
 			const light =

@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { RADIATION_CAUTION } from '../cautions.ts';
-import { exactly } from '../uncertainties.ts';
 import { ALMOST_GONE, DECAY_SOURCES, halfLifeInput, timeUnit, unitInput } from './half-lives.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Age of a sample from how many daughter atoms there are for each parent: T log₂(1 + D/P), in the unit of the half-life. */
 export const radiometricAge = defineCalculator({
@@ -45,7 +45,7 @@ export const radiometricAge = defineCalculator({
 	warnings: [ALMOST_GONE],
 	caution: RADIATION_CAUTION,
 	sources: DECAY_SOURCES,
-	checks: [],
+	checks: checksOf('decay.age'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ halflife, ratio }): Computed {
 		const halves = Math.log1p(ratio) / Math.LN2;
@@ -53,7 +53,7 @@ export const radiometricAge = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: halves > 10 ? [ALMOST_GONE.code] : []
 		};
 	}

@@ -7,7 +7,6 @@ import {
 import { convert } from '../../units/units.ts';
 import { RADIATION_CAUTION } from '../cautions.ts';
 import { checksOf } from '../published-checks.ts';
-import { exactly } from '../uncertainties.ts';
 import {
 	ALMOST_GONE,
 	DECAY_SOURCES,
@@ -122,7 +121,7 @@ export const halfLife = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			withheld,
 			warnings: [
 				...(halves > 10 ? [ALMOST_GONE.code] : []),

@@ -3,7 +3,7 @@ import { constants } from '../../constants/index.ts';
 import { RADIATION_CAUTION } from '../cautions.ts';
 import { lorentzFactor } from '../relativity/lorentz.ts';
 import { EINSTEIN_1905 } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { c } = constants.physical;
 
@@ -96,7 +96,7 @@ export const inFlight = defineCalculator({
 		},
 		EINSTEIN_1905
 	],
-	checks: [],
+	checks: checksOf('decay.in_flight'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ beta, path_m, meanLife_s }): Computed {
 		const gamma = lorentzFactor(beta);
@@ -106,6 +106,6 @@ export const inFlight = defineCalculator({
 			meanLifetime: gamma * meanLife_s,
 			surviving: Math.exp(-path_m / meanPath)
 		};
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

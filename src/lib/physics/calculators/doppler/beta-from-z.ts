@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { DOPPLER_SOURCES, LIGHT_SPEED_KMS, NOT_EXPANSION } from './moving-source.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Speed of a source that moves straight along the line of sight, from its redshift in (−1, 10⁵]:
@@ -65,7 +65,7 @@ export const betaFromZ = defineCalculator({
 	],
 	warnings: [NOT_EXPANSION],
 	sources: DOPPLER_SOURCES,
-	checks: [],
+	checks: checksOf('doppler.beta_from_z'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ z }): Computed {
 		const stretch = 1 + z;
@@ -77,7 +77,7 @@ export const betaFromZ = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: z > 0.01 ? [NOT_EXPANSION.code] : []
 		};
 	}

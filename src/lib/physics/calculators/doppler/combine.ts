@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { DOPPLER_SOURCES, LIGHT_SPEED_KMS, radialRedshift } from './moving-source.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Redshift observed from a galaxy that moves through space (km/s, away from us above 0) while space carries it:
@@ -75,11 +75,11 @@ export const combine = defineCalculator({
 		{ title: 'Harrison 1993, The redshift-distance and velocity-distance laws, ApJ 403, 28' },
 		...DOPPLER_SOURCES
 	],
-	checks: [],
+	checks: checksOf('doppler.combine'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ zcos, vpec_kms }): Computed {
 		const own = radialRedshift(vpec_kms / LIGHT_SPEED_KMS);
 		const values = { z: zcos + own + zcos * own };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { lessOne } from '../relativity/lorentz.ts';
-import { exactly } from '../uncertainties.ts';
 import { DOPPLER_SOURCES, radialRedshift, speedShareInput } from './moving-source.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Redshift of a moving source from its speed as a share of that of light, in (−1, 1): straight away, √((1+β)/(1−β)) − 1;
@@ -49,10 +49,10 @@ export const zFromBeta = defineCalculator({
 	],
 	warnings: [],
 	sources: DOPPLER_SOURCES,
-	checks: [],
+	checks: checksOf('doppler.z_from_beta'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ beta }): Computed {
 		const values = { z: radialRedshift(beta), transverse_z: lessOne(beta) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

@@ -1,8 +1,8 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { cosineOfDegrees, sineOfDegrees } from '../../numerics/degrees.ts';
 import { lessOne, lorentzFactor } from '../relativity/lorentz.ts';
-import { exactly } from '../uncertainties.ts';
 import { DOPPLER_SOURCES, radialRedshift } from './moving-source.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Redshift of a source that moves at a slant: 1 + z = γ(1 + β cos θ), θ in degrees as seen by us when the light left,
@@ -51,11 +51,11 @@ export const zGeneral = defineCalculator({
 	],
 	warnings: [],
 	sources: DOPPLER_SOURCES,
-	checks: [],
+	checks: checksOf('doppler.z_general'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ beta, theta_deg: theta }): Computed {
 		const values = { z: slantRedshift(beta, theta) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });
 

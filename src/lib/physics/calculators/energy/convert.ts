@@ -1,4 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import { codata2018 } from '../../constants/codata-2018.ts';
 import { constants } from '../../constants/index.ts';
 import { convert as convertUnits, unitOf } from '../../units/units.ts';
 import { checksOf } from '../published-checks.ts';
@@ -13,8 +14,6 @@ const options = ENERGY_UNITS.map((symbol) => ({
 	label: unitOf(symbol)?.words.many ?? symbol
 }));
 const sameUnit = Object.fromEntries(ENERGY_UNITS.map((symbol) => [symbol, symbol]));
-
-const { R_inf } = constants.physical;
 
 /** An energy stated in another unit. All factors are exact but the hartree, which is measured. */
 export const convert = defineCalculator({
@@ -81,9 +80,15 @@ export const convert = defineCalculator({
 	],
 	checks: checksOf('energy.convert'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ value: given, from, to }): Computed {
-		const value = convertUnits(given, from, to);
-		const isMeasured = from !== to && (from === 'hartree' || to === 'hartree');
+	followsEdition: true,
+	compute({ value: given, from, to }, { physical: { R_inf } } = constants): Computed {
+		if (from === to) return { ok: true, values: { value: given }, uncertainties: 'exact' };
+		// The table's hartree is of CODATA 2018: 2R∞hc, of which an adjustment moves the Rydberg constant alone.
+		const hartree = R_inf.value / codata2018.R_inf.value;
+		const value =
+			(convertUnits(given, from, to) * (from === 'hartree' ? hartree : 1)) /
+			(to === 'hartree' ? hartree : 1);
+		const isMeasured = from === 'hartree' || to === 'hartree';
 		return {
 			ok: true,
 			values: { value },

@@ -2,6 +2,7 @@ import { defineCalculator, refuse, type Computed, type NumberInput } from '../..
 import { printNumber } from '../wording.ts';
 import { LAUNCHER_CAUTION } from './caution.ts';
 import { gravityInput } from './gravity.ts';
+import { checksOf } from '../published-checks.ts';
 
 function mass(label: string, symbol: string, initial: number): NumberInput {
 	return {
@@ -147,7 +148,7 @@ export const counterweight = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('energy.counterweight'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({
 		counterweight_kg: M,

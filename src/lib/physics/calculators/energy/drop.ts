@@ -1,5 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { gravityInput } from './gravity.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A body let down by a height (m, 0 to 10⁴): energy mgh in J, speed √(v₀² + 2gh) in m/s, and for a straight fall the
@@ -97,7 +98,7 @@ export const drop = defineCalculator({
 			locator: '9.806 65 m/s²'
 		}
 	],
-	checks: [],
+	checks: checksOf('energy.drop'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ height_m: h, mass_kg: m, v0_ms: v0, g_ms2: g }): Computed {
 		const impactSpeed = Math.sqrt(v0 * v0 + 2 * g * h);

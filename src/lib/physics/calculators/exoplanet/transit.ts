@@ -9,7 +9,6 @@ import { constants } from '../../constants/index.ts';
 import { convert } from '../../units/units.ts';
 import { checksOf } from '../published-checks.ts';
 import { IAU_NOMINAL } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 
 const { R_earth, R_sun, T_sun, au } = constants.astronomical;
 
@@ -213,7 +212,7 @@ export const transit = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			withheld,
 			warnings: b > 1 - k ? ['grazing'] : []
 		};

@@ -9,7 +9,7 @@ import {
 	STANDARD_ATMOSPHERE
 } from '../projectile/air.ts';
 import { openStax, STANDARD_GRAVITY_SOURCE } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A straight fall from rest through still air after a time in s: speed v_t tanh(gt/v_t) in m/s, distance
@@ -108,7 +108,7 @@ export const fallDrag = defineCalculator({
 		STANDARD_ATMOSPHERE,
 		STANDARD_GRAVITY_SOURCE
 	],
-	checks: [],
+	checks: checksOf('fall.drag'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ mass_kg, rho, Cd, area_m2, t_s, g_ms2 }): Computed {
 		const terminalSpeed = Math.sqrt((2 * mass_kg * g_ms2) / (rho * Cd * area_m2));
@@ -121,7 +121,7 @@ export const fallDrag = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: [...machWarnings(values.speed), ...(values.distance > 1000 ? ['thin-air'] : [])]
 		};
 	}

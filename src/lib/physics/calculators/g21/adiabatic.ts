@@ -1,6 +1,7 @@
 import { defineCalculator, refuse, type Computed } from '../../calculator.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { FOB06, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Rule of thumb for unheated gas: it let go of the background at 1+z_dec and cooled as (1+z)² since. Kelvin. */
 export const adiabatic = defineCalculator({
@@ -51,14 +52,14 @@ export const adiabatic = defineCalculator({
 		}
 	],
 	sources: [FOB06],
-	checks: [],
+	checks: checksOf('g21.adiabatic'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ cosmology, z }): Computed {
 		const { Ob0, H0, Tcmb0 } = cosmology;
 		if (Ob0 === 0 || Tcmb0 === 0) {
 			return refuse(
 				'no-gas',
-				'This needs ordinary matter (Ob0) and a background (Tcmb0). Give both, or name a set such as “Planck18”.',
+				'This needs ordinary matter (Ob0) and a background (Tcmb0). Give both, or take a published set such as Planck 2018.',
 				'cosmology'
 			);
 		}

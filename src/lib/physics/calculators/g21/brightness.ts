@@ -1,4 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { gasOf, heliumInput } from '../thermal/gas.ts';
 import { UNIVERSE_WARNINGS, universeWarnings } from '../thermal/sources.ts';
@@ -15,6 +16,7 @@ import {
 	SINGH_2022,
 	troughWarnings
 } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Brightness of the 21 cm line against the background in mK, exact and by the usual linear formula, and its optical
@@ -95,10 +97,14 @@ export const brightness = defineCalculator({
 		...UNIVERSE_WARNINGS
 	],
 	sources: [FOB06, PRITCHARD_LOEB, SINGH_2022],
-	checks: [],
+	checks: checksOf('g21.brightness'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z, Ts_K, x_HI, backgroundFactor: factor }): Computed {
-		const opened = gasOf(cosmology, Yp);
+	followsEdition: true,
+	compute(
+		{ cosmology, Yp, z, Ts_K, x_HI, backgroundFactor: factor },
+		edition?: ConstantsEdition
+	): Computed {
+		const opened = gasOf(cosmology, Yp, edition);
 		if (!opened.ok) return opened;
 		const { gas } = opened;
 		const background = factor * gas.background(1 + z);

@@ -1,4 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { heliumInput } from '../thermal/gas.ts';
 import { thermalHistory } from '../thermal/history.ts';
@@ -13,6 +14,7 @@ import {
 import { COLLISION_RATES, collisionalCoupling } from './collisions.ts';
 import { brightnessOf, depthScale, spinTemperature } from './hydrogen-line.ts';
 import { FOB06, PRITCHARD_LOEB, SIGN_CONVENTION, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** The 21 cm line before any star: spins tied to unheated gas by collisions alone. Brightness in mK, T_s in K. */
 export const darkAges = defineCalculator({
@@ -57,10 +59,11 @@ export const darkAges = defineCalculator({
 		...Object.values(COLLISION_RATES).map(({ source }) => ({ title: source })),
 		...THERMAL_SOURCES
 	],
-	checks: [],
+	checks: checksOf('g21.dark_ages'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z }): Computed {
-		const opened = thermalHistory(cosmology, Yp);
+	followsEdition: true,
+	compute({ cosmology, Yp, z }, edition?: ConstantsEdition): Computed {
+		const opened = thermalHistory(cosmology, Yp, undefined, edition);
 		if (!opened.ok) return opened;
 		const { gas, at } = opened.history;
 		const { x_e: found, Tk } = at(z);

@@ -1,4 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { checksOf } from '../published-checks.ts';
 import { heliumInput } from '../thermal/gas.ts';
@@ -109,8 +110,12 @@ export const deepest = defineCalculator({
 	],
 	checks: checksOf('g21.deepest'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z, gasFactor, backgroundFactor: factor }): Computed {
-		const opened = thermalHistory(cosmology, Yp);
+	followsEdition: true,
+	compute(
+		{ cosmology, Yp, z, gasFactor, backgroundFactor: factor },
+		edition?: ConstantsEdition
+	): Computed {
+		const opened = thermalHistory(cosmology, Yp, undefined, edition);
 		if (!opened.ok) return opened;
 		const { gas, at } = opened.history;
 		const state = at(z);

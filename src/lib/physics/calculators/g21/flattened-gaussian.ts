@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { DISPUTED_TROUGH, SIGN_CONVENTION, SINGH_2022, troughWarnings } from './signal.ts';
 import { amplitude, megahertz, profile } from './trough-inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A trough with a flat floor: −A(1 − e^(−τe^B))/(1 − e^(−τ)) in K, with full width w at half depth in MHz. At τ = 0 it is
@@ -51,7 +51,7 @@ export const flattenedGaussian = defineCalculator({
 		},
 		SINGH_2022
 	],
-	checks: [],
+	checks: checksOf('g21.flattened_gaussian'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ A, nu, nu0, w, tau }): Computed {
 		// log1p and expm1 keep the digits of a small τ, where the floor is hardly flat.
@@ -62,7 +62,7 @@ export const flattenedGaussian = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: troughWarnings(-1000 * A, nu0)
 		};
 	}

@@ -1,6 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { checksOf } from '../published-checks.ts';
-import { exactly } from '../uncertainties.ts';
 import { FOB06, kelvin } from './signal.ts';
 import { megahertz } from './trough-inputs.ts';
 
@@ -65,6 +64,6 @@ export const foreground = defineCalculator({
 	compute({ Tref_K, nuref_MHz, nu_MHz, index, signal_K }): Computed {
 		const Tsky = Tref_K * (nu_MHz / nuref_MHz) ** index;
 		const values = { Tsky, ratio: Tsky / signal_K };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { DISPUTED_TROUGH, SIGN_CONVENTION, SINGH_2022, troughWarnings } from './signal.ts';
 import { amplitude, megahertz, profile } from './trough-inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** A bell-shaped trough: −A exp(−(ν−ν₀)²/2σ²) in K, frequencies in MHz. */
 export const gaussian = defineCalculator({
@@ -30,14 +30,14 @@ export const gaussian = defineCalculator({
 		{ title: 'The normal curve; its use as a fit is a convention of the field', fromMemory: true },
 		SINGH_2022
 	],
-	checks: [],
+	checks: checksOf('g21.gaussian'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ A, nu, nu0, sigma }): Computed {
 		const values = { T: -A * Math.exp(-0.5 * ((nu - nu0) / sigma) ** 2) };
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: troughWarnings(-1000 * A, nu0)
 		};
 	}

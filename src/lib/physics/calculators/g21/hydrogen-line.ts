@@ -2,11 +2,11 @@
  * The 21 cm line in the gas of an expanding universe: optical depth, brightness, and what ties the spins to gas and light.
  * Furlanetto, Oh & Briggs 2006, Phys. Rep. 433, 181 (“FOB06”); Field 1958.
  */
-import { constants } from '../../constants/index.ts';
+import { constants, type ConstantsEdition } from '../../constants/index.ts';
 import type { Gas } from '../thermal/gas.ts';
 import { REST_MHZ } from './rest-line.ts';
 
-const { h, k, c, e, m_e, eps_0 } = constants.physical;
+const { h, k, c, e } = constants.physical;
 
 /** 1/s: spontaneous emission of the line (recalled; FOB06 use 2.85e-15, which moves couplings and depth by 1.2 %). */
 export const EMISSION_RATE = 2.8843e-15;
@@ -29,7 +29,12 @@ export function spinTemperature(
 }
 
 /** x_α for J in photons cm⁻² s⁻¹ Hz⁻¹ sr⁻¹ at u = 1 + z, against a background of 2.7255 K now. */
-export function lymanAlphaCoupling(S_alpha: number, J: number, u: number): number {
+export function lymanAlphaCoupling(
+	S_alpha: number,
+	J: number,
+	u: number,
+	{ physical: { m_e, eps_0 } }: ConstantsEdition = constants
+): number {
 	const chargeSquared = e.value ** 2 / (4 * Math.PI * eps_0.value);
 	const perSquareMetre = J * 1e4;
 	return (

@@ -1,6 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { beyondTables, COLLISION_RATES, collisionRate, type CollisionPair } from './collisions.ts';
 import { kelvin } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Rate coefficient in cm³/s at which one sort of collision flips hydrogen's spin, from 1 K to 10⁴ or 2 × 10⁴ K. */
 export const kappa = defineCalculator({
@@ -45,7 +46,7 @@ export const kappa = defineCalculator({
 		}
 	],
 	sources: Object.values(COLLISION_RATES).map(({ source }) => ({ title: source })),
-	checks: [],
+	checks: checksOf('g21.kappa'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ pair, T_K }): Computed {
 		return {

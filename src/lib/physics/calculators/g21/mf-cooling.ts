@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed, type NumberInput } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { BARKANA_2018, NEW_PHYSICS, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 function pure(
 	label: string,
@@ -67,10 +67,10 @@ export const mfCooling = defineCalculator({
 		},
 		BARKANA_2018
 	],
-	checks: [],
+	checks: checksOf('g21.mf_cooling'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ alpha, z0, beta, z }): Computed {
 		const values = { slope: alpha / 3 + ((2 + alpha) / 3) * Math.expm1(-((z / z0) ** beta)) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

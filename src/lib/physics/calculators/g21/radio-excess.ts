@@ -2,6 +2,7 @@ import { defineCalculator, type Computed } from '../../calculator.ts';
 import { dueTo } from '../uncertainties.ts';
 import { REST_MHZ, REST_RELATIVE_UNCERTAINTY } from './rest-line.ts';
 import { NEW_PHYSICS, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Background then, in K, with a radio glow beside the cosmic one: T₀(1+z)[1 + A (ν/78 MHz)^β]. */
 export const radioExcess = defineCalculator({
@@ -75,7 +76,7 @@ export const radioExcess = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('g21.radio_excess'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ Tcmb0, z, A_r, beta }): Computed {
 		const excess = A_r * (REST_MHZ / (1 + z) / 78) ** beta;

@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { kelvin } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Listening time until thermal noise has fallen to `rms`: (T_sys/rms)²/B, in s and h. */
 export const radiometer = defineCalculator({
@@ -54,11 +54,11 @@ export const radiometer = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('g21.radiometer'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ Tsys_K, rms_K, bandwidth_Hz }): Computed {
 		const time = (Tsys_K / rms_K) ** 2 / bandwidth_Hz;
 		const values = { time, time_h: time / 3600 };
-		return { ok: true, values, uncertainties: exactly(values), warnings: ['thermal-only'] };
+		return { ok: true, values, uncertainties: 'exact', warnings: ['thermal-only'] };
 	}
 });

@@ -322,8 +322,8 @@ describe('refusals', () => {
 		['g21.brightness', { cosmology: bare, z: 17.2, Ts_K: 7 }, 'no-gas', /Ob0/],
 		['g21.deepest', { cosmology: { set: 'Simple' }, z: 17.2 }, 'no-background', /Tcmb0/],
 		['g21.deepest', { cosmology, z: 17.2, backgroundFactor: 0.5 }, 'out-of-range', /at least 1/],
-		['g21.dark_ages', { cosmology: bare, z: 85 }, 'no-gas', /Planck18/],
-		['g21.x_c', { cosmology: bare, z: 85, Tk_K: 100, x_e: 0 }, 'no-gas', /Planck18/],
+		['g21.dark_ages', { cosmology: bare, z: 85 }, 'no-gas', /Planck 2018/],
+		['g21.x_c', { cosmology: bare, z: 85, Tk_K: 100, x_e: 0 }, 'no-gas', /Planck 2018/],
 		['g21.adiabatic', { cosmology: { set: 'Simple' }, z: 17 }, 'no-gas', /Tcmb0/],
 		['g21.tk_for_depth', { cosmology, z: 17.2, depth_mK: 40 }, 'too-bright', /brighter than/],
 		[

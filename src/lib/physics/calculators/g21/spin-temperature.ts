@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed, type NumberInput } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { spinTemperature } from './hydrogen-line.ts';
 import { FIELD_1958, FOB06, kelvin } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 function coupling(label: string, symbol: string, initial: number): NumberInput {
 	return {
@@ -55,10 +55,10 @@ export const spinTemperatureCalculator = defineCalculator({
 	],
 	warnings: [],
 	sources: [FIELD_1958, FOB06],
-	checks: [],
+	checks: checksOf('g21.spin_temperature'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ Trad_K, Tk_K, x_alpha, x_c, Tc_K }): Computed {
 		const values = { Ts: spinTemperature(Trad_K, Tk_K, { x_alpha, x_c }, Tc_K ?? Tk_K) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

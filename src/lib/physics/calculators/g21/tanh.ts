@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** A step from 0 to A_ref around z₀: A_ref/2 [1 + tanh((z₀ − z)/Δz)]. */
 export const tanh = defineCalculator({
@@ -46,11 +46,11 @@ export const tanh = defineCalculator({
 		{ title: 'Mirocha, Harker & Burns 2015, ApJ 813, 11', fromMemory: true },
 		{ title: 'Harker et al. 2016, MNRAS 455, 3829', fromMemory: true }
 	],
-	checks: [],
+	checks: checksOf('g21.tanh'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ Aref, z0, dz, z }): Computed {
 		// 1 + tanh x loses its digits far before the step; 2/(1 + e^(−2x)) doesn't.
 		const values = { A: Aref / (1 + Math.exp((-2 * (z0 - z)) / dz)) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

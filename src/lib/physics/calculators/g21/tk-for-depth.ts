@@ -1,4 +1,5 @@
 import { defineCalculator, refuse, type Computed, type Refusal } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { brentRoot } from '../../numerics/roots.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { checksOf } from '../published-checks.ts';
@@ -82,8 +83,9 @@ export const tkForDepth = defineCalculator({
 	sources: [BARKANA_2018, FOB06, SINGH_2022],
 	checks: checksOf('g21.tk_for_depth'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z, depth_mK: depth }): Computed {
-		const opened = gasOf(cosmology, Yp);
+	followsEdition: true,
+	compute({ cosmology, Yp, z, depth_mK: depth }, edition?: ConstantsEdition): Computed {
+		const opened = gasOf(cosmology, Yp, edition);
 		if (!opened.ok) return opened;
 		const { gas } = opened;
 		const scale = linearScaleMk(gas, z);
@@ -116,7 +118,7 @@ export const tkForDepth = defineCalculator({
 		};
 
 		function isColderThanUnheated(temperature: number): boolean {
-			const history = thermalHistory(cosmology, Yp);
+			const history = thermalHistory(cosmology, Yp, undefined, edition);
 			return history.ok && temperature < history.history.at(z).Tk;
 		}
 	}

@@ -1,7 +1,9 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { codata2018 } from '../sources.ts';
 import { lymanAlphaCoupling } from './hydrogen-line.ts';
 import { FIELD_1958, FOB06, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** How strongly Lyman α light of intensity J ties hydrogen's spins to the gas: 1.7841 × 10¹¹ S J/(1+z). */
 export const lymanAlpha = defineCalculator({
@@ -58,9 +60,10 @@ export const lymanAlpha = defineCalculator({
 		FOB06,
 		codata2018('h, k, e, m_e, c, ε₀')
 	],
-	checks: [],
+	checks: checksOf('g21.x_alpha'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ S_alpha, J, z }): Computed {
-		return { ok: true, values: { x_alpha: lymanAlphaCoupling(S_alpha, J, 1 + z) } };
+	followsEdition: true,
+	compute({ S_alpha, J, z }, edition?: ConstantsEdition): Computed {
+		return { ok: true, values: { x_alpha: lymanAlphaCoupling(S_alpha, J, 1 + z, edition) } };
 	}
 });

@@ -1,9 +1,11 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { gasOf, heliumInput } from '../thermal/gas.ts';
 import { UNIVERSE_WARNINGS, universeWarnings } from '../thermal/sources.ts';
 import { beyondTables, COLLISION_RATES, collisionalCoupling } from './collisions.ts';
 import { FOB06, kelvin, signalRedshift } from './signal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** How strongly collisions tie hydrogen's spins to gas of a given temperature, compared with the background. */
 export const collisional = defineCalculator({
@@ -54,10 +56,11 @@ export const collisional = defineCalculator({
 		...UNIVERSE_WARNINGS
 	],
 	sources: [FOB06, ...Object.values(COLLISION_RATES).map(({ source }) => ({ title: source }))],
-	checks: [],
+	checks: checksOf('g21.x_c'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z, Tk_K, x_e }): Computed {
-		const opened = gasOf(cosmology, Yp);
+	followsEdition: true,
+	compute({ cosmology, Yp, z, Tk_K, x_e }, edition?: ConstantsEdition): Computed {
+		const opened = gasOf(cosmology, Yp, edition);
 		if (!opened.ok) return opened;
 		return {
 			ok: true,

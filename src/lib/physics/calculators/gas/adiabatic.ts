@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { gammaInput, gasTemperature } from './ideal.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A gas that changes its volume by a factor r without heat getting in or out: temperature T r^(1−γ) in K, and pressure
@@ -53,10 +53,10 @@ export const adiabaticGas = defineCalculator({
 	],
 	warnings: [],
 	sources: [openStax(2, '§3.6, adiabatic processes')],
-	checks: [],
+	checks: checksOf('gas.adiabatic'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ T_K: T, gamma, volumeRatio: r }): Computed {
 		const values = { T: T * r ** (1 - gamma), pressureRatio: r ** -gamma };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

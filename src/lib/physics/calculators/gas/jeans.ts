@@ -4,8 +4,9 @@ import { convert } from '../../units/units.ts';
 import { dueToG, G } from '../gravity/newton.ts';
 import { codata2018, IAU_NOMINAL } from '../sources.ts';
 import { gasTemperature } from './ideal.ts';
+import { checksOf } from '../published-checks.ts';
 
-const { k, m_u } = constants.physical;
+const { k } = constants.physical;
 const { GM_sun } = constants.astronomical;
 
 /**
@@ -94,10 +95,11 @@ export const jeans = defineCalculator({
 		codata2018('k, m_u and G'),
 		IAU_NOMINAL
 	],
-	checks: [],
+	checks: checksOf('gas.jeans'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ T_K: T, mu, n_m3: n }): Computed {
-		const particle = mu * m_u.value;
+	followsEdition: true,
+	compute({ T_K: T, mu, n_m3: n }, { physical } = constants): Computed {
+		const particle = mu * physical.m_u.value;
 		const density = particle * n;
 		const sound = Math.sqrt((k.value * T) / particle);
 		const metres = sound * Math.sqrt(Math.PI / (G * density));

@@ -11,8 +11,7 @@ import { codata2018 } from '../sources.ts';
 import { dueTo } from '../uncertainties.ts';
 import { gammaInput, gasTemperature } from './ideal.ts';
 
-const { k, m_u, c } = constants.physical;
-const MASS_SHARE = m_u.uncertainty / m_u.value;
+const { k, c } = constants.physical;
 
 /**
  * Speeds in an ideal gas at T (K) of particles of mass m (u), in m/s: most probable √(2kT/m), mean √(8kT/πm), root mean
@@ -96,7 +95,8 @@ export const gasSpeeds = defineCalculator({
 	],
 	checks: checksOf('gas.speeds'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ T_K: T, mass_u, gamma }): Computed {
+	followsEdition: true,
+	compute({ T_K: T, mass_u, gamma }, { physical: { m_u } } = constants): Computed {
 		const thermal = (k.value * T) / (mass_u * m_u.value);
 		const rms = Math.sqrt(3 * thermal);
 		if (rms >= c.value) {
@@ -120,7 +120,7 @@ export const gasSpeeds = defineCalculator({
 		} else values.sound = Math.sqrt(gamma * thermal);
 		const uncertainties: Record<string, Uncertainty> = {};
 		for (const [key, value] of Object.entries(values)) {
-			uncertainties[key] = dueTo(MASS_SHARE, value, -0.5);
+			uncertainties[key] = dueTo(m_u.uncertainty / m_u.value, value, -0.5);
 		}
 		return {
 			ok: true,

@@ -8,8 +8,8 @@ import {
 import { constants } from '../../constants/index.ts';
 import { convert } from '../../units/units.ts';
 import { codata2018, IAU_NOMINAL } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { printNumber } from '../wording.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { c } = constants.physical;
 const { GM_sun } = constants.astronomical;
@@ -144,7 +144,7 @@ export const inspiral = defineCalculator({
 		IAU_NOMINAL,
 		codata2018('c, exact by the SI')
 	],
-	checks: [],
+	checks: checksOf('gw.inspiral'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ m1_Msun: m1, m2_Msun: m2, distance_Mpc, f_Hz: f, arm_m: arm }): Computed {
 		const both = m1 + m2;
@@ -173,7 +173,7 @@ export const inspiral = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			withheld,
 			warnings: f > lastStableFrequency / 2 ? ['close-to-the-end'] : []
 		};

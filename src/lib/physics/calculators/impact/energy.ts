@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { convert } from '../../units/units.ts';
 import { openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Escape speed of the Earth, m/s: the least at which a body arrives that fell from afar. */
 const SLOWEST_FROM_AFAR = 11_200;
@@ -109,7 +109,7 @@ export const impactEnergy = defineCalculator({
 			doi: '10.6028/NIST.SP.811e2008'
 		}
 	],
-	checks: [],
+	checks: checksOf('impact.energy'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ diameter_m: d, density_kgm3: density, speed_ms: v }): Computed {
 		const mass = (Math.PI / 6) * density * d ** 3;
@@ -118,7 +118,7 @@ export const impactEnergy = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: [
 				...(v < SLOWEST_FROM_AFAR ? ['too-slow'] : []),
 				...(v > FASTEST_BOUND ? ['not-from-here'] : [])

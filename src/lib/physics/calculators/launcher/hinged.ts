@@ -3,6 +3,7 @@ import { LAUNCHER_CAUTION } from '../energy/caution.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { STANDARD_GRAVITY_SOURCE } from '../sources.ts';
 import { counterweightHeight, projectileAt, throwOf, velocityOf, type Machine } from './machine.ts';
+import { checksOf } from '../published-checks.ts';
 
 function length(label: string, symbol: string, [min, initial]: [number, number]): NumberInput {
 	return { kind: 'number', label, symbol, quantity: 'length', unit: 'm', min, max: 100, initial };
@@ -165,7 +166,7 @@ export const hinged = defineCalculator({
 		},
 		STANDARD_GRAVITY_SOURCE
 	],
-	checks: [],
+	checks: checksOf('launcher.hinged'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute(inputs): Computed {
 		const machine: Machine = {

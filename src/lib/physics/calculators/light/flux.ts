@@ -3,7 +3,6 @@ import { constants } from '../../constants/index.ts';
 import { SUN_CAUTION } from '../cautions.ts';
 import { checksOf } from '../published-checks.ts';
 import { IAU_NOMINAL, openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { EXPANSION_COUNTS_M, tooFar } from './far.ts';
 
 const { L_sun, au } = constants.astronomical;
@@ -72,6 +71,6 @@ export const flux = defineCalculator({
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ L_W: L, d_m: d }): Computed {
 		const values = { flux: L / (4 * Math.PI) / d / d };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

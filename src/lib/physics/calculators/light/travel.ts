@@ -3,7 +3,6 @@ import { constants } from '../../constants/index.ts';
 import { convert, unitOf } from '../../units/units.ts';
 import { checksOf } from '../published-checks.ts';
 import { codata2018, IAU_LENGTHS } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 
 const { c } = constants.physical;
 
@@ -82,7 +81,7 @@ export const lightTravel = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: convert(value, unit, 'Mpc') > FAR_MPC ? ['space-grows'] : []
 		};
 	}

@@ -1,5 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { bandOf } from './bands.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** The part of the spectrum a vacuum wavelength (nm, above 0) lies in, by the convention of `bands.ts`. */
 export const band = defineCalculator({
@@ -41,7 +42,7 @@ export const band = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('line.band'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ wavelength_nm }): Computed {
 		return {

@@ -35,5 +35,6 @@ const OPAQUE: readonly { from: number; to: number }[] = [
 ];
 
 export function isBlockedByAir(wavelengthNm: number): boolean {
-	return OPAQUE.some((gap) => wavelengthNm >= gap.from && wavelengthNm < gap.to);
+	for (const { from, to } of OPAQUE) if (wavelengthNm >= from && wavelengthNm < to) return true;
+	return false;
 }

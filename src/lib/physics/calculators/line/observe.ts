@@ -12,6 +12,7 @@ import {
 	wavelengthOfEnergy,
 	wavelengthOfFrequency
 } from './spectrum.ts';
+import { checksOf } from '../published-checks.ts';
 
 const LYMAN_ALPHA_NM = 121.567;
 
@@ -87,7 +88,7 @@ export const observe = defineCalculator({
 		}
 	],
 	sources: REDSHIFT_SOURCES,
-	checks: [],
+	checks: checksOf('line.observe'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ restWavelength_nm, restFrequency_Hz, restEnergy_eV, z }): Computed {
 		const u = 1 + z;
@@ -99,17 +100,16 @@ export const observe = defineCalculator({
 					: fromEnergy(restEnergy_eV / u);
 		return {
 			ok: true,
-			values: { ...light, stretch: u },
-			uncertainties: {
-				observedWavelength: 'exact',
-				observedFrequency: 'exact',
-				observedEnergy: 'exact',
-				stretch: 'exact'
+			values: {
+				observedWavelength: light.observedWavelength,
+				observedFrequency: light.observedFrequency,
+				observedEnergy: light.observedEnergy,
+				stretch: u
 			},
-			warnings: [
-				...redshiftWarnings(z),
-				...(isBlockedByAir(light.observedWavelength) ? ['blocked-by-air'] : [])
-			]
+			uncertainties: 'exact',
+			warnings: isBlockedByAir(light.observedWavelength)
+				? [...redshiftWarnings(z), 'blocked-by-air']
+				: redshiftWarnings(z)
 		};
 	}
 });

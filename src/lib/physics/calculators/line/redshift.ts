@@ -7,6 +7,7 @@ import {
 	wavelengthOfEnergy,
 	wavelengthOfFrequency
 } from './spectrum.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Redshift from a line at rest and as observed: z = (λ_obs − λ_rest)/λ_rest, the difference formed first so that a
@@ -52,7 +53,7 @@ export const redshift = defineCalculator({
 		}
 	],
 	sources: REDSHIFT_SOURCES,
-	checks: [],
+	checks: checksOf('line.redshift'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute(inputs): Computed {
 		const z = redshiftOf(inputs);

@@ -1,8 +1,9 @@
 import { defineCalculator, refuse, type Computed, type NumberInput } from '../../calculator.ts';
+import { codata2018 } from '../../constants/codata-2018.ts';
 import { constants } from '../../constants/index.ts';
-import { codata2018 } from '../sources.ts';
+import { codata2018 as codata2018Source } from '../sources.ts';
+import { checksOf } from '../published-checks.ts';
 
-const { R_inf, m_e, m_p } = constants.physical;
 const MOST_LEVELS = 1000;
 
 function level(label: string, symbol: string, min: number, initial: number): NumberInput {
@@ -55,10 +56,11 @@ export const rydberg = defineCalculator({
 			symbol: 'M',
 			quantity: 'mass',
 			unit: 'kg',
-			min: m_e.value,
+			min: codata2018.m_e.value,
 			max: 1e-24,
-			initial: m_p.value,
+			initial: codata2018.m_p.value,
 			optional: true,
+			absent: 'a proton',
 			log: true
 		}
 	},
@@ -96,16 +98,19 @@ export const rydberg = defineCalculator({
 		}
 	],
 	sources: [
-		codata2018('R∞, mₑ, m_p'),
+		codata2018Source('R∞, mₑ, m_p'),
 		{
 			title: 'Bohr 1913, On the constitution of atoms and molecules, Phil. Mag. 26, 1',
 			doi: '10.1080/14786441308634955',
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('line.rydberg'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ nLower, nUpper, Z, nucleusMass_kg: M }): Computed {
+	followsEdition: true,
+	compute({ nLower, nUpper, Z, nucleusMass_kg }, { physical } = constants): Computed {
+		const { R_inf, m_e, m_p } = physical;
+		const M = nucleusMass_kg ?? m_p.value;
 		for (const [key, value] of Object.entries({ nLower, nUpper, Z })) {
 			if (!Number.isInteger(value)) {
 				return refuse('not-whole', 'Levels and charges are whole numbers. Give one.', key);

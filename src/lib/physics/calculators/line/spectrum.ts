@@ -6,9 +6,11 @@ const { c, h, e } = constants.physical;
 
 /** hc in eV nm: the product of a photon's energy and its wavelength. */
 const EV_NM = ((h.value * c.value) / e.value) * 1e9;
+/** c in Hz nm: the product of a frequency and its wavelength. */
+const HERTZ_NM = c.value * 1e9;
 
-export const frequencyOfWavelength = (nm: number) => (c.value * 1e9) / nm;
-export const wavelengthOfFrequency = (hertz: number) => (c.value * 1e9) / hertz;
+export const frequencyOfWavelength = (nm: number) => HERTZ_NM / nm;
+export const wavelengthOfFrequency = (hertz: number) => HERTZ_NM / hertz;
 export const energyOfWavelength = (nm: number) => EV_NM / nm;
 export const wavelengthOfEnergy = (ev: number) => EV_NM / ev;
 export const energyOfFrequency = (hertz: number) => (h.value * hertz) / e.value;
@@ -83,5 +85,6 @@ export const REDSHIFT_WARNINGS: WarningSpec[] = [
 
 /** Codes of the warnings that hold at redshift z. */
 export function redshiftWarnings(z: number): string[] {
-	return [...(Math.abs(z) < 0.002 ? ['near-motion'] : []), ...(z > 30 ? ['unseen'] : [])];
+	if (Math.abs(z) < 0.002) return ['near-motion'];
+	return z > 30 ? ['unseen'] : [];
 }

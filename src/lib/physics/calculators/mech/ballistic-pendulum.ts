@@ -2,8 +2,8 @@ import { defineCalculator, type Computed } from '../../calculator.ts';
 import { PROJECTILE_CAUTION } from '../cautions.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { openStax, STANDARD_GRAVITY_SOURCE } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { heightInput, massInput } from './inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Speed, m/s, of a small body (kg) that sticks in a hanging block (kg) and lifts it by h (m): (m+M)/m √(2gh). */
 export const ballisticPendulum = defineCalculator({
@@ -39,10 +39,10 @@ export const ballisticPendulum = defineCalculator({
 		openStax(1, '§9.4, types of collisions'),
 		STANDARD_GRAVITY_SOURCE
 	],
-	checks: [],
+	checks: checksOf('mech.ballistic_pendulum'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ m, M, h, g }): Computed {
 		const values = { speed: ((m + M) / m) * Math.sqrt(2 * g * h) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

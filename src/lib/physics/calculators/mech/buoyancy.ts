@@ -2,7 +2,6 @@ import { defineCalculator, type Computed, type NumberInput } from '../../calcula
 import { gravityInput } from '../energy/gravity.ts';
 import { checksOf } from '../published-checks.ts';
 import { openStax, STANDARD_GRAVITY_SOURCE } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 
 function density(label: string, symbol: string, initial: number): NumberInput {
 	return {
@@ -101,7 +100,7 @@ export const buoyancy = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: rhoBody > rhoFluid ? ['sinks'] : []
 		};
 	}

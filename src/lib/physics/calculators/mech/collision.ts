@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed, type NumberInput } from '../../calculator.ts';
 import { openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { massInput } from './inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 function speed(label: string, symbol: string, initial: number): NumberInput {
 	return {
@@ -65,7 +65,7 @@ export const collision = defineCalculator({
 	assumptions: ['They do meet, on one line, and nothing else pushes.', 'Neither spins.'],
 	warnings: [],
 	sources: [openStax(1, '§9.4, types of collisions')],
-	checks: [],
+	checks: checksOf('mech.collision'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ m1, m2, u1, u2, e }): Computed {
 		const both = m1 + m2;
@@ -75,6 +75,6 @@ export const collision = defineCalculator({
 			v2: (m1 * u1 + m2 * u2 + m1 * e * closing) / both,
 			energyLost: 0.5 * m1 * (m2 / both) * (1 - e) * (1 + e) * closing * closing
 		};
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

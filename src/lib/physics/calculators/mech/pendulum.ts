@@ -3,7 +3,6 @@ import { sineOfDegrees } from '../../numerics/degrees.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { checksOf } from '../published-checks.ts';
 import { STANDARD_GRAVITY_SOURCE } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 
 /**
  * Swing of a weight on a thread of length L (m) let go at θ₀ (degrees, below 180): period 2π√(L/g) for small swings and
@@ -108,7 +107,7 @@ export const pendulum = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: values.exact > 1.005 * small ? ['wide-swing'] : []
 		};
 	}

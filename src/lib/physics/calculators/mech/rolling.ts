@@ -1,8 +1,8 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { openStax, STANDARD_GRAVITY_SOURCE } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { heightInput } from './inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Speed, m/s, of a body that has rolled down by a height h (m) without slipping: √(2gh/(1+k)), k = I/mr². */
 export const rolling = defineCalculator({
@@ -48,10 +48,10 @@ export const rolling = defineCalculator({
 		}
 	],
 	sources: [openStax(1, '§11.1, rolling motion'), STANDARD_GRAVITY_SOURCE],
-	checks: [],
+	checks: checksOf('mech.rolling'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ height_m: h, k, g }): Computed {
 		const values = { speed: Math.sqrt((2 * g * h) / (1 + k)) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

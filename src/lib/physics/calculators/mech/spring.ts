@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed, type Refusal } from '../../calculator.ts';
 import { openStax } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { massInput } from './inputs.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A weight on a spring of stiffness k (N/m): time there and back 2π√(m/k) in s; drawn out by x (m), energy kx²/2 in J and
@@ -66,7 +66,7 @@ export const spring = defineCalculator({
 	],
 	warnings: [],
 	sources: [openStax(1, '§15.1, simple harmonic motion')],
-	checks: [],
+	checks: checksOf('mech.spring'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ k, mass_kg: m, x_m: x }): Computed {
 		const values: Record<string, number> = { period: 2 * Math.PI * Math.sqrt(m / k) };
@@ -78,7 +78,7 @@ export const spring = defineCalculator({
 			values.energy = (k * x * x) / 2;
 			values.maxSpeed = x * Math.sqrt(k / m);
 		}
-		return { ok: true, values, uncertainties: exactly(values), withheld };
+		return { ok: true, values, uncertainties: 'exact', withheld };
 	}
 });
 

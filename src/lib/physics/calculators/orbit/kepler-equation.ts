@@ -1,5 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 const TURN = 2 * Math.PI;
 
@@ -63,14 +63,14 @@ export const keplerEquation = defineCalculator({
 		{ title: 'Kepler 1609, Astronomia nova', fromMemory: true },
 		{ title: 'Murray & Dermott 1999, Solar System Dynamics', locator: '§2.4', fromMemory: true }
 	],
-	checks: [],
+	checks: checksOf('orbit.kepler_equation'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ M_rad: M, e }): Computed {
 		const turns = Math.round(M / TURN);
 		const rest = M - turns * TURN;
 		const E = Math.sign(rest) * eccentricAnomaly(Math.abs(rest), e);
 		const values = { E: turns * TURN + E, trueAnomaly: turns * TURN + E + lead(E, e) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });
 

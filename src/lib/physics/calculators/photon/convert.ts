@@ -13,9 +13,15 @@ import {
 	wavelengthOfFrequency
 } from '../line/spectrum.ts';
 import { codata2018, EINSTEIN_1905 } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { h, c } = constants.physical;
+
+/** hc in J nm, and h in kg m/s nm. */
+const JOULE_NM = h.value * c.value * 1e9;
+const MOMENTUM_NM = h.value * 1e9;
+const joulesOfWavelength = (nm: number) => JOULE_NM / nm;
+const momentumOfWavelength = (nm: number) => MOMENTUM_NM / nm;
 
 function given(
 	label: string,
@@ -84,7 +90,7 @@ export const photon = defineCalculator({
 	assumptions: ['In vacuum.', 'All constants here are exact by the SI.'],
 	warnings: [],
 	sources: [codata2018('h, c and e, exact by the SI'), EINSTEIN_1905],
-	checks: [],
+	checks: checksOf('photon.convert'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute(inputs): Computed {
 		const nm = wavelengthOf(inputs);
@@ -92,10 +98,35 @@ export const photon = defineCalculator({
 			wavelength: nm,
 			frequency: inputs.frequency_Hz ?? frequencyOfWavelength(nm),
 			energy: inputs.energy_eV ?? energyOfWavelength(nm),
-			energyJ: (h.value * c.value * 1e9) / nm,
-			momentum: inputs.momentum_kgms ?? (h.value * 1e9) / nm
+			energyJ: joulesOfWavelength(nm),
+			momentum: inputs.momentum_kgms ?? momentumOfWavelength(nm)
 		};
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
+	},
+	curve(_inputs, key, places) {
+		const wavelength =
+			key === 'wavelength_nm' ? places : places.map((place) => wavelengthOf({ [key]: place }));
+		const frequency = new Float64Array(places.length);
+		const energy = new Float64Array(places.length);
+		const energyJ = new Float64Array(places.length);
+		const momentum = new Float64Array(places.length);
+		for (let index = 0; index < places.length; index += 1) {
+			const nm = wavelength[index]!;
+			frequency[index] = frequencyOfWavelength(nm);
+			energy[index] = energyOfWavelength(nm);
+			energyJ[index] = joulesOfWavelength(nm);
+			momentum[index] = momentumOfWavelength(nm);
+		}
+		return {
+			columns: {
+				wavelength,
+				// What is given stays as given.
+				frequency: key === 'frequency_Hz' ? places : frequency,
+				energy: key === 'energy_eV' ? places : energy,
+				energyJ,
+				momentum: key === 'momentum_kgms' ? places : momentum
+			}
+		};
 	}
 });
 
@@ -103,5 +134,5 @@ function wavelengthOf(inputs: CheckedInputs): number {
 	if (inputs.wavelength_nm !== undefined) return inputs.wavelength_nm as number;
 	if (inputs.frequency_Hz !== undefined) return wavelengthOfFrequency(inputs.frequency_Hz);
 	if (inputs.energy_eV !== undefined) return wavelengthOfEnergy(inputs.energy_eV);
-	return (h.value * 1e9) / inputs.momentum_kgms;
+	return MOMENTUM_NM / inputs.momentum_kgms;
 }

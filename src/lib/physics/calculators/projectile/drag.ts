@@ -12,6 +12,7 @@ import {
 	STANDARD_ATMOSPHERE
 } from './air.ts';
 import { landingOf } from './drag-path.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Flight of a ball through still air, drag with the square of the speed: range and apex in m, time in s, speeds in m/s, to
@@ -139,7 +140,7 @@ export const drag = defineCalculator({
 		STANDARD_ATMOSPHERE,
 		STANDARD_GRAVITY_SOURCE
 	],
-	checks: [],
+	checks: checksOf('projectile.drag'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ v0_ms, angle_deg, mass_kg, diameter_m, Cd, rho, h0_m, g_ms2 }): Computed {
 		const k = (Math.PI * rho * Cd * diameter_m ** 2) / (8 * mass_kg);

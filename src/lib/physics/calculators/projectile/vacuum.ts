@@ -3,6 +3,7 @@ import { cosineOfDegrees, sineOfDegrees } from '../../numerics/degrees.ts';
 import { LAUNCHER_CAUTION } from '../energy/caution.ts';
 import { gravityInput } from '../energy/gravity.ts';
 import { printNumber } from '../wording.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** One hundredth of the Earth's nominal radius: past it, flat ground and even gravity no longer hold. */
 const FLAT_GROUND_M = 63_781;
@@ -103,7 +104,7 @@ export const vacuum = defineCalculator({
 			locator: '9.806 65 m/s²'
 		}
 	],
-	checks: [],
+	checks: checksOf('projectile.vacuum'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ v0_ms: v0, angle_deg: angle, h0_m: h0, g_ms2: g }): Computed {
 		const up = v0 * sineOfDegrees(angle);

@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed, type NumberInput } from '../../calculator.ts';
 import { EINSTEIN_1905 } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 function share(label: string, symbol: string, initial: number): NumberInput {
 	return {
@@ -49,7 +49,7 @@ export const addSpeeds = defineCalculator({
 	assumptions: ['Both speeds lie along one line.', 'Flat space: no gravity.'],
 	warnings: [],
 	sources: [EINSTEIN_1905],
-	checks: [],
+	checks: checksOf('sr.add'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ beta1, beta2 }): Computed {
 		const product = beta1 * beta2;
@@ -57,6 +57,6 @@ export const addSpeeds = defineCalculator({
 		const under =
 			product < 0 ? 1 - Math.abs(beta1) + Math.abs(beta1) * (1 - Math.abs(beta2)) : 1 + product;
 		const values = { beta: (beta1 + beta2) / under };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

@@ -1,7 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { checksOf } from '../published-checks.ts';
 import { EINSTEIN_1905 } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 
 /**
  * Speed from a Lorentz factor (1 to 10¹⁰⁰): β = √((γ−1)(γ+1))/γ, and what is missing to the speed of light,
@@ -64,6 +63,6 @@ export const fromGamma = defineCalculator({
 		// The two roots apart, as their product would overflow for the largest factors.
 		const beta = (Math.sqrt(gamma - 1) * Math.sqrt(gamma + 1)) / gamma;
 		const values = { beta: Math.min(1, beta), one_minus_beta: 1 / (gamma * gamma * (1 + beta)) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });

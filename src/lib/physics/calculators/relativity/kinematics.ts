@@ -2,7 +2,6 @@ import { defineCalculator, type Computed, type Refusal } from '../../calculator.
 import { constants } from '../../constants/index.ts';
 import { checksOf } from '../published-checks.ts';
 import { EINSTEIN_1905 } from '../sources.ts';
-import { exactly } from '../uncertainties.ts';
 import { lessOne, lorentzFactor } from './lorentz.ts';
 
 const { c } = constants.physical;
@@ -114,6 +113,6 @@ export const kinematics = defineCalculator({
 				message: 'Give a time by its own clock to get that by ours.'
 			};
 		} else values.dilatedTime = gamma * properTime_s;
-		return { ok: true, values, uncertainties: exactly(values), withheld };
+		return { ok: true, values, uncertainties: 'exact', withheld };
 	}
 });

@@ -1,6 +1,6 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { constants } from '../../constants/index.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { c, g_0 } = constants.physical;
 const { ly, julianYear } = constants.astronomical;
@@ -96,7 +96,7 @@ export const rocketTrip = defineCalculator({
 	sources: [
 		{ title: 'Misner, Thorne & Wheeler 1973, Gravitation', locator: '§6.2', fromMemory: true }
 	],
-	checks: [],
+	checks: checksOf('sr.rocket_trip'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ accel_ms2: a, distance_ly, flip }): Computed {
 		const legs = flip === 'true' ? 2 : 1;
@@ -109,6 +109,6 @@ export const rocketTrip = defineCalculator({
 			shipTime: years * Math.log1p(x + root),
 			peakGamma: 1 + x
 		};
-		return { ok: true, values, uncertainties: exactly(values), warnings: ['no-fuel'] };
+		return { ok: true, values, uncertainties: 'exact', warnings: ['no-fuel'] };
 	}
 });

@@ -1,7 +1,7 @@
 import { defineCalculator, refuse, type Computed, type NumberInput } from '../../calculator.ts';
 import { constants } from '../../constants/index.ts';
 import { ROCKET_CAUTION } from '../cautions.ts';
-import { exactly } from '../uncertainties.ts';
+import { checksOf } from '../published-checks.ts';
 
 const { c } = constants.physical;
 
@@ -93,7 +93,7 @@ export const deltaV = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('rocket.deltav'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ ve_ms: ve, m0, m1 }): Computed {
 		if (m1 > m0) {
@@ -110,7 +110,7 @@ export const deltaV = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: deltav > c.value / 10 ? ['near-light'] : []
 		};
 	}

@@ -7,6 +7,7 @@ import {
 	roundedOutput,
 	tieInput
 } from './rules.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** A number to so many decimals, as text; −2 decimals are whole hundreds. */
 export const decimals = defineCalculator({
@@ -40,7 +41,7 @@ export const decimals = defineCalculator({
 	assumptions: ROUNDING_ASSUMPTIONS,
 	warnings: [],
 	sources: ROUNDING_SOURCES,
-	checks: [],
+	checks: checksOf('round.decimals'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ text, decimals: places, mode }): Computed {
 		const rounded = roundToPlace(decimalOf(text), -places, mode as Tie);

@@ -7,6 +7,7 @@ import {
 	roundedOutput,
 	tieInput
 } from './rules.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** A number to so many significant digits, as text. */
 export const significant = defineCalculator({
@@ -40,7 +41,7 @@ export const significant = defineCalculator({
 	assumptions: ROUNDING_ASSUMPTIONS,
 	warnings: [],
 	sources: ROUNDING_SOURCES,
-	checks: [],
+	checks: checksOf('round.significant'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ text, digits, mode }): Computed {
 		const rounded = roundToDigits(decimalOf(text), digits, mode as Tie);

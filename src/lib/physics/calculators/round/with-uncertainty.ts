@@ -17,6 +17,7 @@ import {
 	roundedOutput,
 	tieInput
 } from './rules.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * A value and its uncertainty in the concise form, 13.787(20): the uncertainty to one or two digits, the value to the same
@@ -65,7 +66,7 @@ export const withUncertainty = defineCalculator({
 	],
 	warnings: [],
 	sources: [gum('7.2.2 and 7.2.6'), ...ROUNDING_SOURCES],
-	checks: [],
+	checks: checksOf('round.with_uncertainty'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ x, u, digits, mode }): Computed {
 		const value = decimalOf(x);

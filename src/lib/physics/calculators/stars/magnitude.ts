@@ -172,12 +172,15 @@ function without(given: readonly string[]): Record<string, Refusal> {
 	return Object.fromEntries(Object.entries(NEEDS).filter(([key]) => !given.includes(key)));
 }
 
-function alone(key: string, value: number): Computed {
+const WITHOUT_PARALLAX = { fluxRatio: without(['fluxRatio']), Mbol: without(['Mbol']) };
+const WITH_PARALLAX = without(['distance', 'distanceLy', 'distmod']);
+
+function alone(key: keyof typeof WITHOUT_PARALLAX, value: number): Computed {
 	return {
 		ok: true,
 		values: { [key]: value },
 		uncertainties: { [key]: 'exact' },
-		withheld: without([key])
+		withheld: WITHOUT_PARALLAX[key]
 	};
 }
 
@@ -198,7 +201,7 @@ function fromParallax(p: number, u: number): Computed {
 			distanceLy: known(values.distanceLy),
 			distmod: known(5 / Math.LN10)
 		},
-		withheld: without(Object.keys(values)),
+		withheld: WITH_PARALLAX,
 		warnings: isWeak ? ['weak-parallax'] : []
 	};
 }

@@ -1,11 +1,9 @@
 /** The ordinary gas of an expanding universe: how much hydrogen, how fast it thins, and what light it swims in. SI units. */
 import { refuse, type NumberInput, type Refusal } from '../../calculator.ts';
-import { constants } from '../../constants/index.ts';
+import { constants, type ConstantsEdition } from '../../constants/index.ts';
 import { universeWithPast } from '../cosmology/limits.ts';
 import type { CosmologyParameters } from '../cosmology/parameters.ts';
 import { KM_PER_MPC, type Universe } from '../cosmology/universe.ts';
-
-const { m_u } = constants.physical;
 
 /** Atomic masses of ¹H and ⁴He in u (Wang et al. 2017, AME2016; from memory). */
 export const HYDROGEN_MASS_U = 1.00782503223;
@@ -40,7 +38,8 @@ export const heliumInput: NumberInput = {
 /** The gas of a universe with a Big Bang, ordinary matter and a background of light; refused otherwise. */
 export function gasOf(
 	parameters: CosmologyParameters,
-	Yp: number
+	Yp: number,
+	{ physical: { m_u } }: ConstantsEdition = constants
 ): { ok: true; gas: Gas } | { ok: false; refusal: Refusal } {
 	const opened = universeWithPast(parameters);
 	if (!opened.ok) return opened;
@@ -48,14 +47,14 @@ export function gasOf(
 	if (parameters.Ob0 === 0) {
 		return refuse(
 			'no-gas',
-			'This universe has no ordinary matter, so no gas. Give its share, Ob0, or name a set such as “Planck18”.',
+			'This universe has no ordinary matter, so no gas. Give its share, Ob0, or take a published set such as Planck 2018.',
 			'cosmology'
 		);
 	}
 	if (parameters.Tcmb0 === 0) {
 		return refuse(
 			'no-background',
-			'This universe has no background of light to compare with. Give its temperature, Tcmb0, or name a set such as “Planck18”.',
+			'This universe has no background of light to compare with. Give its temperature, Tcmb0, or take a published set such as Planck 2018.',
 			'cosmology'
 		);
 	}

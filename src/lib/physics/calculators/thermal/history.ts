@@ -6,7 +6,7 @@
  * the two Gaussians and the factor of RECFAST 1.5.2. Recombination coefficient of Péquignot, Petitjean & Boisson 1991.
  */
 import { refuse, type Refusal } from '../../calculator.ts';
-import { constants } from '../../constants/index.ts';
+import { constants, type ConstantsEdition } from '../../constants/index.ts';
 import { solveStiffPair, type Pair } from '../../numerics/rosenbrock.ts';
 import { naturalSpline } from '../../numerics/spline.ts';
 import type { CosmologyParameters } from '../cosmology/parameters.ts';
@@ -33,7 +33,7 @@ export interface ThermalHistory {
 
 type Opened = { ok: true; history: ThermalHistory } | { ok: false; refusal: Refusal };
 
-const { h, c, k, m_e, sigma, sigma_T } = constants.physical;
+const { h, c, k, sigma } = constants.physical;
 
 /** 1/m: from the second level to the continuum, and Lyman α (RECFAST 1.5.2, from memory). */
 const IONISATION = 1.096787737e7;
@@ -43,11 +43,22 @@ const TWO_PHOTON = 8.2245809;
 const SECOND_LEVEL_K = (h.value * c.value * (IONISATION - LYMAN_ALPHA)) / k.value;
 const LYMAN_ALPHA_K = (h.value * c.value * LYMAN_ALPHA) / k.value;
 const GROUND_K = (h.value * c.value * IONISATION) / k.value;
-/** 1/(m² K): (2π m_e k T/h²)^1.5 = (this × T)^1.5 */
-const THERMAL_WAVES = (2 * Math.PI * m_e.value * k.value) / h.value ** 2;
 const LYMAN_VOLUME = LYMAN_ALPHA ** -3 / (8 * Math.PI);
-/** 1/(s K⁴): 8 σ_T a_R/(3 m_e c), with a_R = 4σ/c. */
-const COMPTON = (8 * sigma_T.value * ((4 * sigma.value) / c.value)) / (3 * m_e.value * c.value);
+
+/** What the electron decides, by the edition. */
+interface Electrons {
+	/** 1/(m² K): (2π m_e k T/h²)^1.5 = (this × T)^1.5 */
+	thermalWaves: number;
+	/** 1/(s K⁴): 8 σ_T a_R/(3 m_e c), with a_R = 4σ/c. */
+	compton: number;
+}
+
+function electronsOf({ physical: { m_e, sigma_T } }: ConstantsEdition): Electrons {
+	return {
+		thermalWaves: (2 * Math.PI * m_e.value * k.value) / h.value ** 2,
+		compton: (8 * sigma_T.value * ((4 * sigma.value) / c.value)) / (3 * m_e.value * c.value)
+	};
+}
 
 /** Background temperatures now between which hydrogen is all ionised at z = 1700 and helium isn't yet. */
 const BACKGROUND_RANGE_K = [2.4, 4] as const;
@@ -69,19 +80,25 @@ const CACHE_SIZE = 16;
 export function thermalHistory(
 	parameters: CosmologyParameters,
 	Yp: number,
-	fudge: Fudge = 'recfast15'
+	fudge: Fudge = 'recfast15',
+	edition: ConstantsEdition = constants
 ): Opened {
-	const key = JSON.stringify([parameters, Yp, fudge]);
+	const key = JSON.stringify([parameters, Yp, fudge, edition.name]);
 	const kept = cache.get(key);
 	if (kept) return kept;
-	const opened = makeHistory(parameters, Yp, fudge);
+	const opened = makeHistory(parameters, Yp, fudge, edition);
 	if (cache.size >= CACHE_SIZE) cache.delete(cache.keys().next().value!);
 	cache.set(key, opened);
 	return opened;
 }
 
-function makeHistory(parameters: CosmologyParameters, Yp: number, fudge: Fudge): Opened {
-	const opened = gasOf(parameters, Yp);
+function makeHistory(
+	parameters: CosmologyParameters,
+	Yp: number,
+	fudge: Fudge,
+	edition: ConstantsEdition
+): Opened {
+	const opened = gasOf(parameters, Yp, edition);
 	if (!opened.ok) return opened;
 	const { gas } = opened;
 	const [coldest, hottest] = BACKGROUND_RANGE_K;
@@ -94,8 +111,9 @@ function makeHistory(parameters: CosmologyParameters, Yp: number, fudge: Fudge):
 	}
 	const first = Math.log1p(FIRST_Z);
 	const knots = knotsFrom(first);
-	const slope = slopeOf(gas, fudge);
-	const start: Pair = [saha(gas, 1 + FIRST_Z), gas.background(1 + FIRST_Z)];
+	const electrons = electronsOf(edition);
+	const slope = slopeOf(gas, fudge, electrons);
+	const start: Pair = [saha(gas, 1 + FIRST_Z, electrons), gas.background(1 + FIRST_Z)];
 	const states = solveStiffPair(slope, { x: first, y: start }, knots, TOLERANCE, MOST_STEPS);
 	if (!states?.flat().every((value) => value > 0 && Number.isFinite(value))) {
 		return refuse(
@@ -136,14 +154,18 @@ function knotsFrom(first: number): number[] {
 }
 
 /** Ionised share of hydrogen in balance: x²/(1−x) = S. */
-function saha(gas: Gas, u: number): number {
+function saha(gas: Gas, u: number, { thermalWaves }: Electrons): number {
 	const T = gas.background(u);
-	const S = ((THERMAL_WAVES * T) ** 1.5 * Math.exp(-GROUND_K / T)) / gas.hydrogenDensity(u);
+	const S = ((thermalWaves * T) ** 1.5 * Math.exp(-GROUND_K / T)) / gas.hydrogenDensity(u);
 	return 2 / (1 + Math.sqrt(1 + 4 / S));
 }
 
 /** d(x_e, T)/dX with X = ln(1+z). */
-function slopeOf(gas: Gas, fudge: Fudge): (X: number, state: Pair) => Pair {
+function slopeOf(
+	gas: Gas,
+	fudge: Fudge,
+	{ thermalWaves, compton }: Electrons
+): (X: number, state: Pair) => Pair {
 	const factor = fudge === 'recfast15' ? 1.125 : 1.14;
 	const gaussians = fudge === 'recfast15';
 	return (X, [x, T]) => {
@@ -154,7 +176,7 @@ function slopeOf(gas: Gas, fudge: Fudge): (X: number, state: Pair) => Pair {
 
 		const t = T / 1e4;
 		const recombination = (factor * 1e-19 * 4.309 * t ** -0.6166) / (1 + 0.6703 * t ** 0.53);
-		const ionisation = recombination * (THERMAL_WAVES * T) ** 1.5 * Math.exp(-SECOND_LEVEL_K / T);
+		const ionisation = recombination * (thermalWaves * T) ** 1.5 * Math.exp(-SECOND_LEVEL_K / T);
 		let K = LYMAN_VOLUME / H;
 		if (gaussians) {
 			K *=
@@ -165,7 +187,7 @@ function slopeOf(gas: Gas, fudge: Fudge): (X: number, state: Pair) => Pair {
 		const trapped = K * n * (1 - x);
 		const escape = (1 + trapped * TWO_PHOTON) / (1 + trapped * (TWO_PHOTON + ionisation));
 		const balance = recombination * x * x * n - ionisation * (1 - x) * Math.exp(-LYMAN_ALPHA_K / T);
-		const drag = ((COMPTON * Tr ** 4) / H) * (x / (1 + gas.heliumRatio + x));
+		const drag = ((compton * Tr ** 4) / H) * (x / (1 + gas.heliumRatio + x));
 		return [(balance * escape) / H, 2 * T + drag * (T - Tr)];
 	};
 }

@@ -1,4 +1,5 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
+import type { ConstantsEdition } from '../../constants/index.ts';
 import { cosmologyInput } from '../cosmology/limits.ts';
 import { checksOf } from '../published-checks.ts';
 import { codata2018 } from '../sources.ts';
@@ -84,8 +85,9 @@ export const tla1 = defineCalculator({
 	sources: [...THERMAL_SOURCES, codata2018('h, c, k, m_e, m_u, σ_T')],
 	checks: checksOf('thermal.tla1'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
-	compute({ cosmology, Yp, z, fudge }): Computed {
-		const opened = thermalHistory(cosmology, Yp, fudge);
+	followsEdition: true,
+	compute({ cosmology, Yp, z, fudge }, edition?: ConstantsEdition): Computed {
+		const opened = thermalHistory(cosmology, Yp, fudge, edition);
 		if (!opened.ok) return opened;
 		const { gas, at } = opened.history;
 		const { x_e, Tk } = at(z);

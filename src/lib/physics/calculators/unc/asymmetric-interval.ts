@@ -1,7 +1,7 @@
 import { defineCalculator, type Computed } from '../../calculator.ts';
 import { erf } from '../../numerics/erf.ts';
-import { exactly } from '../uncertainties.ts';
 import { gum, OWN_UNIT, plain } from './sources.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** The interval from k lower to k upper uncertainties about a value, and the share of a normal spread that it covers. */
 export const asymmetricInterval = defineCalculator({
@@ -43,7 +43,7 @@ export const asymmetricInterval = defineCalculator({
 		}
 	],
 	sources: [gum('6.2.2 and annex G')],
-	checks: [],
+	checks: checksOf('unc.asymmetric_interval'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ k, x, uLower, uUpper }): Computed {
 		const values = {
@@ -55,7 +55,7 @@ export const asymmetricInterval = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: isLopsided ? ['lopsided'] : []
 		};
 	}

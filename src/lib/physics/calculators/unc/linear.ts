@@ -1,6 +1,6 @@
 import { defineCalculator, refuse, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { gum, OWN_UNIT } from './sources.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Standard uncertainty of a weighted sum Σaᵢxᵢ whose parts may depend on one another: u² = Σ aᵢaⱼuᵢuⱼrᵢⱼ. Refuses what is
@@ -58,7 +58,7 @@ export const linear = defineCalculator({
 	assumptions: ['Without correlations given, the parts are independent.', OWN_UNIT],
 	warnings: [],
 	sources: [gum('5.2.2, equation (16)')],
-	checks: [],
+	checks: checksOf('unc.linear'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute(inputs): Computed {
 		const coeff = inputs.coeff as number[];
@@ -84,7 +84,7 @@ export const linear = defineCalculator({
 			}
 		}
 		const values = { u: largest * Math.sqrt(Math.max(0, square)) };
-		return { ok: true, values, uncertainties: exactly(values) };
+		return { ok: true, values, uncertainties: 'exact' };
 	}
 });
 

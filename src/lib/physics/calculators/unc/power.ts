@@ -1,6 +1,6 @@
 import { defineCalculator, refuse, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { gum, OWN_UNIT, plain } from './sources.ts';
+import { checksOf } from '../published-checks.ts';
 
 /**
  * Value and standard uncertainty of a product of powers C × x₁^p₁ × x₂^p₂ …, by the linear rule: (u/y)² = Σ(pᵢuᵢ/xᵢ)².
@@ -51,7 +51,7 @@ export const power = defineCalculator({
 		}
 	],
 	sources: [gum('5.1.6, and 5.1.2 note for the limits of the linear rule')],
-	checks: [],
+	checks: checksOf('unc.power'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute({ C, terms }): Computed {
 		let value: number = C;
@@ -81,7 +81,7 @@ export const power = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: isDoubtful ? ['linear-doubtful'] : []
 		};
 	}

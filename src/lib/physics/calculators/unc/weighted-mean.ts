@@ -1,6 +1,6 @@
 import { defineCalculator, refuse, type Computed } from '../../calculator.ts';
-import { exactly } from '../uncertainties.ts';
 import { gum, OWN_UNIT } from './sources.ts';
+import { checksOf } from '../published-checks.ts';
 
 /** Mean of independent results weighted by 1/u², its standard uncertainty, and χ² of the results about it. */
 export const weightedMean = defineCalculator({
@@ -70,7 +70,7 @@ export const weightedMean = defineCalculator({
 			fromMemory: true
 		}
 	],
-	checks: [],
+	checks: checksOf('unc.weighted_mean'),
 	history: [{ revision: '1.0.0', date: '2026-12-01', change: 'First version.' }],
 	compute(inputs): Computed {
 		const x = inputs.x as number[];
@@ -95,7 +95,7 @@ export const weightedMean = defineCalculator({
 		return {
 			ok: true,
 			values,
-			uncertainties: exactly(values),
+			uncertainties: 'exact',
 			warnings: chi2 > free + 2 * Math.sqrt(2 * free) ? ['disagree'] : []
 		};
 	}

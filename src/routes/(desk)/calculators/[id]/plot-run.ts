@@ -2,7 +2,7 @@
 import type { Calculator, RawInputs } from '$lib/physics/calculator.ts';
 import {
 	sweepPlaces,
-	sweptPoint,
+	sweptPoints,
 	type Sweep,
 	type SweptPoint
 } from '$lib/physics/calculators/sweep.ts';
@@ -31,9 +31,15 @@ export async function workPoints(
 	const places = sweepPlaces(sweep, whole);
 	const points: SweptPoint[] = [];
 	let since = performance.now();
-	for (const place of places) {
-		points.push(sweptPoint(calculator, inputs, sweep, place));
-		if (performance.now() - since < STRETCH_MS) continue;
+	/** Points worked at one go: a single one at first, since some calculators take long over it. */
+	let share = 1;
+	while (points.length < places.length) {
+		const next = places.slice(points.length, points.length + share);
+		points.push(...sweptPoints(calculator, inputs, sweep, next));
+		const spent = performance.now() - since;
+		if (spent < STRETCH_MS / 4) share *= 2;
+		if (spent < STRETCH_MS) continue;
+		share = Math.max(1, Math.floor(share / 2));
 		if (!onstretch(points.length, places.length)) return null;
 		await pause();
 		since = performance.now();

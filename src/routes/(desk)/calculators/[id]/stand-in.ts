@@ -1,5 +1,6 @@
 /** What a calculator takes where an optional input is left empty. */
 import { resolveUnit, type Calculator } from '$lib/physics/calculator.ts';
+import { constants } from '$lib/physics/constants/index.ts';
 import { printDigits, printUnit } from '$lib/widget/print-reading.ts';
 import { groupOf } from './fields.ts';
 
@@ -24,6 +25,11 @@ export function standIn(calculator: Calculator, key: string): string {
 		case 'decimal':
 			return `${spec.initial} stands in`;
 		case 'cosmology':
-			return `${spec.initial.set} stands in`;
+			return `${setWords(spec.initial)} stands in`;
 	}
+}
+
+/** A published parameter set by its name in words: “Planck 2018”. */
+export function setWords({ set }: { set?: string }): string {
+	return Object.entries(constants.cosmologies).find(([key]) => key === set)?.[1].label ?? '';
 }

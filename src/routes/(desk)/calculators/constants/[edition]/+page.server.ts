@@ -1,4 +1,6 @@
-import { edition, EDITION_IN_USE } from '$lib/physics/constants/index.ts';
+import { catalogue } from '$lib/physics/calculators/index.ts';
+import { edition, EDITION_IN_USE, editions } from '$lib/physics/constants/index.ts';
+import { movedConstants } from '$lib/physics/constants/moved.ts';
 import { requirePermission } from '$lib/workflow/permissions.ts';
 import { error } from '@sveltejs/kit';
 import type { PageServerLoad } from './$types';
@@ -13,5 +15,14 @@ export const load: PageServerLoad = ({ params, locals }) => {
 			code: 'not-found'
 		});
 	}
-	return { edition: found, inUse: found.name === EDITION_IN_USE };
+	return {
+		edition: found,
+		inUse: found.name === EDITION_IN_USE,
+		others: Object.values(editions)
+			.filter(({ name }) => name !== found.name)
+			.map((other) => ({ name: other.name, moved: movedConstants(found, other) })),
+		following: [...catalogue.values()]
+			.filter(({ followsEdition }) => followsEdition)
+			.map(({ id, title }) => ({ id, title }))
+	};
 };
