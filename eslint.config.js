@@ -14,6 +14,7 @@ const OWN = [
 	'widget',
 	'factcheck',
 	'workflow',
+	'outlines',
 	'copy-lint',
 	'import',
 	'export',
@@ -69,6 +70,11 @@ const TABLE = {
 		own: ['physics', 'widget', 'factcheck'],
 		packages: [],
 		why: 'what is printed of a piece depends on the piece and its readings alone'
+	},
+	outlines: {
+		own: ['physics', 'widget'],
+		packages: [],
+		why: 'an outline is a document that anyone could have written'
 	},
 	forms: {
 		own: ['widget', 'workflow', 'errors', 'physics', 'themes'],

@@ -18,6 +18,8 @@ export default defineConfig({
 					environment: 'node',
 					include: ['{src,embed,tests/support}/**/*.test.ts', 'tests/*.test.ts'],
 					exclude: ['**/*.db.test.ts'],
+					// Pictures and type checks take their time on a small machine.
+					testTimeout: 20_000,
 					maxWorkers: 2,
 					sequence: { groupOrder: 1 }
 				}

@@ -51,6 +51,8 @@ describe('refused', () => {
 		['src/lib/builder/a.ts', uses('$lib/physics/formula/parse.ts'), 'on the server alone'],
 		['embed/frame.ts', uses('../src/lib/physics/house/settle.ts'), 'on the server alone'],
 		['src/lib/widget/a.ts', 'export const a = window.innerWidth;', 'take it as an argument'],
+		['src/lib/outlines/a.ts', uses('../factcheck/weigh.ts'), 'anyone could have written'],
+		['src/lib/builder/a.ts', uses('../outlines/index.ts'), 'over HTTP'],
 		['src/lib/widget/a.ts', uses('svelte'), 'the builder, the frame and the fact-check'],
 		[
 			'src/lib/widget/a.ts',
@@ -96,6 +98,7 @@ describe('allowed', () => {
 		['src/lib/physics/house/settle.ts', uses('../formula/parse.ts')],
 		['src/lib/server/services/a.ts', uses('../../physics/house/settle.ts')],
 		['src/lib/widget/a.ts', uses('zod') + usesType('../physics/calculator.ts')],
+		['src/lib/widget/a.ts', uses('diff')],
 		['src/lib/widget/a.ts', uses('@noble/hashes/sha2.js') + uses('../errors.ts')],
 		['src/lib/factcheck/a.ts', uses('../physics/units/units.ts') + usesType('../widget/stated.ts')],
 		['src/lib/workflow/a.ts', uses('../errors.ts') + usesType('../factcheck/verdict.ts')],

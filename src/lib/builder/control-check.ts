@@ -57,10 +57,18 @@ function checkRange(
 	if (step === null || step <= 0 || step > max - min)
 		return wrong('A step is more than nothing and no longer than from end to end.');
 	const grid = { min, max, step };
+	const end = largestOnGrid(grid);
+	const start = snapToGrid(initial, grid);
+	// Past fifteen digits a step leaves dust in binary: that is no other number.
+	if (kind !== 'number' && isSame(end, max) && isSame(start, initial))
+		return { ok: true, fields: { kind, ...common, max: end, initial: start, step } };
 	const problem = kind === 'number' ? '' : gridProblem(grid, initial);
 	if (!problem) return { ok: true, fields: { kind, ...common, step } };
-	const end = largestOnGrid(grid);
 	return near(problem, { max: end, initial: snapToGrid(initial, { ...grid, max: end }) });
+}
+
+function isSame(one: number, other: number): boolean {
+	return Math.abs(one - other) <= 1e-12 * Math.abs(other);
 }
 
 /** A calculator refuses what lies past its ends; readers are never led there. */

@@ -28,8 +28,8 @@ const control = anyOf(Control).map((made): Control => {
 	return min < max ? { ...made, min, initial, max } : { ...made, min: 1, initial: 1, max: 2 };
 });
 
-/** Every block that is drawn from fields, by the schema. */
-const drawn = anyOf(Block).filter((block) => !isTextBlock(block));
+/** Every block that is drawn from fields, by the schema; names that the language has taken aren’t keys. */
+const drawn = anyOf(Block).filter((block) => !isTextBlock(block) && Block.safeParse(block).success);
 
 const step: fc.Arbitrary<Step> = fc.record({
 	id: id('step'),

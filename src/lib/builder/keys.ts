@@ -94,7 +94,12 @@ export function manuscriptKeys(targets: KeyTargets): Plugin[] {
 					if (event.key === '=') {
 						if (!view.editable) return false;
 						const number = focusedNumber(view.state);
-						if (!number && !view.state.selection.empty) return targets.tieSelection();
+						if (!number && !view.state.selection.empty) {
+							// The sign must not take tied words away with what else is selected.
+							const { doc, selection } = view.state;
+							const hasTied = doc.rangeHasMark(selection.from, selection.to, schema.marks.claim);
+							return targets.tieSelection() || hasTied;
+						}
 						if (!number || number.control !== null) return false;
 						targets.openTie(number);
 						return true;

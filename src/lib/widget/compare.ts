@@ -95,7 +95,9 @@ function blockChanges(before: Version, after: Version): BlockChange[] {
 		const words = wordsOf(was, is, before.words, after.words);
 		// What the block names may be called otherwise by now; that is told where it was changed.
 		const isWritten = !was || !is || !same(was, is);
-		const settings = isWritten ? settingChanges(withoutWords(was), withoutWords(is), names) : [];
+		const settings = isWritten
+			? settingChanges(withoutWords(was, is), withoutWords(is, was), names)
+			: [];
 		const isChanged = settings.length > 0 || words?.some(({ kind }) => kind !== 'same');
 		return [
 			{
@@ -134,17 +136,18 @@ function withTakenOut(were: readonly string[], are: readonly string[]): string[]
 	return order;
 }
 
-/** A block apart from its words: of running text, which of them are emphasised. */
-function withoutWords(block: Block | undefined): Record<string, unknown> {
+/** A block apart from its words: of running text, which are emphasised. Its kind is told where it became another. */
+function withoutWords(block: Block | undefined, other: Block | undefined): Record<string, unknown> {
 	if (!block) return {};
-	if (!isTextBlock(block)) return { ...block };
+	const { kind, ...rest } = { ...block, kind: other ? block.kind : undefined };
+	if (!isTextBlock(block)) return { ...rest, kind };
 	const marked = (mark: 'em' | 'strong') =>
 		block.content
 			.flatMap((inline) =>
 				inline.kind === 'text' && inline.marks?.includes(mark) ? [inline.text.trim()] : []
 			)
 			.join(' … ');
-	return { kind: block.kind, emphasis: marked('em'), strong: marked('strong') };
+	return { kind, emphasis: marked('em'), strong: marked('strong') };
 }
 
 function wiringChanges(

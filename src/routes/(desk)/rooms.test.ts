@@ -16,7 +16,7 @@ test('the list of keys names every key of the manuscript, and the rooms', () => 
 			'Ctrl Z',
 			'Ctrl Y',
 			'G M',
-			'?'
+			'? Ctrl ?'
 		])
 	);
 });

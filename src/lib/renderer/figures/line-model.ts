@@ -119,9 +119,9 @@ export function lineModel(input: LineInput, print: ChartPrint): LineModel | null
 					})
 				)
 			: null;
-	/** What has no place in the drawing stands under it. */
+	/** What has no place in the drawing stands under it. The reading's line is kept free, so that no setting moves the page. */
 	const unplaced = (room: Room) => [
-		...(only && !spot[room] ? [`${print.says.now}: ${only.words}.`] : []),
+		...(only ? [spot[room] ? '' : `${print.says.now}: ${only.words}.`] : []),
 		...bands
 			.filter((band) => band[room]?.words !== band.whole)
 			.map(({ whole }) => print.says.band(whole))
