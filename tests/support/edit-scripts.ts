@@ -91,6 +91,11 @@ function loosen(document: WidgetDocument, isGone: (ref: ReadingRef) => boolean):
 	}
 	document.blocks = document.blocks.filter((block) => {
 		if (block.kind === 'control') return !isGone({ control: block.control });
+		if (block.kind === 'table') return block.rows.every(({ reading }) => !isGone(reading));
+		if (block.kind === 'presets')
+			return block.presets.every(({ values }) =>
+				Object.keys(values).every((control) => !isGone({ control }))
+			);
 		if (block.kind !== 'chart' || block.form !== 'line') return true;
 		return (
 			!isGone({ control: block.x.control }) && !block.series.some((one) => isGone(one.reading))
@@ -247,6 +252,34 @@ const EDITS: Record<string, Edit> = {
 		document.controls.push(control);
 		document.blocks.push({ id: author.id('block'), kind: 'control', control: id });
 		if (chance.below(2) === 0) place(document, chance, { kind: 'setting', control: id });
+	},
+	'offers settings to try': (document, chance, author) => {
+		const control = chance.pick(document.controls);
+		if (!control) return;
+		const values = { [control.id]: control.initial };
+		const presets = [{ id: author.id('preset'), label: author.word(), values }];
+		document.blocks.push({
+			id: author.id('block'),
+			kind: 'presets',
+			label: author.word(),
+			presets
+		});
+	},
+	'sets readings in a table': (document, chance, author) => {
+		const step = chance.pick(document.steps);
+		const [output, spec] = Object.entries(
+			catalogue.get(step?.calculator ?? '')?.outputs ?? {}
+		)[0] ?? ['', undefined];
+		if (!step || typeof spec?.unit !== 'string') return;
+		const row = {
+			id: author.id('row'),
+			label: author.word(),
+			reading: { step: step.id, output },
+			unit: spec.unit,
+			figures: 2
+		};
+		const table = { kind: 'table' as const, title: author.word(), across: null, source: '' };
+		document.blocks.push({ id: author.id('block'), ...table, rows: [row] });
 	},
 	'takes a slider away': (document, chance) => {
 		const control = chance.pick(document.controls);

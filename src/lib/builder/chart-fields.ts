@@ -1,11 +1,9 @@
 /** A chart's words to begin with, from what the calculators say of themselves. The writer changes them at will. */
 import type { CalculatorSet } from '../physics/calculator.ts';
-import { unitOf } from '../physics/units/units.ts';
 import { hasOptions } from '../widget/control.ts';
 import type { Control, LineChart, ReadingRef, WidgetDocument } from '../widget/document.ts';
 import { sampleChart } from '../widget/evaluate.ts';
 import { wiringOf } from '../widget/graph.ts';
-import { printStated, stateReading } from '../widget/stated.ts';
 import { sameRef, type BenchReading } from './bench-readings.ts';
 
 export type LineFields = Omit<LineChart, 'id' | 'kind'>;
@@ -31,7 +29,7 @@ export function suggestChart(
 		source: sources(document, reading.ref, calculators),
 		description: ''
 	};
-	return { ...fields, description: ends(document, control, fields, calculators) };
+	return { ...fields, description: trend(document, control, fields, calculators) };
 }
 
 /** The unit that the copy prints this reading in, or the reading's own. */
@@ -54,23 +52,28 @@ function sources(document: WidgetDocument, ref: ReadingRef, calculators: Calcula
 	return [...new Set(titles)].join('; ').slice(0, 240);
 }
 
-/** “From 100 to 500 million years (the wave left at this age), frequency as observed rises from … to ….” */
-function ends(
+/**
+ * “Further along its slider, the wave left at this age, frequency as observed rises.” Without numbers: they can't be tied
+ * in a description, and the table under the chart gives them.
+ */
+function trend(
 	document: WidgetDocument,
 	control: Control,
 	fields: Pick<LineFields, 'x' | 'y' | 'series'>,
 	calculators: CalculatorSet
 ): string {
 	const [points = []] = sampleChart(document, {}, fields, calculators);
-	const first = points[0]?.y;
-	const last = points.at(-1)?.y;
-	if (first == null || last == null || hasOptions(control)) return '';
-	const { unit, label } = fields.y;
-	const say = (value: number) =>
-		printStated(stateReading(value, unit, { unit, figures: 3, hedge: 'none' }));
-	const trend = last > first ? 'rises' : last < first ? 'falls' : 'goes';
-	const range = `${control.min} to ${control.max} ${unitOf(control.unit)?.words.many ?? ''}`.trim();
-	return `From ${range} (${lowerFirst(control.label)}), ${lowerFirst(label)} ${trend} from ${say(first)} to ${say(last)}.`;
+	const heights = points.flatMap(({ y }) => (y === null ? [] : [y]));
+	const [first] = heights;
+	const last = heights.at(-1);
+	if (first === undefined || last === undefined || hasOptions(control)) return '';
+	const top = Math.max(...heights);
+	const bottom = Math.min(...heights);
+	const what = lowerFirst(fields.y.label);
+	const along = `A line over “${control.label}”, from the lowest setting to the highest: ${what}`;
+	if (top > Math.max(first, last)) return `${along} rises to a peak and falls again.`;
+	if (bottom < Math.min(first, last)) return `${along} falls to a trough and rises again.`;
+	return `${along} ${last > first ? 'rises' : last < first ? 'falls' : 'stays level'} all the way.`;
 }
 
 function lowerFirst(text: string): string {

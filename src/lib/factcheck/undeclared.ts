@@ -1,4 +1,5 @@
 /** Numbers that nobody answers for yet: neither tied to a reading nor named as no claim. They hold a proof back. */
+import { constants } from '../physics/constants/index.ts';
 import { blockCaptions } from '../widget/block-captions.ts';
 import { hasOptions } from '../widget/control.ts';
 import { isTextBlock, type WidgetDocument } from '../widget/document.ts';
@@ -76,7 +77,7 @@ function captions(document: WidgetDocument): Pick<Line, 'blockId' | 'caption' | 
 		...document.controls.flatMap((control) => [
 			{ blockId: control.id, caption: 'a slider’s label', text: control.label },
 			...(hasOptions(control)
-				? control.options.map(({ label }) => ({
+				? control.options.filter(isNoSetName).map(({ label }) => ({
 						blockId: control.id,
 						caption: 'an option’s label',
 						text: label
@@ -87,6 +88,13 @@ function captions(document: WidgetDocument): Pick<Line, 'blockId' | 'caption' | 
 			blockCaptions(block).map((words) => ({ blockId: block.id, ...words }))
 		)
 	];
+}
+
+/** “WMAP, nine years” is the name of a parameter set, whatever numbers stand in it. */
+const SET_NAMES = new Set<string>(Object.values(constants.cosmologies).map(({ label }) => label));
+
+function isNoSetName({ label }: { label: string }): boolean {
+	return !SET_NAMES.has(label);
 }
 
 /** Undeclared numbers as findings, each with its mend. */

@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import { catalogue } from '../physics/calculators/index.ts';
 import { firstLight } from '../server/demo/first-light.ts';
@@ -235,6 +236,48 @@ describe('wiring that doesn’t fit together', () => {
 			reason: 'still-in-use',
 			mine: null,
 			stands: 'theirs'
+		});
+	});
+
+	describe('of the piece’s own formulas', () => {
+		const stored: unknown = JSON.parse(
+			readFileSync(
+				new URL('../../../tests/documents/v2-thrown-stone.json', import.meta.url),
+				'utf8'
+			)
+		);
+		const parsed = parseDocument(stored, catalogue);
+		if (!parsed.ok) throw new Error(JSON.stringify(parsed.issues));
+		const thrown = parsed.document;
+
+		test('a formula changed by one and its setting by the other both hold', () => {
+			const mine = changed(thrown, ({ formulas }) => (formulas[0]!.title = 'Height of the stone'));
+			const theirs = changed(thrown, ({ steps }) => {
+				steps[0]!.settings.speed = { from: 'fixed', value: 14 };
+			});
+			const { document, asks } = merge(thrown, mine, theirs);
+			expect(asks).toEqual([]);
+			expect(document.formulas[0]?.title).toBe('Height of the stone');
+			expect(document.steps[0]?.settings.speed).toEqual({ from: 'fixed', value: 14 });
+		});
+
+		test('one taken away while the other hangs another step on it comes back', () => {
+			const mine = changed(thrown, (document) => {
+				document.formulas = [];
+				document.steps = [];
+				document.claims = [];
+				document.blocks = document.blocks.filter(({ kind }) => kind === 'control');
+			});
+			const theirs = changed(thrown, (document) => {
+				document.steps.push({ ...document.steps[0]!, id: 'again' });
+			});
+			const { document, asks } = merge(thrown, mine, theirs);
+			expect(document.formulas.map(({ id }) => id)).toEqual(['thrown']);
+			expect(document.steps.map(({ id }) => id)).toEqual(['again']);
+			expect(asks.map(({ place, reason }) => [place, reason])).toContainEqual([
+				'formulas/thrown',
+				'still-in-use'
+			]);
 		});
 	});
 

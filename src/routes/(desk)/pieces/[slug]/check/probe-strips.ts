@@ -53,7 +53,9 @@ function probeAt(
 	return {
 		setting: settingWords(document, evaluation, control.id),
 		sentence: place?.sentence ?? '',
-		verdict: weighing ? weigh(weighing.stated, weighing.reading, document.language).verdict : 'unweighed',
+		verdict: weighing
+			? weigh(weighing.stated, weighing.reading, document.language).verdict
+			: 'unweighed',
 		first: value === control.initial
 	};
 }

@@ -40,13 +40,6 @@ export function verdictPicture(
 		words,
 		beam: beamPicture(stated, reading),
 		reads: readsOnBeam(stated, reading, document.language),
-		says: verdictSentence(
-			stated,
-			reading,
-			view.verdict,
-			'office',
-			words,
-			document.language
-		)
+		says: verdictSentence(stated, reading, view.verdict, 'office', words, document.language)
 	};
 }
