@@ -6,8 +6,10 @@ import './document.css';
 import { hydrate } from 'svelte';
 import type { Calculator, CalculatorSet } from '../src/lib/physics/calculator.ts';
 import type { HouseDefinition } from '../src/lib/physics/house/definition.ts';
+import { loadBlockViews } from '../src/lib/renderer/blocks/block-views.ts';
 import { loadChartViews } from '../src/lib/renderer/blocks/chart-views.ts';
 import Frame from '../src/lib/renderer/Frame.svelte';
+import { loadReaderWords } from '../src/lib/renderer/reader-words.ts';
 import type { FrameRelease } from '../src/lib/renderer/release.ts';
 import { loadPrintWords } from '../src/lib/widget/languages/load.ts';
 import { heightMessage } from './messages.ts';
@@ -22,6 +24,8 @@ async function wake(target: HTMLElement, { release, calculators }: Inlined): Pro
 	const [loaded] = await Promise.all([
 		Promise.all(Object.entries(calculators).map(([id, address]) => loadCalculator(id, address))),
 		loadChartViews(release.document),
+		loadBlockViews(release.document),
+		loadReaderWords(release.document.language),
 		loadPrintWords(release.document.language)
 	]);
 	// A release from before the house had calculators of its own carries none.

@@ -23,8 +23,13 @@ export default defineConfig({
 	base: '/press/',
 	publicDir: false,
 	resolve: {
-		// Each form of chart is a script of its own, which only the frames that show it load.
-		alias: [{ find: /^(.*)\/chart-views\.ts$/, replacement: '$1/chart-views-later.ts' }]
+		// What few pieces have, and the widget's words in other languages, are scripts of their own that only some frames load.
+		alias: [
+			{
+				find: /^(.*)\/(chart-views|block-views|reader-words)\.ts$/,
+				replacement: '$1/$2-later.ts'
+			}
+		]
 	},
 	plugins: [
 		signs(),

@@ -64,7 +64,7 @@ export const explanations = {
 	'version-conflict': {
 		status: 409,
 		message: 'Someone else saved this piece while you were writing.',
-		help: 'Load their version, or keep yours as the newest. Both are kept.'
+		help: 'Bring yours together with theirs, and save on their version. Both are kept.'
 	},
 	'slip-changed': {
 		status: 409,

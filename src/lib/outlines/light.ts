@@ -12,7 +12,6 @@ import {
 	slider,
 	stated,
 	step,
-	takes,
 	text,
 	words,
 	type Outline
@@ -195,9 +194,8 @@ export const dipInTheNoise: Outline = outline({
 		step('dial', 'g21.frequency_from_z', { z: follows('redshift') }),
 		step('depth', 'g21.deepest', {
 			cosmology: fixed({ set: 'Planck18' }),
-			z: takes('stretch', 'z')
-		}),
-		step('stretch', 'g21.z_from_frequency', { frequency_MHz: takes('dial', 'frequency') })
+			z: follows('redshift')
+		})
 	],
 	controls: [slider('redshift', 'Redshift at which the hydrogen is seen', '', [10, 25, 0.5, 20])],
 	blocks: [

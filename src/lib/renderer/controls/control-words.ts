@@ -21,9 +21,10 @@ export function labelWithUnit(
 
 /** “180 million years”, or the option's own label. */
 export function valueInWords(control: Control, value: number, language: Language): string {
-	return settingWords(
+	const words = settingWords(
 		{ controls: [control], language },
 		{ values: { [control.id]: value } },
 		control.id
 	);
+	return words.replaceAll('\u00a0', ' ');
 }

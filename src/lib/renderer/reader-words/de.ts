@@ -1,4 +1,4 @@
-import type { ReaderWords } from '../reader-words.ts';
+import type { ReaderWords } from './en.ts';
 
 export const de: ReaderWords = {
 	stepLess: 'einen Schritt weniger',

@@ -47,3 +47,5 @@ export const en = {
 	textVersion: 'Text version and who made and checked this',
 	noNumberAtSetting: 'There is no number to give at this setting.'
 };
+
+export type ReaderWords = typeof en;

@@ -1,4 +1,4 @@
-import type { ReaderWords } from '../reader-words.ts';
+import type { ReaderWords } from './en.ts';
 
 export const es: ReaderWords = {
 	stepLess: 'un paso menos',
