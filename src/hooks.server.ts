@@ -43,8 +43,12 @@ const refuseForeign: Handle = ({ event, resolve }) => {
 		if (refusal) return Response.json({ error: { message: refusal } }, { status: 403 });
 	}
 	const limit = bodyLimitOf(event.route.id, event.request.method);
-	if (Number(event.request.headers.get('content-length')) > limit.bytes)
-		return apiFailure(new SteelyardError(limit.code));
+	if (Number(event.request.headers.get('content-length')) > limit.bytes) {
+		const refusal = apiFailure(new SteelyardError(limit.code));
+		// What was sent stays unread, so nothing more can come over this connection.
+		refusal.headers.set('connection', 'close');
+		return refusal;
+	}
 	event.request = withinLimit(event.request, limit.bytes);
 	return resolve(event);
 };
