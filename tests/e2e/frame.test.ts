@@ -391,21 +391,30 @@ test('every calculator of the catalogue is in the build', async () => {
 	expect(Object.keys(calculators).sort()).toEqual([...catalogue.keys()].sort());
 });
 
-/** gzip -9, in bytes. The runtime that draws is 15 kB of the script; see DEVELOPERS.md for what would lower it. */
-const BUDGET = { document: 10_000, script: 46_000, everything: 150_000 };
+/**
+ * gzip -9, in bytes, of all that this frame really asks for: its document, its scripts with those of its chart, and the
+ * face it is set in. Blocks of many kinds have brought the script past the 26 kB that are the aim; DEVELOPERS.md says
+ * what would lower it.
+ */
+const BUDGET = { document: 12_000, script: 66_000, everything: 130_000 };
 
 test('the frame keeps to its budget', async () => {
-	const size = (keys: (key: string) => boolean) =>
-		bundle.files
-			.filter(({ key }) => keys(key))
+	const { page } = await read();
+	const asked = new Set<string>();
+	page.on('response', (response) => asked.add(new URL(response.url()).pathname));
+	await page.reload({ waitUntil: 'networkidle' });
+	const loaded = bundle.files.filter(({ key }) => key.endsWith('.html') || asked.has(`/${key}`));
+	const size = (ending: RegExp) =>
+		loaded
+			.filter(({ key }) => ending.test(key))
 			.reduce((sum, { bytes }) => sum + gzipSync(bytes, { level: 9 }).length, 0);
-	const { later } = await readManifest(PRESS_FOLDER);
-	const document = size((key) => key.endsWith('.html'));
-	const script = size((key) => key.endsWith('.js') && !later.includes(key.replace('press/', '')));
-	const all = size((key) => !key.startsWith('releases/'));
-	expect(document, 'document').toBeLessThanOrEqual(BUDGET.document);
-	expect(script, 'script').toBeLessThanOrEqual(BUDGET.script);
-	expect(all, 'all together').toBeLessThanOrEqual(BUDGET.everything);
+	expect(
+		loaded.some(({ key }) => /LineChart/.test(key)),
+		'the chart’s own script'
+	).toBe(true);
+	expect(size(/\.html$/), 'document').toBeLessThanOrEqual(BUDGET.document);
+	expect(size(/\.js$/), 'script').toBeLessThanOrEqual(BUDGET.script);
+	expect(size(/./), 'all together').toBeLessThanOrEqual(BUDGET.everything);
 });
 
 test('no script carries a schema, a parser or a typesetter', async () => {
